@@ -1,0 +1,30 @@
+package org.saddlebook.api.campaign;
+
+/** How the errors of the rate constants behave; {@code key} is the word used in files. */
+public enum ErrorModel {
+    /** Constant relative error of unknown size: least squares on ln k, scale estimated from the scatter. */
+    CONSTANT_RELATIVE("constant-relative"),
+    /** Stated standard uncertainties of k: weights (k/u)^2 on ln k, never rescaled. */
+    STATED("stated");
+
+    private final String key;
+
+    ErrorModel(String key) {
+        this.key = key;
+    }
+
+    /** The word used in files. */
+    public String key() {
+        return key;
+    }
+
+    /** The error model with this word; throws {@link IllegalArgumentException} for an unknown one. */
+    public static ErrorModel of(String key) {
+        for (ErrorModel model : values()) {
+            if (model.key.equals(key)) {
+                return model;
+            }
+        }
+        throw new IllegalArgumentException("unknown error model: " + key);
+    }
+}

@@ -1,0 +1,83 @@
+package org.saddlebook.api.campaign;
+
+import java.util.Objects;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.OptionalInt;
+
+/**
+ * One measured rate constant at one temperature.
+ *
+ * @param kelvin temperature, K; positive and finite
+ * @param rate rate constant in SI, (m3/mol)^(order-1)/s; positive and finite
+ * @param kelvinUncertainty standard uncertainty of the temperature, K; absent when not stated, positive otherwise
+ * @param rateUncertainty standard uncertainty of the rate constant in SI; absent when not stated, positive otherwise
+ * @param label the run's own name; empty when it has none
+ * @param excluded reason why a person excluded it; absent when it is used
+ * @param asRead what stood in the source
+ */
+public record RatePoint(
+        double kelvin,
+        double rate,
+        OptionalDouble kelvinUncertainty,
+        OptionalDouble rateUncertainty,
+        String label,
+        Optional<String> excluded,
+        AsRead asRead) {
+    /**
+     * What stood in the source, so that the reading can be checked.
+     *
+     * @param line physical line from 1; absent when the point was not read from a file
+     * @param temperature the temperature's text
+     * @param rate the rate constant's text
+     */
+    public record AsRead(OptionalInt line, String temperature, String rate) {
+        /** For points that were not read from a file. */
+        public static final AsRead NOT_READ = new AsRead(OptionalInt.empty(), "", "");
+
+        /** Checks the components. */
+        public AsRead {
+            Objects.requireNonNull(line, "line");
+            Objects.requireNonNull(temperature, "temperature");
+            Objects.requireNonNull(rate, "rate");
+        }
+    }
+
+    /** Checks the components. */
+    public RatePoint {
+        positive("temperature in kelvin", kelvin);
+        positive("rate constant", rate);
+        kelvinUncertainty.ifPresent(u -> positive("uncertainty of the temperature", u));
+        rateUncertainty.ifPresent(u -> positive("uncertainty of the rate constant", u));
+        Objects.requireNonNull(label, "label");
+        Objects.requireNonNull(excluded, "excluded");
+        Objects.requireNonNull(asRead, "asRead");
+    }
+
+    /** A used point without uncertainties. */
+    public static RatePoint of(double kelvin, double rate) {
+        return new RatePoint(
+                kelvin, rate, OptionalDouble.empty(), OptionalDouble.empty(), "", Optional.empty(), AsRead.NOT_READ);
+    }
+
+    /** The same with a stated standard uncertainty of the rate constant, SI. */
+    public RatePoint withRateUncertainty(double uncertainty) {
+        return new RatePoint(kelvin, rate, kelvinUncertainty, OptionalDouble.of(uncertainty), label, excluded, asRead);
+    }
+
+    /** The same, excluded for this reason. */
+    public RatePoint exclude(String reason) {
+        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.of(reason), asRead);
+    }
+
+    /** The same, used again. */
+    public RatePoint include() {
+        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.empty(), asRead);
+    }
+
+    private static void positive(String what, double value) {
+        if (!(value > 0) || Double.isInfinite(value)) {
+            throw new IllegalArgumentException(what + " must be positive and finite: " + value);
+        }
+    }
+}

@@ -9,7 +9,10 @@ public interface RateFunction {
     /** The free parameters, in the order of every parameter array. A parameter fixed in the context does not appear. */
     List<Parameter> parameters();
 
-    /** Whether ln k is linear in the parameters: then the engine solves directly and {@link #starts} is not called. */
+    /**
+     * Whether ln k is linear in the parameters, beside a term of temperature alone: then the engine solves directly and
+     * {@link #starts} is not called.
+     */
     boolean linear();
 
     /**

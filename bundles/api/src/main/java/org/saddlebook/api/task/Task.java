@@ -1,6 +1,7 @@
 package org.saddlebook.api.task;
 
 import java.util.List;
+import java.util.concurrent.Callable;
 import java.util.function.IntFunction;
 import java.util.random.RandomGenerator;
 import org.osgi.annotation.versioning.ProviderType;
@@ -32,4 +33,30 @@ public interface Task {
      * @param part computes part i; must not depend on other parts nor on the order in which parts run
      */
     <T> List<T> parts(int count, IntFunction<T> part) throws Cancelled;
+
+    /**
+     * Runs code of a contributor that may be broken, so that only its own result is lost: whatever it throws becomes
+     * {@link Contained.Broke}, and so does silence longer than the host's patience where the host watches it.
+     *
+     * @param culprit who is named, for example {@code model com.example.law of bundle com.example.kinetics}
+     * @param work the code; a task it abandons must not hold locks
+     * @throws Cancelled when the user has cancelled
+     */
+    default <T> Contained<T> contain(String culprit, Callable<T> work) throws Cancelled {
+        try {
+            T value = work.call();
+            return value == null ? new Contained.Broke<>(culprit + " returned nothing") : new Contained.Answer<>(value);
+        } catch (Cancelled cancelled) {
+            throw cancelled;
+        } catch (Exception | LinkageError | StackOverflowError | AssertionError broken) {
+            return new Contained.Broke<>(culprit + " failed: " + describe(broken));
+        }
+    }
+
+    /** A fault in words: its type and message. */
+    static String describe(Throwable fault) {
+        String message = fault.getMessage();
+        String type = fault.getClass().getSimpleName();
+        return message == null || message.isBlank() ? type : type + ", " + message;
+    }
 }

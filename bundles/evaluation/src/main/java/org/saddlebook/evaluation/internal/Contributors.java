@@ -1,0 +1,59 @@
+package org.saddlebook.evaluation.internal;
+
+import java.io.IOException;
+import java.net.URI;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
+import java.util.HexFormat;
+import java.util.List;
+import java.util.TreeMap;
+import org.osgi.framework.Bundle;
+import org.osgi.framework.wiring.BundleWire;
+import org.osgi.framework.wiring.BundleWiring;
+import org.saddlebook.api.findings.Contributor;
+
+/** Collects the bundles that took part: those named and whatever they are wired to, the framework itself left out. */
+final class Contributors {
+    private final TreeMap<String, Contributor> found = new TreeMap<>();
+
+    /** Adds a bundle and what it is wired to. */
+    void add(Bundle bundle) {
+        if (bundle.getBundleId() == 0) {
+            return;
+        }
+        String key = bundle.getSymbolicName() + " " + bundle.getVersion();
+        if (found.containsKey(key)) {
+            return;
+        }
+        found.put(
+                key,
+                new Contributor(bundle.getSymbolicName(), bundle.getVersion().toString(), hash(bundle.getLocation())));
+        BundleWiring wiring = bundle.adapt(BundleWiring.class);
+        if (wiring != null) {
+            for (BundleWire wire : wiring.getRequiredWires(null)) {
+                add(wire.getProvider().getBundle());
+            }
+        }
+    }
+
+    /** The bundles by symbolic name. */
+    List<Contributor> list() {
+        return List.copyOf(found.values());
+    }
+
+    /** SHA-256 of the file behind a bundle location; empty when the location is not a file. */
+    private static String hash(String location) {
+        String file = location.startsWith("reference:") ? location.substring("reference:".length()) : location;
+        if (!file.startsWith("file:")) {
+            return "";
+        }
+        try {
+            Path path = Path.of(URI.create(file));
+            return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(Files.readAllBytes(path)));
+        } catch (IOException | IllegalArgumentException | NoSuchAlgorithmException unreadable) {
+            return "";
+        }
+    }
+}

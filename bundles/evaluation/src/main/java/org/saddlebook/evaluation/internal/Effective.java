@@ -1,0 +1,80 @@
+package org.saddlebook.evaluation.internal;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.TreeSet;
+import org.saddlebook.api.campaign.Campaign;
+import org.saddlebook.api.campaign.Choices;
+import org.saddlebook.api.campaign.ErrorModel;
+import org.saddlebook.api.campaign.RatePoint;
+import org.saddlebook.api.campaign.RateTable;
+import org.saddlebook.api.problem.InputException;
+import org.saddlebook.api.problem.Place;
+import org.saddlebook.api.problem.Problem;
+
+/** Folds defaults into a campaign, so that nothing is left to decide when findings are computed. */
+final class Effective {
+    private Effective() {}
+
+    /**
+     * The effective campaign.
+     *
+     * @param installed ids of the installed rate models
+     */
+    static Campaign of(Campaign campaign, List<String> installed) throws InputException {
+        List<Problem> problems = new ArrayList<>();
+        Choices choices = campaign.choices();
+        TreeSet<String> known = new TreeSet<>(installed);
+        for (String asked : choices.models()) {
+            if (!known.contains(asked)) {
+                problems.add(new Problem(
+                        "model-not-installed",
+                        Place.of("--model"),
+                        asked,
+                        known.isEmpty()
+                                ? "an installed rate model; none is installed"
+                                : "one of " + String.join(", ", known),
+                        "Name an installed model, or install the feature model-" + asked + "."));
+            }
+        }
+        Choices resolved =
+                choices.withModels(List.copyOf(choices.models().isEmpty() ? known : new TreeSet<>(choices.models())));
+        if (campaign.rateTable().isPresent()) {
+            RateTable table = campaign.rateTable().get();
+            resolved = resolved.withErrorModel(errorModel(campaign.title(), choices, table, problems));
+            if (choices.molecularity().isPresent() && choices.molecularity().getAsDouble() != table.order()) {
+                problems.add(new Problem(
+                        "molecularity-against-unit",
+                        Place.of(campaign.title()),
+                        "molecularity " + choices.molecularity().getAsDouble(),
+                        "order " + table.order() + ", from the unit "
+                                + table.rateUnit().code(),
+                        "Correct the stated molecularity or the unit of k."));
+            }
+        }
+        if (!problems.isEmpty()) {
+            throw new InputException(problems);
+        }
+        return campaign.withChoices(resolved);
+    }
+
+    private static ErrorModel errorModel(String title, Choices choices, RateTable table, List<Problem> problems) {
+        List<RatePoint> used = table.used();
+        Optional<RatePoint> without =
+                used.stream().filter(point -> point.rateUncertainty().isEmpty()).findFirst();
+        if (choices.errorModel().isEmpty()) {
+            return used.isEmpty() || without.isPresent() ? ErrorModel.CONSTANT_RELATIVE : ErrorModel.STATED;
+        }
+        if (choices.errorModel().get() == ErrorModel.STATED && without.isPresent()) {
+            problems.add(
+                    new Problem(
+                            "uncertainty-missing",
+                            new Place(title, without.get().asRead().line(), Optional.of("u(k)")),
+                            "a rate constant without a stated uncertainty",
+                            "u(k) for every used point, as the error model “stated” needs",
+                            "State u(k) for every row, exclude the row with a reason, or choose the error model constant-relative."));
+        }
+        return choices.errorModel().get();
+    }
+}

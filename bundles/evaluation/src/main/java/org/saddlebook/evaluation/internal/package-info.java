@@ -1,0 +1,2 @@
+/** Orders and runs the installed analyses. */
+package org.saddlebook.evaluation.internal;

@@ -88,11 +88,9 @@ fit <- function(case, table, model, error, standard) {
     say(case, paste0(key, "uncertaintyLn"), uLn)
     say(case, paste0(key, "lower"), exp(mean - quantile * uLn))
     say(case, paste0(key, "upper"), exp(mean + quantile * uLn))
-    if (!stated) {
-      wide <- sqrt(uLn^2 + variance)
-      say(case, paste0(key, "newLower"), exp(mean - quantile * wide))
-      say(case, paste0(key, "newUpper"), exp(mean + quantile * wide))
-    }
+    wide <- sqrt(uLn^2 + if (stated) mean((table$percent / 100)^2) else variance)
+    say(case, paste0(key, "newLower"), exp(mean - quantile * wide))
+    say(case, paste0(key, "newUpper"), exp(mean + quantile * wide))
   }
 }
 

@@ -206,9 +206,10 @@ def fit(engine, table, model, error_model, standard):
         key = "prediction." + text + "."
         out[key + "k"], out[key + "uncertaintyLn"] = exp(mean), u
         out[key + "lower"], out[key + "upper"] = exp(mean - quantile * u), exp(mean + quantile * u)
-        if not stated:
-            wide = sqrt(u * u + variance)
-            out[key + "newLower"], out[key + "newUpper"] = exp(mean - quantile * wide), exp(mean + quantile * wide)
+        # One more run scatters like the others: by s, or by the root mean square of the stated uncertainties.
+        own = sum(1 / weight for weight in w) / n if stated else variance
+        wide = sqrt(u * u + own)
+        out[key + "newLower"], out[key + "newUpper"] = exp(mean - quantile * wide), exp(mean + quantile * wide)
     return out
 
 

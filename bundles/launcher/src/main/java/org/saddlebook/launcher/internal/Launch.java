@@ -1,0 +1,124 @@
+package org.saddlebook.launcher.internal;
+
+import java.io.IOException;
+import java.io.PrintStream;
+import java.nio.file.Path;
+import java.time.Clock;
+import java.util.Collection;
+import java.util.Hashtable;
+import java.util.Map;
+import java.util.function.Function;
+import java.util.function.Supplier;
+import java.util.function.ToIntFunction;
+import org.apache.felix.framework.FrameworkFactory;
+import org.osgi.framework.BundleContext;
+import org.osgi.framework.BundleException;
+import org.osgi.framework.InvalidSyntaxException;
+import org.osgi.framework.ServiceReference;
+import org.osgi.framework.launch.Framework;
+
+/**
+ * One run of the product: framework up, console called, framework down.
+ *
+ * <p>The console is whatever bundle registers a {@code ToIntFunction<String[]>} with the property
+ * {@code saddlebook.entry=console}; launcher and bundles share nothing but types of the platform.
+ */
+final class Launch {
+    /** Exit code for arguments, installation or policy that cannot be used. */
+    static final int BAD_INPUT = 2;
+
+    /** Exit code for a fault inside the program. */
+    static final int INTERNAL_FAULT = 3;
+
+    private final Path home;
+    private final Folders folders;
+    private final Policy policy;
+    private final FaultLog log;
+    private final PrintStream err;
+
+    Launch(Path home, Folders folders, Policy policy, FaultLog log, PrintStream err) {
+        this.home = home;
+        this.folders = folders;
+        this.policy = policy;
+        this.log = log;
+        this.err = err;
+    }
+
+    /** Runs the console with these arguments and returns its exit code. */
+    int run(String[] arguments, Long shuffle) throws IOException, Refused, BundleException {
+        Plan plan = Plan.of(home, folders.userBundles(), policy, shuffle);
+        try (CacheSlot slot = CacheSlot.take(folders.cache().resolve("framework"), plan.key())) {
+            Framework framework;
+            try {
+                framework = started(plan, slot);
+            } catch (BundleException | RuntimeException e) {
+                if (!slot.filled()) {
+                    throw e;
+                }
+                log.write("The framework's cache is damaged and is made anew", e);
+                slot.spoil();
+                try (CacheSlot once = CacheSlot.temporary(plan.key())) {
+                    return run(arguments, plan, started(plan, once), once);
+                }
+            }
+            return run(arguments, plan, framework, slot);
+        }
+    }
+
+    private Framework started(Plan plan, CacheSlot slot) throws BundleException {
+        Map<String, Object> settings =
+                new java.util.HashMap<>(Settings.of(slot.storage(), home, folders, plan, policy));
+        settings.put("felix.log.logger", new FrameworkLog(log));
+        Framework framework = new FrameworkFactory().newFramework(settings);
+        framework.init();
+        framework.start();
+        return framework;
+    }
+
+    private int run(String[] arguments, Plan plan, Framework framework, CacheSlot slot)
+            throws IOException, BundleException {
+        try {
+            House house = new House(framework, plan, log);
+            BundleContext context = framework.getBundleContext();
+            context.registerService(Clock.class, Clock.systemUTC(), null);
+            context.registerService(Supplier.class, house::troubles, entry("troubles"));
+            Function<byte[], String> check = policy::forbids;
+            context.registerService(Function.class, check, entry("policy"));
+            house.open();
+            slot.markFilled();
+            for (String sentence : house.troubles().values()) {
+                err.println("saddlebook: " + sentence);
+            }
+            ToIntFunction<String[]> console = console(context);
+            if (console == null) {
+                err.println(
+                        "saddlebook: the bundle with the command line did not start; install the feature base again."
+                                + " Details are in " + log.file());
+                return INTERNAL_FAULT;
+            }
+            return console.applyAsInt(arguments);
+        } finally {
+            framework.stop();
+        }
+    }
+
+    private static Hashtable<String, Object> entry(String name) {
+        Hashtable<String, Object> properties = new Hashtable<>();
+        properties.put("saddlebook.entry", name);
+        return properties;
+    }
+
+    @SuppressWarnings({"unchecked", "rawtypes"}) // the registry knows raw classes only
+    private static ToIntFunction<String[]> console(BundleContext context) {
+        try {
+            Collection<ServiceReference<ToIntFunction>> found =
+                    context.getServiceReferences(ToIntFunction.class, "(saddlebook.entry=console)");
+            return found.isEmpty()
+                    ? null
+                    : (ToIntFunction<String[]>)
+                            context.getService(found.iterator().next());
+        } catch (InvalidSyntaxException e) {
+            throw new IllegalStateException("a constant filter", e);
+        }
+    }
+}

@@ -1,0 +1,52 @@
+package org.saddlebook.launcher.internal;
+
+import java.nio.file.Path;
+import java.util.HashMap;
+import java.util.Map;
+
+/** Settings of the framework and of its bundles. */
+final class Settings {
+    /** Packages of the class path that bundles see; they then exist once in the whole process. */
+    private static final String SHARED = "com.fasterxml.jackson.core;"
+            + "com.fasterxml.jackson.core.async;"
+            + "com.fasterxml.jackson.core.base;"
+            + "com.fasterxml.jackson.core.exc;"
+            + "com.fasterxml.jackson.core.filter;"
+            + "com.fasterxml.jackson.core.format;"
+            + "com.fasterxml.jackson.core.io;"
+            + "com.fasterxml.jackson.core.json;"
+            + "com.fasterxml.jackson.core.json.async;"
+            + "com.fasterxml.jackson.core.sym;"
+            + "com.fasterxml.jackson.core.type;"
+            + "com.fasterxml.jackson.core.util;version=2.21.8,"
+            + "org.osgi.service.component;version=1.5.1,"
+            + "org.osgi.service.component.propertytypes;version=1.5,"
+            + "org.osgi.service.component.runtime;version=1.5,"
+            + "org.osgi.service.component.runtime.dto;version=1.5,"
+            + "org.osgi.util.promise;version=1.3.0,"
+            + "org.osgi.util.function;version=1.2";
+
+    private Settings() {}
+
+    /** The framework's configuration. */
+    static Map<String, String> of(Path storage, Path home, Folders folders, Plan plan, Policy policy) {
+        Map<String, String> settings = new HashMap<>();
+        settings.put("org.osgi.framework.storage", storage.toString());
+        settings.put("org.osgi.framework.system.packages.extra", SHARED);
+        settings.put("felix.cache.locking", "false"); // CacheSlot locks, and does so between processes of one user
+        settings.put("felix.service.urlhandlers", "false"); // nobody needs them, and they cost start-up time
+        settings.put("felix.log.level", "1");
+        settings.put("ds.cache.metadata", "true"); // component descriptions are parsed at the first start only
+        settings.put("ds.loglevel", "error");
+        settings.put("saddlebook.home", home.toString());
+        settings.put("saddlebook.data", folders.data().toString());
+        settings.put("saddlebook.cache", folders.cache().toString());
+        settings.put("saddlebook.config", folders.config().toString());
+        settings.put("saddlebook.features", String.join(",", plan.features()));
+        settings.put("saddlebook.features.off", String.join(",", plan.off()));
+        if (!policy.register().isEmpty()) {
+            settings.put("saddlebook.register", policy.register());
+        }
+        return settings;
+    }
+}

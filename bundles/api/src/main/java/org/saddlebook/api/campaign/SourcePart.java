@@ -5,7 +5,8 @@ import java.util.Objects;
 /**
  * A file that belongs to a campaign.
  *
- * @param path relative path with forward slashes inside the campaign folder; for a bare table its file name
+ * @param path relative path with forward slashes inside the campaign folder; for a bare table the path
+ *     that it gets when it is saved, {@code sources/} and its file name
  * @param sha256 hash of its bytes, lower-case hexadecimal
  * @param size number of bytes
  * @param reader id of the reader that read it; empty when it is kept but not read

@@ -13,17 +13,34 @@ import java.util.OptionalDouble;
  * One piece of findings, in a closed vocabulary. Because every section uses nothing else, files, comparison, search, the
  * default report part and the default panel work for sections of bundles they do not know, also when that bundle is
  * gone. Trees are immutable.
+ *
+ * <p>Every tree has one JSON form and every such form one tree, because what would be written alike is refused when it is
+ * made:
+ *
+ * <ul>
+ *   <li>a group may not hold {@code unit} together with {@code value}, {@code standardUncertainty},
+ *       {@code standardFactor} or {@code interval}, nor hold {@code unit} alone or with {@code cautions} alone: that is a
+ *       {@link Quantity};
+ *   <li>a group may not hold {@code columns} together with {@code rows}: that is a {@link Table};
+ *   <li>a group may not hold {@code figure} together with {@code layers}: that is a {@link Figure};
+ *   <li>items may not all be non-empty items of scalars, equally many in each: that is a {@link Matrix};
+ *   <li>a matrix has at least one row and one column: use empty {@link Items} for no matrix at all.
+ * </ul>
  */
 public sealed interface Node {
     /**
      * Named members in order.
      *
-     * @param members key (lowerCamelCase, or a symbol) to node
+     * @param members key (lowerCamelCase, or a symbol) to node; see {@link Node} for keys that do not go together
      */
     record Group(Map<String, Node> members) implements Node {
         /** Copies the members, keeping their order. */
         public Group {
             members = Collections.unmodifiableMap(new LinkedHashMap<>(members));
+            String likeness = NodeShape.ofKeys(members.keySet());
+            if (!likeness.isEmpty()) {
+                throw new IllegalArgumentException("a group with keys " + members.keySet() + " looks like " + likeness);
+            }
         }
 
         /** The member with this key. */
@@ -41,6 +58,9 @@ public sealed interface Node {
         /** Copies the items. */
         public Items {
             items = List.copyOf(items);
+            if (NodeShape.looksLikeMatrix(items)) {
+                throw new IllegalArgumentException("items that are all rows of scalars look like a matrix");
+            }
         }
     }
 
@@ -185,8 +205,11 @@ public sealed interface Node {
     final class Matrix implements Node {
         private final double[][] entries;
 
-        /** Copies the rows, which must be of equal length and finite. */
+        /** Copies the rows, which must be of equal length, not empty and finite. */
         public Matrix(double[][] entries) {
+            if (entries.length == 0 || entries[0].length == 0) {
+                throw new IllegalArgumentException("a matrix has at least one row and one column");
+            }
             this.entries = new double[entries.length][];
             for (int i = 0; i < entries.length; i++) {
                 if (entries[i].length != entries[0].length) {
@@ -208,7 +231,7 @@ public sealed interface Node {
 
         /** Number of columns. */
         public int columns() {
-            return entries.length == 0 ? 0 : entries[0].length;
+            return entries[0].length;
         }
 
         /** The entry in row i, column j, from 0. */

@@ -30,6 +30,9 @@ public record Section(String id, String title, Outcome outcome, Node body, Map<S
         if (!id.matches("[a-zA-Z][a-zA-Z0-9.-]*")) {
             throw new IllegalArgumentException("not a section id: " + id);
         }
+        if (id.equals("schema") || id.equals("software") || id.equals("campaign") || id.equals("cautions")) {
+            throw new IllegalArgumentException("reserved, not a section id: " + id);
+        }
         Objects.requireNonNull(title, "title");
         Objects.requireNonNull(outcome, "outcome");
         if (!(body instanceof Node.Group || body instanceof Node.Items)) {

@@ -8,6 +8,12 @@ import org.saddlebook.api.task.Cancelled;
 /** A command of the console. Register an implementation as an OSGi service; it then appears in {@code help}. */
 @ConsumerType
 public interface Verb {
+    /**
+     * Service property that repeats {@link #name()}. Not required, but a verb that has it is only loaded when it is
+     * called: {@code @Component(property = Verb.NAME_PROPERTY + "=enter")}.
+     */
+    String NAME_PROPERTY = "saddlebook.verb";
+
     /** The word typed after {@code saddlebook}, lower case. */
     String name();
 

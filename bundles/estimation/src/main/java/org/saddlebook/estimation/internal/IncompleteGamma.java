@@ -1,0 +1,82 @@
+package org.saddlebook.estimation.internal;
+
+/** Regularised incomplete gamma function: series (DLMF 8.11.4) and continued fraction (DLMF 8.9.2), both tails. */
+public final class IncompleteGamma {
+    private static final double TINY = 1e-300;
+    private static final int LIMIT = 1_000_000;
+
+    private final double lower;
+    private final double upper;
+    private final double slope;
+
+    private IncompleteGamma(double lower, double upper, double slope) {
+        this.lower = lower;
+        this.upper = upper;
+        this.slope = slope;
+    }
+
+    /**
+     * Evaluates.
+     *
+     * @param a parameter, above zero
+     * @param x argument, at least zero
+     */
+    public static IncompleteGamma of(double a, double x) {
+        if (!(x > 0)) {
+            return new IncompleteGamma(0, 1, 0);
+        }
+        if (x == Double.POSITIVE_INFINITY) {
+            return new IncompleteGamma(1, 0, 0);
+        }
+        // x^a e^-x / Gamma(a + 1)
+        double density =
+                StrictMath.exp(-Deviance.stirlingError(a) - Deviance.deviance(a, x)) / Math.sqrt(2 * Math.PI * a);
+        if (x < a + 1) {
+            double term = 1;
+            double sum = 1;
+            for (int k = 1; k < LIMIT; k++) {
+                term *= x / (a + k);
+                sum += term;
+                if (term < sum * 1e-17) {
+                    break;
+                }
+            }
+            double value = density * sum;
+            return new IncompleteGamma(value, 1 - value, density * a);
+        }
+        double b = x + 1 - a;
+        double c = 1 / TINY;
+        double d = 1 / b;
+        double h = d;
+        for (int k = 1; k < LIMIT; k++) {
+            double an = -k * (k - a);
+            b += 2;
+            d = an * d + b;
+            d = 1 / (Math.abs(d) < TINY ? TINY : d);
+            c = b + an / c;
+            c = Math.abs(c) < TINY ? TINY : c;
+            double factor = d * c;
+            h *= factor;
+            if (Math.abs(factor - 1) < 2e-16) {
+                break;
+            }
+        }
+        double value = density * a * h;
+        return new IncompleteGamma(1 - value, value, density * a);
+    }
+
+    /** {@code P(a, x)}. */
+    public double lower() {
+        return lower;
+    }
+
+    /** {@code Q(a, x) = 1 - P(a, x)}. */
+    public double upper() {
+        return upper;
+    }
+
+    /** {@code dP / d ln x}. */
+    public double slope() {
+        return slope;
+    }
+}

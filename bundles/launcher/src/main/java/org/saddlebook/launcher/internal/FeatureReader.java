@@ -9,18 +9,15 @@ import java.util.List;
  * mandatory extensions) is refused rather than skipped: a feature must never be half there without a word.
  */
 final class FeatureReader {
-    private final String file;
     private final List<Coordinates> bundles = new ArrayList<>();
     private Coordinates id;
     private String name = "";
 
-    private FeatureReader(String file) {
-        this.file = file;
-    }
+    private FeatureReader() {}
 
     /** Reads one feature file; {@code file} is its name for messages. */
     static Feature read(String file, byte[] bytes) throws Refused {
-        FeatureReader reader = new FeatureReader(file);
+        FeatureReader reader = new FeatureReader();
         StrictJson.readObject(file, bytes, json -> json.members("a feature", key -> reader.member(json, key)));
         if (reader.id == null) {
             throw Refused.at(

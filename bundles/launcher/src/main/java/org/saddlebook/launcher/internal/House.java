@@ -2,8 +2,8 @@ package org.saddlebook.launcher.internal;
 
 import java.io.ByteArrayInputStream;
 import java.io.InputStream;
+import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.Hashtable;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -43,7 +43,7 @@ final class House {
     void open() {
         BundleContext context = framework.getBundleContext();
         List<Bundle> product = new ArrayList<>();
-        for (java.nio.file.Path jar : plan.product()) {
+        for (Path jar : plan.product()) {
             String location = "reference:" + jar.toUri();
             Bundle bundle = context.getBundle(location);
             try {
@@ -54,8 +54,7 @@ final class House {
         }
         List<Bundle> added = added(context, product);
         if (!added.isEmpty()) {
-            context.registerService(
-                    ResolverHookFactory.class, triggers -> new ProductFirst(product), new Hashtable<>());
+            context.registerService(ResolverHookFactory.class, triggers -> new ProductFirst(product), null);
         }
         FrameworkWiring wiring = framework.adapt(FrameworkWiring.class);
         wiring.resolveBundles(product);

@@ -2,10 +2,13 @@ package org.saddlebook.launcher.internal;
 
 import java.io.IOException;
 import java.io.PrintStream;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Clock;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Hashtable;
+import java.util.List;
 import java.util.Map;
 import java.util.function.Function;
 import java.util.function.Supplier;
@@ -46,6 +49,28 @@ final class Launch {
 
     /** Runs the console with these arguments and returns its exit code. */
     int run(String[] arguments, Long shuffle) throws IOException, Refused, BundleException {
+        return run(List.<String[]>of(arguments), shuffle);
+    }
+
+    /**
+     * Runs the commands of the file {@code lib/training} one after the other, so that a class archive made of this
+     * process holds what common commands need. What they print is nobody's concern.
+     */
+    int train() throws IOException, Refused, BundleException {
+        List<String[]> commands = new ArrayList<>();
+        for (String line : Files.readAllLines(home.resolve("lib").resolve("training"))) {
+            if (!line.isBlank()) {
+                String[] arguments = line.strip().split(" ", -1);
+                for (int i = 0; i < arguments.length; i++) {
+                    arguments[i] = arguments[i].replace("{home}", home.toString());
+                }
+                commands.add(arguments);
+            }
+        }
+        return run(commands, null);
+    }
+
+    private int run(List<String[]> commands, Long shuffle) throws IOException, Refused, BundleException {
         Plan plan = Plan.of(home, folders.userBundles(), policy, shuffle);
         try (CacheSlot slot = CacheSlot.take(folders.cache().resolve("framework"), plan.key())) {
             Framework framework;
@@ -58,10 +83,10 @@ final class Launch {
                 log.write("The framework's cache is damaged and is made anew", e);
                 slot.spoil();
                 try (CacheSlot once = CacheSlot.temporary(plan.key())) {
-                    return run(arguments, plan, started(plan, once), once);
+                    return run(commands, plan, started(plan, once), once);
                 }
             }
-            return run(arguments, plan, framework, slot);
+            return run(commands, plan, framework, slot);
         }
     }
 
@@ -75,7 +100,7 @@ final class Launch {
         return framework;
     }
 
-    private int run(String[] arguments, Plan plan, Framework framework, CacheSlot slot)
+    private int run(List<String[]> commands, Plan plan, Framework framework, CacheSlot slot)
             throws IOException, BundleException {
         try {
             House house = new House(framework, plan, log);
@@ -96,7 +121,11 @@ final class Launch {
                                 + " Details are in " + log.file());
                 return INTERNAL_FAULT;
             }
-            return console.applyAsInt(arguments);
+            int code = 0;
+            for (String[] command : commands) {
+                code = console.applyAsInt(command);
+            }
+            return code;
         } finally {
             framework.stop();
         }

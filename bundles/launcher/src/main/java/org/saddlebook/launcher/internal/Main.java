@@ -45,7 +45,8 @@ public final class Main {
         try {
             Policy policy = policy(folders, System.getenv());
             Long shuffle = Long.getLong("saddlebook.shuffle");
-            return new Launch(home(), folders, policy, log, err).run(arguments, shuffle);
+            Launch launch = new Launch(home(), folders, policy, log, err);
+            return Boolean.getBoolean("saddlebook.training") ? launch.train() : launch.run(arguments, shuffle);
         } catch (Refused e) {
             err.println("saddlebook: " + e.getMessage());
             return Launch.BAD_INPUT;

@@ -34,14 +34,19 @@ record Plan(
     /**
      * A bundle that the user added.
      *
-     * @param name its file name
+     * @param file its file
      * @param bytes its content: what was checked is what is installed
      */
     @SuppressWarnings("ArrayRecordComponent") // compared by nobody; the bytes can be large
-    record Added(String name, byte[] bytes) {
-        /** Under what location the framework knows it. */
+    record Added(Path file, byte[] bytes) {
+        /** Its file name. */
+        String name() {
+            return file.getFileName().toString();
+        }
+
+        /** Under what location the framework knows it: the file, so that its hash can be told later. */
         String location() {
-            return "added:" + name;
+            return file.toUri().toString();
         }
     }
 
@@ -141,7 +146,7 @@ record Plan(
             }
             String reason = policy.forbids(bytes);
             if (reason.isEmpty()) {
-                added.add(new Added(name, bytes));
+                added.add(new Added(file, bytes));
                 key.append(name).append(' ').append(Digests.sha256(bytes)).append('\n');
             } else {
                 troubles.put(name, "the added bundle " + name + " is not started: " + reason + ".");

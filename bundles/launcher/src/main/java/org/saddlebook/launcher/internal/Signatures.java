@@ -2,10 +2,10 @@ package org.saddlebook.launcher.internal;
 
 import java.io.IOException;
 import java.io.InputStream;
+import java.io.OutputStream;
 import java.security.CodeSigner;
 import java.security.cert.Certificate;
 import java.security.cert.CertificateEncodingException;
-import java.security.cert.CertificateException;
 import java.util.Locale;
 import java.util.Set;
 import java.util.TreeSet;
@@ -29,7 +29,7 @@ final class Signatures {
                 return Set.of(); // without a manifest as its first entry nothing in a jar stream is verified
             }
             for (JarEntry entry = jar.getNextJarEntry(); entry != null; entry = jar.getNextJarEntry()) {
-                jar.transferTo(java.io.OutputStream.nullOutputStream());
+                jar.transferTo(OutputStream.nullOutputStream());
                 if (entry.isDirectory() || belongsToSignature(entry.getName())) {
                     continue;
                 }
@@ -54,8 +54,6 @@ final class Signatures {
                     all.add(Digests.sha256(certificate.getEncoded()));
                 } catch (CertificateEncodingException e) {
                     throw new IOException("a certificate that cannot be encoded", e);
-                } catch (CertificateException e) {
-                    throw new IOException("a certificate that cannot be read", e);
                 }
             }
         }

@@ -131,6 +131,7 @@ final class Launch {
         }
     }
 
+    @SuppressWarnings("JdkObsolete") // the framework takes a Dictionary, and this is the only one
     private static Hashtable<String, Object> entry(String name) {
         Hashtable<String, Object> properties = new Hashtable<>();
         properties.put("saddlebook.entry", name);

@@ -46,6 +46,9 @@ public final class CautionText {
         t.put(
                 "parameters-do-not-transfer",
                 "Another catalyst, impurity, solvent or vessel is another reaction: the parameters do not transfer.");
+        t.put(
+                "new-run-as-stated",
+                "A new run is taken to be as uncertain as the table states for its runs on average.");
         // How much the data carry.
         t.put("undetermined", "The data do not determine this number; only the interval has a meaning.");
         t.put("few-temperatures", "Fewer than four temperatures: curvature and a wrong point can hardly be seen.");

@@ -1,0 +1,215 @@
+package org.saddlebook.barrier.internal;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import org.saddlebook.api.campaign.Campaign;
+import org.saddlebook.api.campaign.Choices;
+import org.saddlebook.api.campaign.RateTable;
+import org.saddlebook.api.findings.Node;
+import org.saddlebook.api.findings.Section;
+import org.saddlebook.api.model.RateContext;
+import org.saddlebook.api.model.RateModel;
+import org.saddlebook.api.model.StandardState;
+import org.saddlebook.api.task.Cancelled;
+import org.saddlebook.api.task.Contained;
+import org.saddlebook.api.task.Task;
+import org.saddlebook.presentation.api.CautionText;
+
+/** Computes the section {@code barrier} of one campaign. */
+final class BarrierEvaluation {
+    static final String SECTION = "barrier";
+    static final String TITLE = "Barrier";
+
+    private final Choices choices;
+    private final RateTable table;
+    private final Map<String, InstalledModel> installed;
+    private final Task task;
+
+    /**
+     * An evaluation.
+     *
+     * @param campaign effective campaign with a rate table
+     * @param installed model id to model
+     */
+    BarrierEvaluation(Campaign campaign, Map<String, InstalledModel> installed, Task task) {
+        this.choices = campaign.choices();
+        this.table = campaign.rateTable().orElseThrow();
+        this.installed = installed;
+        this.task = task;
+    }
+
+    /** A law with everything computed from its own code. */
+    private record Computed(LawOutcome outcome, Node.Group node, List<Node> predictions, List<String> notes) {}
+
+    Section section() throws Cancelled {
+        if (table.used().isEmpty()) {
+            return Section.refused(
+                    SECTION, TITLE, "Every point of the rate table is excluded; use at least one to fit a law.");
+        }
+        Measurements data = Measurements.of(table, choices.errorModel().orElseThrow());
+        RateContext context = context();
+        Plausibility plausibility = new Plausibility(context, choices, data);
+        double centre = data.centreKelvin();
+        LawNode nodes = new LawNode(plausibility, table.rateUnit(), centre, choices.level());
+        Predictions predictions =
+                new Predictions(table.rateUnit(), data.lowestKelvin(), data.highestKelvin(), choices.level());
+
+        List<Node> models = new ArrayList<>();
+        List<FittedLaw> fitted = new ArrayList<>();
+        List<Node> predicted = new ArrayList<>();
+        List<String> notes = new ArrayList<>();
+        for (String id : choices.models()) {
+            Computed computed = compute(id, context(id, context), data, plausibility, nodes, predictions);
+            models.add(computed.node());
+            predicted.addAll(computed.predictions());
+            notes.addAll(computed.notes());
+            if (computed.outcome() instanceof FittedLaw law) {
+                fitted.add(law);
+            }
+        }
+        if (choices.models().isEmpty()) {
+            notes.add("No rate model is installed. Install a feature such as model-eyring.");
+        }
+        Tree body = new Tree()
+                .put("errorModel", data.errorModel().key())
+                .put("response", data.response().text())
+                .put("level", choices.level())
+                .put("context", ContextNode.of(context, choices.standard().isEmpty()))
+                .put("table", table(data, centre))
+                .put("models", new Node.Items(models));
+        Contained<Comparison> comparison = task.contain(
+                "the comparison of laws", () -> new Comparison(fitted, choices.level(), choices.targetsKelvin()));
+        Set<String> candidates = Set.of();
+        if (comparison instanceof Contained.Answer<Comparison> answer) {
+            body.put("comparison", answer.value().node());
+            candidates = answer.value().candidates();
+        } else if (comparison instanceof Contained.Broke<Comparison> broke) {
+            notes.add(broke.reason());
+        }
+        body.put("predictions", new Node.Items(predicted));
+        body.put("notes", Tree.texts(notes));
+        if (!fitted.isEmpty()) {
+            FittedLaw shown = shown(fitted, candidates);
+            Contained<Node.Items> figures = task.contain(
+                    "drawing the laws",
+                    () -> new Figures(table, data, choices.level(), choices.targetsKelvin()).of(fitted, shown));
+            if (figures instanceof Contained.Answer<Node.Items> drawn) {
+                body.put("figures", drawn.value());
+            }
+        }
+        List<String> tableCautions = plausibility.table();
+        body.put("cautions", Tree.texts(tableCautions));
+        Node.Group group = body.group();
+        Set<String> ids = new LinkedHashSet<>(tableCautions);
+        Cautions.collect(group, ids);
+        return Section.done(SECTION, TITLE, group, texts(ids));
+    }
+
+    private Computed compute(
+            String id,
+            RateContext context,
+            Measurements data,
+            Plausibility plausibility,
+            LawNode nodes,
+            Predictions predictions)
+            throws Cancelled {
+        InstalledModel model = installed.get(id);
+        if (model == null) {
+            return without(new LawOutcome.NotFitted(
+                    id,
+                    id,
+                    LawOutcome.Kind.REFUSED,
+                    "The model " + id + " is not installed; install the bundle that provides it."));
+        }
+        Contained<Computed> answer = task.contain(model.culprit(id), () -> {
+            LawOutcome outcome = fit(model.model(), context, data);
+            if (!(outcome instanceof FittedLaw law)) {
+                return without((LawOutcome.NotFitted) outcome);
+            }
+            List<Node> rows = new ArrayList<>();
+            for (double kelvin : choices.targetsKelvin()) {
+                rows.add(predictions.row(kelvin, law));
+            }
+            List<String> notes = new ArrayList<>();
+            for (int i = 0; i < law.parameters().size(); i++) {
+                if (law.parameters().get(i).symbol().equals("dS")) {
+                    notes.add(plausibility.hint(law, law.parameter(i), choices.level()));
+                }
+            }
+            return new Computed(law, nodes.fitted(law), rows, notes);
+        });
+        if (answer instanceof Contained.Answer<Computed> given) {
+            Computed computed = given.value();
+            if (computed.outcome() instanceof LawOutcome.NotFitted missed && missed.kind() == LawOutcome.Kind.FAILED) {
+                return without(new LawOutcome.NotFitted(
+                        id, missed.title(), missed.kind(), model.culprit(id) + ": " + missed.reason()));
+            }
+            return computed;
+        }
+        return without(new LawOutcome.NotFitted(
+                id, id, LawOutcome.Kind.FAILED, ((Contained.Broke<Computed>) answer).reason()));
+    }
+
+    private LawOutcome fit(RateModel model, RateContext context, Measurements data) throws Cancelled {
+        try {
+            return LawFitter.fit(model, context, data, new CancelCheck(task));
+        } catch (CancelCheck.Stopped stopped) {
+            throw new Cancelled();
+        }
+    }
+
+    private static Computed without(LawOutcome.NotFitted law) {
+        return new Computed(law, LawNode.notFitted(law), List.of(), List.of());
+    }
+
+    private RateContext context() {
+        return RateContext.of(table.rateUnit(), table.order())
+                .withStandard(choices.standard().orElse(StandardState.ONE_MOLAR))
+                .withTransmission(choices.transmission())
+                .withReferenceKelvin(choices.referenceKelvin());
+    }
+
+    /** The context with the parameters that this model is asked to hold. */
+    private RateContext context(String id, RateContext context) {
+        RateContext own = context;
+        for (Map.Entry<String, Double> held : choices.fixed().entrySet()) {
+            if (held.getKey().startsWith(id + "/")) {
+                own = own.withFixed(held.getKey().substring(id.length() + 1), held.getValue());
+            }
+        }
+        return own;
+    }
+
+    private Node.Group table(Measurements data, double centre) {
+        return new Tree()
+                .put("used", data.size())
+                .put("excluded", table.points().size() - data.size())
+                .put("temperatures", data.distinctTemperatures())
+                .put("lowest", Node.Quantity.of(data.lowestKelvin(), "K"))
+                .put("highest", Node.Quantity.of(data.highestKelvin(), "K"))
+                .put("centre", Node.Quantity.of(centre, "K"))
+                .group();
+    }
+
+    /** The law that carries the bands: the first that remains in the comparison and has an uncertainty. */
+    private static FittedLaw shown(List<FittedLaw> fitted, Set<String> candidates) {
+        for (FittedLaw law : fitted) {
+            if (candidates.contains(law.id()) && law.scale().isPresent()) {
+                return law;
+            }
+        }
+        return fitted.get(0);
+    }
+
+    private static Map<String, String> texts(Set<String> ids) {
+        Map<String, String> texts = new LinkedHashMap<>();
+        for (String id : ids) {
+            texts.put(id, CautionText.of(id));
+        }
+        return texts;
+    }
+}

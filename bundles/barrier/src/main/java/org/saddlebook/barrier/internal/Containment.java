@@ -1,0 +1,69 @@
+package org.saddlebook.barrier.internal;
+
+import java.util.List;
+import java.util.OptionalDouble;
+import org.saddlebook.estimation.api.LinearLeastSquares;
+
+/**
+ * Finds out by trial whether one law is a special case of another: the larger law is fitted to the curve of the smaller
+ * one at the measured temperatures. When it reproduces it, the value its extra parameter takes there is the one at which
+ * the two coincide (0 for the Arrhenius law in the modified one, 1 for the Eyring law at a standard concentration).
+ */
+final class Containment {
+    /** Largest difference in ln k that counts as the same curve: far below any scatter, far above rounding. */
+    private static final double SAME_CURVE = 1e-7;
+
+    private Containment() {}
+
+    /** The value of the larger law's extra parameter at which it is the smaller law; empty when it never is. */
+    static OptionalDouble valueAt(FittedLaw smaller, FittedLaw larger) {
+        int extra = larger.extraParameter();
+        int p = larger.fit().parameterCount();
+        if (extra < 0
+                || p != smaller.fit().parameterCount() + 1
+                || !larger.law().linear()) {
+            return OptionalDouble.empty();
+        }
+        Measurements data = larger.data();
+        double[][] design = new double[data.size()][p];
+        double[] response = new double[data.size()];
+        double[] zero = new double[p];
+        double[] unused = new double[smaller.fit().parameterCount()];
+        for (int i = 0; i < response.length; i++) {
+            double offset = larger.law().lnRate(data.kelvin(i), zero.clone(), design[i]);
+            response[i] = smaller.law().lnRate(data.kelvin(i), smaller.fit().parameters(), unused) - offset;
+        }
+        return LinearLeastSquares.fit(design, response, null)
+                .fold(
+                        fit -> {
+                            for (double residual : fit.residuals()) {
+                                if (!(Math.abs(residual) < SAME_CURVE)) {
+                                    return OptionalDouble.empty();
+                                }
+                            }
+                            return OptionalDouble.of(fit.parameters()[extra]);
+                        },
+                        deficient -> OptionalDouble.empty());
+    }
+
+    /**
+     * The largest difference in ln k between the laws at the targets, over all values of the extra parameter inside its
+     * interval, the other parameters following it.
+     */
+    static double largestDifference(FittedLaw smaller, FittedLaw larger, double halfWidth, List<Double> targets) {
+        int extra = larger.extraParameter();
+        double[] axis = new double[larger.fit().parameterCount()];
+        axis[extra] = 1;
+        double own = larger.fit().predictionVariance(axis);
+        double largest = 0;
+        for (double kelvin : targets) {
+            double[] gradient = new double[axis.length];
+            double middle = larger.law().lnRate(kelvin, larger.fit().parameters(), gradient)
+                    - smaller.lnRate(kelvin).value();
+            // Along the ridge ln k is linear in the extra parameter, so its extremes lie at the ends.
+            double slope = larger.fit().predictionCovariance(gradient, axis) / own;
+            largest = Math.max(largest, Math.abs(middle) + Math.abs(slope * halfWidth));
+        }
+        return largest;
+    }
+}

@@ -1,0 +1,127 @@
+package org.saddlebook.barrier.internal;
+
+import java.util.List;
+import java.util.OptionalDouble;
+import org.saddlebook.api.model.Derived;
+import org.saddlebook.api.model.Parameter;
+import org.saddlebook.api.model.RateFunction;
+import org.saddlebook.estimation.api.Fit;
+import org.saddlebook.estimation.api.Normal;
+import org.saddlebook.estimation.api.StudentT;
+
+/**
+ * A law with its estimates.
+ *
+ * @param id id of the rate model
+ * @param title name of the law
+ * @param law the bound law
+ * @param fit estimates in the form handed to the law
+ * @param data what it was fitted to
+ */
+record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurements data) implements LawOutcome {
+    /**
+     * A number with its variance.
+     *
+     * @param value the number
+     * @param variance its variance; absent when the scale of the errors is unknown
+     */
+    record Estimate(double value, OptionalDouble variance) {}
+
+    /** The variance of an observation of weight one: 1 for stated errors, else estimated; absent without a degree of freedom. */
+    OptionalDouble scale() {
+        if (data.stated()) {
+            return OptionalDouble.of(1);
+        }
+        return fit.degreesOfFreedom() > 0 ? OptionalDouble.of(fit.residualVariance()) : OptionalDouble.empty();
+    }
+
+    /** Degrees of freedom of the scale; empty for stated errors, whose quantiles are normal. */
+    OptionalDouble degreesOfFreedom() {
+        return data.stated() ? OptionalDouble.empty() : OptionalDouble.of(fit.degreesOfFreedom());
+    }
+
+    /** The two-sided quantile of the level: normal for stated errors, else t. */
+    double quantile(double level) {
+        return quantile(level, degreesOfFreedom());
+    }
+
+    static double quantile(double level, OptionalDouble degreesOfFreedom) {
+        double probability = 0.5 + level / 2;
+        return degreesOfFreedom.isPresent()
+                ? StudentT.quantile(probability, degreesOfFreedom.getAsDouble())
+                : Normal.quantile(probability);
+    }
+
+    /** The word for the quantile in intervals. */
+    String method() {
+        return method(degreesOfFreedom());
+    }
+
+    static String method(OptionalDouble degreesOfFreedom) {
+        return degreesOfFreedom.isPresent() ? "t" : "normal";
+    }
+
+    List<Parameter> parameters() {
+        return law.parameters();
+    }
+
+    /** The estimate of parameter i, in the form handed to the law. */
+    Estimate parameter(int i) {
+        double[] row = new double[fit.parameterCount()];
+        row[i] = 1;
+        return new Estimate(fit.parameters()[i], scaled(fit.predictionVariance(row)));
+    }
+
+    /** ln k in SI at a temperature. */
+    Estimate lnRate(double kelvin) {
+        double[] gradient = new double[fit.parameterCount()];
+        double value = law.lnRate(kelvin, fit.parameters(), gradient);
+        return new Estimate(value, scaled(fit.predictionVariance(gradient)));
+    }
+
+    /** A derived quantity at a temperature, in SI or as a logarithm of it. */
+    Estimate derived(Derived derived, double kelvin) {
+        double[] gradient = new double[fit.parameterCount()];
+        double value = derived.function().value(kelvin, fit.parameters(), gradient);
+        return new Estimate(value, scaled(fit.predictionVariance(gradient)));
+    }
+
+    /** Standard deviation in ln k of one more run; absent when the scale of the errors is unknown. */
+    OptionalDouble newRunScatter() {
+        if (data.stated()) {
+            return OptionalDouble.of(data.typicalRelativeUncertainty());
+        }
+        OptionalDouble scale = scale();
+        return scale.isPresent() ? OptionalDouble.of(Math.sqrt(scale.getAsDouble())) : OptionalDouble.empty();
+    }
+
+    /** Covariance of the estimates; of size 0 when the scale of the errors is unknown. */
+    double[][] covariance() {
+        OptionalDouble scale = scale();
+        if (scale.isEmpty()) {
+            return new double[0][];
+        }
+        double[][] covariance = fit.unscaledCovariance();
+        for (double[] row : covariance) {
+            for (int j = 0; j < row.length; j++) {
+                row[j] *= scale.getAsDouble();
+            }
+        }
+        return covariance;
+    }
+
+    /** Index of the extra parameter that separates the law from a simpler one; -1 when there is none. */
+    int extraParameter() {
+        for (int i = 0; i < parameters().size(); i++) {
+            if (parameters().get(i).neutral().isPresent()) {
+                return i;
+            }
+        }
+        return -1;
+    }
+
+    private OptionalDouble scaled(double variance) {
+        OptionalDouble scale = scale();
+        return scale.isPresent() ? OptionalDouble.of(variance * scale.getAsDouble()) : OptionalDouble.empty();
+    }
+}

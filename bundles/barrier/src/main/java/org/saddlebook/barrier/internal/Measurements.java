@@ -1,0 +1,202 @@
+package org.saddlebook.barrier.internal;
+
+import java.util.List;
+import java.util.TreeSet;
+import org.saddlebook.api.campaign.ErrorModel;
+import org.saddlebook.api.campaign.RatePoint;
+import org.saddlebook.api.campaign.RateTable;
+
+/** The used points of a rate table with their weights, as flat arrays in order of the table. */
+final class Measurements {
+    /** What is fitted. */
+    enum Response {
+        /** ln k. */
+        LN_RATE("ln k"),
+        /** k itself: above this relative uncertainty the logarithm of a measured k is too skew for its weights. */
+        RATE("k");
+
+        private final String text;
+
+        Response(String text) {
+            this.text = text;
+        }
+
+        String text() {
+            return text;
+        }
+    }
+
+    /** Relative uncertainty above which k itself is fitted; see {@link Response#RATE}. */
+    private static final double LARGEST_RELATIVE_UNCERTAINTY = 0.2;
+
+    private final ErrorModel errorModel;
+    private final Response response;
+    private final double[] kelvin;
+    private final double[] lnRate;
+    private final double[] relative;
+    private final double[] weights;
+
+    private Measurements(ErrorModel errorModel, double[] kelvin, double[] lnRate, double[] relative) {
+        this.errorModel = errorModel;
+        this.kelvin = kelvin;
+        this.lnRate = lnRate;
+        this.relative = relative;
+        double largest = 0;
+        for (double u : relative) {
+            largest = Math.max(largest, u);
+        }
+        response = largest > LARGEST_RELATIVE_UNCERTAINTY ? Response.RATE : Response.LN_RATE;
+        weights = new double[relative.length];
+        for (int i = 0; i < weights.length; i++) {
+            // On k the weight is 1/u(k)^2; u(k) = relative * k, and the response is k in units of exp(lnRate[0]).
+            double u = response == Response.RATE ? relative[i] * StrictMath.exp(lnRate[i] - lnRate[0]) : relative[i];
+            weights[i] = 1 / (u * u);
+        }
+    }
+
+    /** The used points under an error model; the table has at least one, and stated errors where the model needs them. */
+    static Measurements of(RateTable table, ErrorModel errorModel) {
+        List<RatePoint> used = table.used();
+        int n = used.size();
+        double[] kelvin = new double[n];
+        double[] lnRate = new double[n];
+        double[] relative = new double[errorModel == ErrorModel.STATED ? n : 0];
+        for (int i = 0; i < n; i++) {
+            RatePoint point = used.get(i);
+            kelvin[i] = point.kelvin();
+            lnRate[i] = StrictMath.log(point.rate());
+            if (relative.length > 0) {
+                relative[i] = point.rateUncertainty().orElseThrow() / point.rate();
+            }
+        }
+        return new Measurements(errorModel, kelvin, lnRate, relative);
+    }
+
+    int size() {
+        return kelvin.length;
+    }
+
+    ErrorModel errorModel() {
+        return errorModel;
+    }
+
+    /** Whether the size of the errors is known, not estimated from the scatter. */
+    boolean stated() {
+        return errorModel == ErrorModel.STATED;
+    }
+
+    Response response() {
+        return response;
+    }
+
+    double kelvin(int i) {
+        return kelvin[i];
+    }
+
+    double[] kelvin() {
+        return kelvin.clone();
+    }
+
+    /** ln of the SI rate constants. */
+    double[] lnRate() {
+        return lnRate.clone();
+    }
+
+    double lnRate(int i) {
+        return lnRate[i];
+    }
+
+    /** Stated relative uncertainty of point i; 0 where none is stated. */
+    double relativeUncertainty(int i) {
+        return relative.length == 0 ? 0 : relative[i];
+    }
+
+    /** Weights of the response; null where all are 1. */
+    double[] weights() {
+        return weights.length == 0 ? null : weights.clone();
+    }
+
+    /** Weights on ln k, whatever the response; null where all are 1. */
+    double[] weightsOnLogarithm() {
+        if (relative.length == 0) {
+            return null;
+        }
+        double[] result = new double[relative.length];
+        for (int i = 0; i < result.length; i++) {
+            result[i] = weightOnLogarithm(i);
+        }
+        return result;
+    }
+
+    double lowestKelvin() {
+        double lowest = kelvin[0];
+        for (double t : kelvin) {
+            lowest = Math.min(lowest, t);
+        }
+        return lowest;
+    }
+
+    double highestKelvin() {
+        double highest = kelvin[0];
+        for (double t : kelvin) {
+            highest = Math.max(highest, t);
+        }
+        return highest;
+    }
+
+    int distinctTemperatures() {
+        TreeSet<Double> distinct = new TreeSet<>();
+        for (double t : kelvin) {
+            distinct.add(t);
+        }
+        return distinct.size();
+    }
+
+    /**
+     * The centre of the table, K: {@code 1/T0 = sum(w/T)/sum(w)} with the weights on ln k, where slope and intercept are
+     * uncorrelated.
+     */
+    double centreKelvin() {
+        double sum = 0;
+        double total = 0;
+        for (int i = 0; i < kelvin.length; i++) {
+            double weight = weightOnLogarithm(i);
+            sum += weight / kelvin[i];
+            total += weight;
+        }
+        return total / sum;
+    }
+
+    /** Share of the spread in 1/T that the heaviest single temperature contributes, 0 to 1; 0 without any spread. */
+    double heaviestShareOfSlope() {
+        double centre = 1 / centreKelvin();
+        double total = 0;
+        double heaviest = 0;
+        for (double distinct :
+                new TreeSet<>(java.util.Arrays.stream(kelvin).boxed().toList())) {
+            double own = 0;
+            for (int i = 0; i < kelvin.length; i++) {
+                if (kelvin[i] == distinct) {
+                    double distance = 1 / kelvin[i] - centre;
+                    own += weightOnLogarithm(i) * distance * distance;
+                }
+            }
+            total += own;
+            heaviest = Math.max(heaviest, own);
+        }
+        return total > 0 ? heaviest / total : 0;
+    }
+
+    /** Standard deviation in ln k of one more run as stated: the root mean square of the stated ones. */
+    double typicalRelativeUncertainty() {
+        double sum = 0;
+        for (double u : relative) {
+            sum += u * u;
+        }
+        return relative.length == 0 ? 0 : Math.sqrt(sum / relative.length);
+    }
+
+    private double weightOnLogarithm(int i) {
+        return relative.length == 0 ? 1 : 1 / (relative[i] * relative[i]);
+    }
+}

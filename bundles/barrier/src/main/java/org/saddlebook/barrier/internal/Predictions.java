@@ -1,0 +1,75 @@
+package org.saddlebook.barrier.internal;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.saddlebook.api.findings.Node;
+import org.saddlebook.api.model.Parameter;
+import org.saddlebook.api.quantity.Unit;
+
+/**
+ * Rows of {@code barrier.predictions}: k at a temperature with the interval of the mean and that of a new run. The
+ * interval is that of exp(mean ln k), from the full covariance.
+ *
+ * @param rateUnit unit k is given in
+ * @param lowestKelvin lowest measured temperature, K
+ * @param highestKelvin highest measured temperature, K
+ * @param level coverage probability
+ */
+record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, double level) {
+    /**
+     * One row.
+     *
+     * @param lnRate ln k in SI with its variance
+     * @param newRunScatter standard deviation in ln k of one more run
+     * @param degreesOfFreedom of the scale; empty for normal quantiles
+     * @param assumedScatter whether the scatter of a new run is taken over from the stated uncertainties
+     */
+    Node.Group row(
+            double kelvin,
+            String model,
+            FittedLaw.Estimate lnRate,
+            OptionalDouble newRunScatter,
+            OptionalDouble degreesOfFreedom,
+            boolean assumedScatter) {
+        double outside = Math.max(0, Math.max(lowestKelvin - kelvin, kelvin - highestKelvin));
+        List<String> cautions = new ArrayList<>();
+        if (lnRate.variance().isEmpty()) {
+            cautions.add("no-scale-estimate");
+        }
+        if (outside > 0) {
+            cautions.add("extrapolated");
+        }
+        cautions.add("same-mechanism");
+        cautions.add("not-a-hazard-assessment");
+        if (kelvin < lowestKelvin) {
+            cautions.add("storage-lower-bound");
+        }
+        Quantities quantities = Quantities.of(degreesOfFreedom, level);
+        Tree tree = new Tree()
+                .put("temperature", Node.Quantity.of(kelvin, "K"))
+                .put("model", model)
+                .put("k", quantities.of(lnRate, Parameter.Scale.LOG, rateUnit, cautions));
+        if (lnRate.variance().isPresent() && newRunScatter.isPresent()) {
+            double scatter = newRunScatter.getAsDouble();
+            FittedLaw.Estimate newRun = new FittedLaw.Estimate(
+                    lnRate.value(), OptionalDouble.of(lnRate.variance().getAsDouble() + scatter * scatter));
+            List<String> more = new ArrayList<>(cautions);
+            if (assumedScatter) {
+                more.add("new-run-as-stated");
+            }
+            tree.put("kNewRun", quantities.of(newRun, Parameter.Scale.LOG, rateUnit, more));
+        }
+        return tree.put("extrapolation", Node.Quantity.of(outside, "K")).group();
+    }
+
+    Node.Group row(double kelvin, FittedLaw law) {
+        return row(
+                kelvin,
+                law.id(),
+                law.lnRate(kelvin),
+                law.newRunScatter(),
+                law.degreesOfFreedom(),
+                law.data().stated());
+    }
+}

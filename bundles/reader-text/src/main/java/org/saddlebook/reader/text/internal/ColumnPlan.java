@@ -1,0 +1,369 @@
+package org.saddlebook.reader.text.internal;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import org.saddlebook.api.quantity.Dimension;
+import org.saddlebook.api.quantity.Unit;
+import org.saddlebook.reader.text.internal.Heading.Kind;
+import org.saddlebook.units.api.UnitException;
+import org.saddlebook.units.api.Units;
+
+/** Decides which column holds what, in which unit. */
+final class ColumnPlan {
+    private final Row header;
+    private final Row units;
+    private final Rule rule;
+    private final Problems problems;
+    private final List<Heading> headings = new ArrayList<>();
+    private final List<Column> columns = new ArrayList<>();
+    private final List<String> unused = new ArrayList<>();
+
+    /**
+     * A plan.
+     *
+     * @param units row of units below the header, or null
+     */
+    ColumnPlan(Row header, Row units, Rule rule, Problems problems) {
+        this.header = header;
+        this.units = units;
+        this.rule = rule;
+        this.problems = problems;
+        for (String heading : header.cells()) {
+            headings.add(HeadingParser.parse(heading));
+        }
+        refuseDuplicates();
+        // Wanted columns first, so that a 1/T beside T is known to be spare.
+        add(Kind.TEMPERATURE);
+        add(Kind.RATE);
+        add(Kind.TEMPERATURE_UNCERTAINTY);
+        addRateUncertainty();
+        add(Kind.LABEL);
+        add(Kind.EXCLUDED);
+        refuseTransformed();
+        requireBoth();
+        for (int i = 0; i < headings.size(); i++) {
+            if (!isUsed(i) && !header.cells().get(i).isEmpty()) {
+                unused.add(header.cells().get(i));
+            }
+        }
+    }
+
+    /** The column of a kind, or null. */
+    Column column(Kind kind) {
+        for (Column column : columns) {
+            if (column.kind() == kind) {
+                return column;
+            }
+        }
+        return null;
+    }
+
+    /** The columns in use. */
+    List<Column> columns() {
+        return columns;
+    }
+
+    /** Headings of columns that are not used. */
+    List<String> unused() {
+        return unused;
+    }
+
+    /** The column is empty in every row and is left out. */
+    void drop(Column column) {
+        columns.remove(column);
+        unused.add(column.heading());
+    }
+
+    /** Whether the header leaves the unit of T or k open, so that a row of units may follow. */
+    static boolean lacksUnits(Row header) {
+        for (String text : header.cells()) {
+            Heading heading = HeadingParser.parse(text);
+            boolean wanted = heading.kind() == Kind.TEMPERATURE || heading.kind() == Kind.RATE;
+            if (wanted && heading.unit() == null) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private void refuseDuplicates() {
+        List<String> cells = header.cells();
+        for (int i = 1; i < cells.size(); i++) {
+            for (int j = 0; j < i; j++) {
+                if (!cells.get(i).isEmpty()
+                        && cells.get(i)
+                                .toLowerCase(Locale.ROOT)
+                                .equals(cells.get(j).toLowerCase(Locale.ROOT))) {
+                    problems.add(
+                            "duplicate-column",
+                            problems.place(header.line(), cells.get(i)),
+                            "the column name \"" + cells.get(i) + "\" twice",
+                            "each column name once",
+                            "rename or remove one of the two columns");
+                    // Only the first is looked at further, so that the same fault is not reported twice.
+                    headings.set(i, Heading.OTHER);
+                    break;
+                }
+            }
+        }
+    }
+
+    private void add(Kind kind) {
+        List<Integer> candidates = candidates(kind);
+        if (candidates.size() > 1) {
+            String code = switch (kind) {
+                case TEMPERATURE -> "two-temperature-columns";
+                case RATE -> "two-rate-columns";
+                default -> "two-columns";
+            };
+            StringBuilder found = new StringBuilder();
+            for (int index : candidates) {
+                found.append(found.length() == 0 ? "" : " and ")
+                        .append(quoted(header.cells().get(index)));
+            }
+            problems.add(
+                    code,
+                    problems.place(header.line(), header.cells().get(candidates.get(1))),
+                    found.toString(),
+                    "one column for the " + kind.words(),
+                    "remove or rename the columns that are not to be used");
+        }
+        if (!candidates.isEmpty()) {
+            int index = candidates.get(0);
+            columns.add(Column.of(
+                    index, header.cells().get(index), kind, candidates.size() > 1 ? null : unit(index, kind)));
+        }
+    }
+
+    /** Columns of a kind; those whose unit is only perhaps a unit count when they can be read, or when no other is there. */
+    private List<Integer> candidates(Kind kind) {
+        List<Integer> certain = new ArrayList<>();
+        List<Integer> perhaps = new ArrayList<>();
+        for (int i = 0; i < headings.size(); i++) {
+            Heading heading = headings.get(i);
+            if (heading.kind() == kind) {
+                (heading.certain() || isReadable(heading) ? certain : perhaps).add(i);
+            }
+        }
+        return certain.isEmpty() && !isText(kind) ? perhaps : certain;
+    }
+
+    private void addRateUncertainty() {
+        boolean both = !candidates(Kind.RATE_UNCERTAINTY).isEmpty()
+                && !candidates(Kind.RELATIVE_RATE_UNCERTAINTY).isEmpty();
+        add(Kind.RATE_UNCERTAINTY);
+        if (both) {
+            int index = candidates(Kind.RELATIVE_RATE_UNCERTAINTY).get(0);
+            problems.add(
+                    "two-columns",
+                    problems.place(header.line(), header.cells().get(index)),
+                    quoted(column(Kind.RATE_UNCERTAINTY).heading()) + " and "
+                            + quoted(header.cells().get(index)),
+                    "one column for the standard uncertainty of the rate constant",
+                    "keep the absolute or the relative uncertainty and remove the other");
+        } else {
+            add(Kind.RELATIVE_RATE_UNCERTAINTY);
+        }
+    }
+
+    private Unit unit(int index, Kind kind) {
+        if (isText(kind)) {
+            return null;
+        }
+        Heading heading = headings.get(index);
+        String below = units == null || index >= units.cells().size()
+                ? ""
+                : unwrapped(units.cells().get(index));
+        String text = heading.unit();
+        int line = header.line();
+        if (text != null && !below.isEmpty() && !text.equals(below)) {
+            problems.add(
+                    "two-units",
+                    problems.place(units.line(), heading(index)),
+                    quoted(below) + " below " + quoted(heading(index)),
+                    "one unit for the column",
+                    "state the unit in the header or in the row of units, not in both");
+            return null;
+        }
+        if (text == null && !below.isEmpty()) {
+            text = below;
+            line = units.line();
+        }
+        boolean fromRule = text == null && rule.unit(kind) != null;
+        if (fromRule) {
+            text = rule.unit(kind);
+        }
+        if (text == null && kind == Kind.RELATIVE_RATE_UNCERTAINTY) {
+            // u(k)/k is a pure number by its name.
+            return Unit.ONE;
+        }
+        if (text == null || text.isEmpty()) {
+            refuseMissingUnit(index, kind);
+            return null;
+        }
+        try {
+            return parse(text, kind);
+        } catch (UnitException e) {
+            problems.add(e, fromRule ? Rule.place("unit." + kind.key()) : problems.place(line, heading(index)));
+            return null;
+        }
+    }
+
+    private Unit parse(String text, Kind kind) throws UnitException {
+        switch (kind) {
+            case TEMPERATURE, TEMPERATURE_UNCERTAINTY -> {
+                return Units.temperature(text);
+            }
+            case RELATIVE_RATE_UNCERTAINTY -> {
+                return Units.parse(text, Dimension.NONE, "1 or %");
+            }
+            case RATE_UNCERTAINTY -> {
+                return rateUncertainty(text);
+            }
+            default -> {
+                return Units.rateConstant(text);
+            }
+        }
+    }
+
+    /** A percentage, or a unit of the dimension of k. */
+    private Unit rateUncertainty(String text) throws UnitException {
+        Unit unit = Units.parse(text);
+        Column rate = column(Kind.RATE);
+        if (unit.code().equals("%") || rate == null || rate.unit() == null) {
+            return unit;
+        }
+        if (unit.dimension().equals(Dimension.NONE)) {
+            throw new UnitException(
+                    "wrong-dimension",
+                    quoted(text) + " for u(k)",
+                    "the unit of the rate constant, or %",
+                    "name the column u(k)/k when it holds u(k) divided by k");
+        }
+        return Units.parse(text, rate.unit().dimension(), rate.unit().code() + " or in %");
+    }
+
+    private void refuseMissingUnit(int index, Kind kind) {
+        String example = switch (kind) {
+            case TEMPERATURE -> "\"T (K)\" or \"T (degC)\"";
+            case TEMPERATURE_UNCERTAINTY -> "\"u(T) (K)\"";
+            case RATE -> "\"k (1/s)\" or \"k (L mol-1 s-1)\"";
+            default -> "\"u(k) (%)\" or \"u(k) (1/s)\"";
+        };
+        problems.add(
+                "missing-unit",
+                problems.place(header.line(), heading(index)),
+                quoted(heading(index)) + ", the " + kind.words() + " without a unit",
+                "the unit in the header",
+                "write the unit after the name, for example " + example);
+    }
+
+    private void refuseTransformed() {
+        for (int i = 0; i < headings.size(); i++) {
+            Kind kind = headings.get(i).kind();
+            if (kind == Kind.RECIPROCAL_TEMPERATURE && column(Kind.TEMPERATURE) == null) {
+                refuse(
+                        i,
+                        "transformed-column",
+                        "the temperature itself",
+                        "replace 1/T by T with its unit, for example" + " \"T (K)\"");
+            } else if (kind == Kind.LOGARITHM_OF_RATE && column(Kind.RATE) == null) {
+                refuse(
+                        i,
+                        "transformed-column",
+                        "the rate constant itself",
+                        "replace the logarithm by k with its unit,"
+                                + " for example \"k (1/s)\"; an uncertainty u(ln k) becomes u(k)/k");
+            } else if (kind == Kind.SCALED_RATE && column(Kind.RATE) == null) {
+                refuse(
+                        i,
+                        "scaled-column",
+                        "the rate constant itself",
+                        "write the power of ten into the values or into" + " the unit, for example \"k / 10^-5 s^-1\"");
+            } else if (kind == Kind.UNCLEAR_UNCERTAINTY
+                    && column(Kind.RATE_UNCERTAINTY) == null
+                    && column(Kind.RELATIVE_RATE_UNCERTAINTY) == null
+                    && column(Kind.TEMPERATURE_UNCERTAINTY) == null) {
+                refuse(
+                        i,
+                        "unclear-uncertainty",
+                        "a standard uncertainty named u(k), u(k)/k or u(T)",
+                        "rename the"
+                                + " column when it holds standard uncertainties, divide expanded ones by their coverage factor,"
+                                + " or remove the column");
+            }
+        }
+    }
+
+    private void refuse(int index, String code, String expected, String remedy) {
+        problems.add(code, problems.place(header.line(), heading(index)), quoted(heading(index)), expected, remedy);
+    }
+
+    private void requireBoth() {
+        require(Kind.TEMPERATURE, Kind.RECIPROCAL_TEMPERATURE, null, "missing-temperature-column", "\"T (K)\"");
+        require(Kind.RATE, Kind.LOGARITHM_OF_RATE, Kind.SCALED_RATE, "missing-rate-column", "\"k (1/s)\"");
+    }
+
+    /** Requires a column, unless one that stands in its place has been refused already. */
+    private void require(Kind kind, Kind refused, Kind refusedToo, String code, String example) {
+        if (column(kind) != null) {
+            return;
+        }
+        for (Heading heading : headings) {
+            if (heading.kind() == refused || heading.kind() == refusedToo) {
+                return;
+            }
+        }
+        StringBuilder found = new StringBuilder("the columns ");
+        for (int i = 0; i < header.cells().size(); i++) {
+            found.append(i == 0 ? "" : ", ").append(quoted(header.cells().get(i)));
+        }
+        problems.add(
+                code,
+                problems.place(header.line()),
+                found.toString(),
+                "a column for the " + kind.words(),
+                "name the column with its unit, for example " + example);
+    }
+
+    private boolean isUsed(int index) {
+        for (Column column : columns) {
+            if (column.index() == index) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private boolean isReadable(Heading heading) {
+        if (isText(heading.kind())) {
+            return false;
+        }
+        try {
+            parse(heading.unit(), heading.kind());
+            return true;
+        } catch (UnitException e) {
+            return false;
+        }
+    }
+
+    private static boolean isText(Kind kind) {
+        return kind == Kind.LABEL || kind == Kind.EXCLUDED;
+    }
+
+    private String heading(int index) {
+        return header.cells().get(index);
+    }
+
+    private static String unwrapped(String cell) {
+        boolean wrapped = (cell.startsWith("(") && cell.endsWith(")")) || (cell.startsWith("[") && cell.endsWith("]"));
+        return wrapped && cell.indexOf(cell.charAt(0), 1) < 0
+                ? cell.substring(1, cell.length() - 1).strip()
+                : cell;
+    }
+
+    static String quoted(String text) {
+        return "\"" + text + "\"";
+    }
+}

@@ -1,0 +1,200 @@
+package org.saddlebook.reader.text.internal;
+
+import java.util.Locale;
+import org.saddlebook.reader.text.internal.Heading.Kind;
+
+/**
+ * Reads headings: a name, then a unit as {@code (unit)}, {@code [unit]}, {@code / unit}, {@code _unit}, {@code , unit},
+ * {@code in unit} or {@code  unit}. Upper and lower case are alike in names, except {@code U(...)}, which is an expanded
+ * uncertainty (JCGM 100:2008, 6.2.1), and in units they differ.
+ */
+final class HeadingParser {
+    /** A name and its kind; longer names stand before those they begin with. */
+    private record Name(String text, Kind kind) {}
+
+    private static final Name[] NAMES = {
+        new Name("u_rel(k)", Kind.RELATIVE_RATE_UNCERTAINTY),
+        new Name("urel(k)", Kind.RELATIVE_RATE_UNCERTAINTY),
+        new Name("u_r(k)", Kind.RELATIVE_RATE_UNCERTAINTY),
+        new Name("ur(k)", Kind.RELATIVE_RATE_UNCERTAINTY),
+        new Name("u(k)/k", Kind.RELATIVE_RATE_UNCERTAINTY),
+        new Name("u(k) / k", Kind.RELATIVE_RATE_UNCERTAINTY),
+        new Name("u(kobs)", Kind.RATE_UNCERTAINTY),
+        new Name("u(k_obs)", Kind.RATE_UNCERTAINTY),
+        new Name("u(k1)", Kind.RATE_UNCERTAINTY),
+        new Name("u(k2)", Kind.RATE_UNCERTAINTY),
+        new Name("u(k)", Kind.RATE_UNCERTAINTY),
+        new Name("u_k", Kind.RATE_UNCERTAINTY),
+        new Name("u(t)", Kind.TEMPERATURE_UNCERTAINTY),
+        new Name("u_t", Kind.TEMPERATURE_UNCERTAINTY),
+        new Name("temperature", Kind.TEMPERATURE),
+        new Name("temp.", Kind.TEMPERATURE),
+        new Name("temp", Kind.TEMPERATURE),
+        new Name("t", Kind.TEMPERATURE),
+        new Name("rate constant", Kind.RATE),
+        new Name("rate_constant", Kind.RATE),
+        new Name("rate coefficient", Kind.RATE),
+        new Name("rate_coefficient", Kind.RATE),
+        new Name("k(obs)", Kind.RATE),
+        new Name("k_obs", Kind.RATE),
+        new Name("k obs", Kind.RATE),
+        new Name("kobs", Kind.RATE),
+        new Name("k(t)", Kind.RATE),
+        new Name("k1", Kind.RATE),
+        new Name("k2", Kind.RATE),
+        new Name("k", Kind.RATE),
+        new Name("label", Kind.LABEL),
+        new Name("run", Kind.LABEL),
+        new Name("excluded", Kind.EXCLUDED),
+    };
+
+    private static final String[] LOGARITHMS = {"ln", "log10", "log_10", "log", "lg"};
+    private static final String[] RECIPROCALS = {
+        "1/t", "1000/t", "10^3/t", "10³/t", "1e3/t", "reciprocaltemp", "inversetemp", "t^-1", "t⁻¹"
+    };
+    private static final String[] UNCLEAR = {
+        "u(",
+        "u_",
+        "sd",
+        "se",
+        "s(",
+        "std",
+        "stderr",
+        "stdev",
+        "stddev",
+        "sigma",
+        "σ",
+        "err",
+        "error",
+        "±",
+        "+/-",
+        "+-",
+        "uncertainty",
+        "delta",
+        "δ",
+        "ci",
+        "ci95",
+        "95%",
+        "confidence",
+        "standard",
+        "uk",
+        "ut"
+    };
+
+    private HeadingParser() {}
+
+    static Heading parse(String heading) {
+        String text = TextDocument.collapse(heading).replace('µ', 'μ');
+        String lower = text.toLowerCase(Locale.ROOT);
+        Heading transformed = transformed(text, lower.replace(" ", ""));
+        if (transformed != null) {
+            return transformed;
+        }
+        for (Name name : NAMES) {
+            if (lower.startsWith(name.text()) && isMeant(text, name)) {
+                Heading read = rest(text.substring(name.text().length()), name.kind());
+                if (read != null) {
+                    return read;
+                }
+            }
+        }
+        for (String unclear : UNCLEAR) {
+            if (lower.startsWith(unclear) && endsThere(lower, unclear)) {
+                return new Heading(Kind.UNCLEAR_UNCERTAINTY, null, true);
+            }
+        }
+        return Heading.OTHER;
+    }
+
+    /** A capital U is an expanded uncertainty; u(k)/K is a unit, not a ratio. */
+    private static boolean isMeant(String text, Name name) {
+        return !name.text().startsWith("u")
+                || (text.charAt(0) == 'u'
+                        && (!name.text().endsWith("k")
+                                || text.charAt(name.text().length() - 1) == 'k'));
+    }
+
+    private static Heading transformed(String text, String dense) {
+        for (String reciprocal : RECIPROCALS) {
+            if (dense.startsWith(reciprocal) && !(dense + " ").startsWith(reciprocal + "ime")) {
+                return new Heading(Kind.RECIPROCAL_TEMPERATURE, null, true);
+            }
+        }
+        for (String logarithm : LOGARITHMS) {
+            if (dense.startsWith(logarithm)) {
+                String argument = dense.substring(logarithm.length());
+                if (argument.startsWith("k") || argument.startsWith("(k") || argument.startsWith("_k")) {
+                    return new Heading(Kind.LOGARITHM_OF_RATE, null, true);
+                }
+            }
+        }
+        boolean power = dense.startsWith("10^") || dense.startsWith("10*") || dense.startsWith("1e");
+        boolean superscript =
+                dense.startsWith("10") && text.length() > 2 && "⁻⁰¹²³⁴⁵⁶⁷⁸⁹".indexOf(dense.charAt(2)) >= 0;
+        if (power || superscript) {
+            int end = 2;
+            while (end < dense.length() && "^*+-−0123456789⁻⁰¹²³⁴⁵⁶⁷⁸⁹·×x".indexOf(dense.charAt(end)) >= 0) {
+                end++;
+            }
+            if (dense.startsWith("k", end)) {
+                return new Heading(Kind.SCALED_RATE, null, true);
+            }
+        }
+        return null;
+    }
+
+    /** What follows the name; null when the name was only the beginning of another word. */
+    private static Heading rest(String rest, Kind kind) {
+        String text = rest.strip();
+        if (text.isEmpty()) {
+            return new Heading(kind, null, true);
+        }
+        char first = text.charAt(0);
+        if (first == '(' || first == '[') {
+            return closesAtEnd(text)
+                    ? new Heading(kind, text.substring(1, text.length() - 1).strip(), true)
+                    : null;
+        }
+        if (first == '/') {
+            return new Heading(kind, text.substring(1).strip(), true);
+        }
+        if (kind == Kind.RATE && "×x·*".indexOf(first) >= 0 && text.contains("10")) {
+            return new Heading(Kind.SCALED_RATE, null, true);
+        }
+        if (first == '_') {
+            return new Heading(kind, text.substring(1).replace('_', ' ').strip(), false);
+        }
+        if (first == ',') {
+            return new Heading(kind, text.substring(1).strip(), false);
+        }
+        if (text.startsWith("in ")) {
+            return new Heading(kind, text.substring(3).strip(), false);
+        }
+        return rest.charAt(0) == ' ' ? new Heading(kind, text, false) : null;
+    }
+
+    /** Whether the bracket at the start is closed by the last character. */
+    private static boolean closesAtEnd(String text) {
+        char open = text.charAt(0);
+        char close = open == '(' ? ')' : ']';
+        int depth = 0;
+        for (int i = 0; i < text.length(); i++) {
+            if (text.charAt(i) == open) {
+                depth++;
+            } else if (text.charAt(i) == close) {
+                depth--;
+                if (depth == 0) {
+                    return i == text.length() - 1;
+                }
+            }
+        }
+        return false;
+    }
+
+    private static boolean endsThere(String lower, String word) {
+        char last = word.charAt(word.length() - 1);
+        return !Character.isLetterOrDigit(last)
+                || lower.length() == word.length()
+                || !Character.isLetterOrDigit(lower.charAt(word.length()));
+    }
+}

@@ -94,6 +94,50 @@ final class Factor {
         return result;
     }
 
+    /**
+     * Solves {@code (C - S) d = C b} with {@code C = X'WX}, as {@code (I - R^-T S R^-1) w = R b}, d = R^-1 w: the matrix on
+     * the left is near the identity however ill-conditioned X is. Null when it is not positive definite.
+     */
+    double[] curvedStep(double[][] second, double[] plain) {
+        int p = size;
+        double[][] half = new double[p][];
+        for (int j = 0; j < p; j++) {
+            half[j] = solveTransposed(second[j], null);
+        }
+        // half[j][k] = (R^-T P' S S_j)_k for column j of S; a second solve along the other index completes the product.
+        double[][] matrix = new double[p][p];
+        double[] row = new double[p];
+        for (int k = 0; k < p; k++) {
+            for (int j = 0; j < p; j++) {
+                row[j] = half[j][k];
+            }
+            double[] column = solveTransposed(row, null);
+            for (int l = 0; l < p; l++) {
+                matrix[k][l] = (k == l ? 1 : 0) - column[l];
+            }
+        }
+        double[] right = new double[p];
+        for (int k = 0; k < p; k++) {
+            for (int l = k; l < p; l++) {
+                right[k] += high[l * p + k] * plain[order[l]] / scale[order[l]];
+            }
+        }
+        if (!Cholesky.solve(matrix, right)) {
+            return null;
+        }
+        double[] result = new double[p];
+        double[] z = new double[p];
+        for (int k = p - 1; k >= 0; k--) {
+            double sum = right[k];
+            for (int l = k + 1; l < p; l++) {
+                sum -= high[l * p + k] * z[l];
+            }
+            z[k] = sum / high[k * p + k];
+            result[order[k]] = z[k] * scale[order[k]];
+        }
+        return result;
+    }
+
     /** An upper bound of the condition number, at most p times too large: product of Frobenius norms. */
     double conditionBound() {
         int p = size;

@@ -161,6 +161,17 @@ public final class LinearSolution {
         return factor.product(factor.solveTransposed(row, null), factor.solveTransposed(other, null));
     }
 
+    /**
+     * Solves {@code (X'WX - S) d = X'WX b}: with b this solution, a Newton step where this one is a Gauss-Newton step.
+     *
+     * @param second S, symmetric
+     * @param plain b
+     * @return d, or null when the curved problem is not positive definite or has no solution in numbers
+     */
+    double[] curvedStep(double[][] second, double[] plain) {
+        return factor.curvedStep(second, plain);
+    }
+
     private void requireRow(double[] row) {
         if (row.length != design.columns()) {
             throw new IllegalArgumentException(

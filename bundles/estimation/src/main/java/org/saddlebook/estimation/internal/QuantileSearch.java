@@ -7,6 +7,7 @@ package org.saddlebook.estimation.internal;
 final class QuantileSearch {
     private static final int LIMIT = 200;
     private static final double LARGEST_STEP = 30;
+    private static final double HALF = 0.5;
 
     private QuantileSearch() {}
 
@@ -32,17 +33,22 @@ final class QuantileSearch {
     static double solve(Tail tail, boolean rising, double probability, double start) {
         double[] at = new double[2];
         double x = start;
+        double known = start;
         for (int i = 0; i < LIMIT; i++) {
             tail.at(x, at);
-            double step;
-            if (at[0] > 0 && at[1] > 0) {
-                step = StrictMath.log(at[0] / probability) * at[0] / at[1];
-                step = rising ? -step : step;
-            } else {
-                // Underflow: the argument lies far out in the tail.
-                step = rising ? LARGEST_STEP : -1;
+            if (!(at[0] > 0 && at[1] > 0)) {
+                // Underflow: the step went too far out; back half-way to where there was a value.
+                if (x == known) {
+                    x *= rising ? 2 : HALF;
+                    known = x;
+                } else {
+                    x = Math.sqrt(x) * Math.sqrt(known);
+                }
+                continue;
             }
-            step = Math.max(-LARGEST_STEP, Math.min(LARGEST_STEP, step));
+            double step = StrictMath.log(at[0] / probability) * at[0] / at[1];
+            step = Math.max(-LARGEST_STEP, Math.min(LARGEST_STEP, rising ? -step : step));
+            known = x;
             x = Math.max(Double.MIN_NORMAL, Math.min(Double.MAX_VALUE, x * StrictMath.exp(step)));
             if (Math.abs(step) < 1e-9) {
                 // The error of the next step would be the square of this one.

@@ -107,6 +107,7 @@ record Plan(
         StringBuilder key = new StringBuilder(4096);
         key.append(home).append('\n').append(shuffle).append('\n');
         List<Path> jars = new ArrayList<>();
+        Map<String, List<String>> missing = new LinkedHashMap<>();
         for (Coordinates bundle : byArtifact.values()) {
             Path jar = home.resolve("bundles").resolve(bundle.fileName());
             try {
@@ -116,13 +117,14 @@ record Plan(
                 key.append(attributes.lastModifiedTime().toMillis()).append('\n');
                 jars.add(jar);
             } catch (NoSuchFileException e) {
-                String feature = namedIn.get(bundle.artifact());
-                troubles.put(
-                        bundle.artifact(),
-                        feature + " names " + bundle + ", but the file bundles/" + bundle.fileName()
-                                + " is not there. Put it back or delete " + feature + ".");
+                missing.computeIfAbsent(namedIn.get(bundle.artifact()), feature -> new ArrayList<>())
+                        .add("bundles/" + bundle.fileName());
             }
         }
+        missing.forEach((feature, files) -> troubles.put(
+                feature,
+                feature + " names what is not there: " + String.join(", ", files) + ". Put the files back or delete "
+                        + feature + "."));
         List<Added> added = added(userBundles, policy, troubles, key);
         if (shuffle != null) {
             Collections.shuffle(jars, new Random(shuffle));

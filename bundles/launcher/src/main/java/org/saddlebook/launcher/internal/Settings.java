@@ -14,6 +14,7 @@ final class Settings {
             + "com.fasterxml.jackson.core.filter;"
             + "com.fasterxml.jackson.core.format;"
             + "com.fasterxml.jackson.core.io;"
+            + "com.fasterxml.jackson.core.io.schubfach;"
             + "com.fasterxml.jackson.core.json;"
             + "com.fasterxml.jackson.core.json.async;"
             + "com.fasterxml.jackson.core.sym;"

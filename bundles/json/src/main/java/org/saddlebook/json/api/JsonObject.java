@@ -65,6 +65,14 @@ public record JsonObject(Map<String, JsonValue> members) implements JsonValue {
             return put(key, new JsonNumber(number));
         }
 
+        /** Adds a whole number between -(2^53 - 1) and 2^53 - 1; others are not numbers in every JSON reader. */
+        public Builder put(String key, long number) {
+            if (Math.abs(number) >= 1L << 53 || number == Long.MIN_VALUE) {
+                throw new IllegalArgumentException("beyond 2^53 - 1: " + number);
+            }
+            return put(key, (double) number);
+        }
+
         /** Adds a boolean. */
         public Builder put(String key, boolean value) {
             return put(key, new JsonBoolean(value));

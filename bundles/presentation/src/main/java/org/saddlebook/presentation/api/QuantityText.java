@@ -28,8 +28,8 @@ public final class QuantityText {
             Optional<String> interval = interval(quantity);
             return interval.isEmpty() ? "not determined" : "not determined (" + interval.get() + ")";
         }
-        Shown shown = Shown.of(quantity.unit());
-        return UnitText.after(number(quantity, shown), shown.unit());
+        DisplayUnit shown = DisplayUnit.of(quantity.unit());
+        return UnitText.after(number(quantity, shown), shown.ucum());
     }
 
     /** {@link #of} followed by the interval where there is one: {@code 84.0 ± 1.4 kJ/mol (95 %: 79.5 to 88.5 kJ/mol)}. */
@@ -86,14 +86,14 @@ public final class QuantityText {
      * @param ucum unit of the limits
      */
     public static String set(Interval interval, String ucum) {
-        Shown shown = Shown.of(ucum);
+        DisplayUnit shown = DisplayUnit.of(ucum);
         OptionalDouble low = interval.lower();
         OptionalDouble high = interval.upper();
         return switch (interval.kind()) {
             case BETWEEN ->
                 UnitText.after(
                         Rounding.interval(shown.value(low.getAsDouble()), shown.value(high.getAsDouble())),
-                        shown.unit());
+                        shown.ucum());
             case AT_LEAST -> "at least " + limit(low.getAsDouble(), shown);
             case AT_MOST -> "at most " + limit(high.getAsDouble(), shown);
             case OUTSIDE ->
@@ -108,11 +108,11 @@ public final class QuantityText {
         return quantity.value().isEmpty() || quantity.cautions().contains(UNDETERMINED);
     }
 
-    private static String limit(double value, Shown shown) {
-        return UnitText.after(Rounding.limit(shown.value(value)), shown.unit());
+    private static String limit(double value, DisplayUnit shown) {
+        return UnitText.after(Rounding.limit(shown.value(value)), shown.ucum());
     }
 
-    private static String number(Node.Quantity quantity, Shown shown) {
+    private static String number(Node.Quantity quantity, DisplayUnit shown) {
         double value = quantity.value().getAsDouble();
         if (!Double.isFinite(value)) {
             return value < 0 ? "−∞" : "∞";
@@ -132,24 +132,5 @@ public final class QuantityText {
                     : Rounding.significant(scaled, 2);
         }
         return Rounding.significant(scaled, 6);
-    }
-
-    /**
-     * The unit a quantity is shown in.
-     *
-     * @param unit UCUM term shown
-     * @param powerOfTen value shown = value times 10 to this power
-     */
-    record Shown(String unit, int powerOfTen) {
-        static Shown of(String ucum) {
-            return ucum.equals("J/mol") ? new Shown("kJ/mol", -3) : new Shown(ucum, 0);
-        }
-
-        double value(double value) {
-            if (powerOfTen == 0 || !Double.isFinite(value)) {
-                return value;
-            }
-            return Decimals.of(value).scaleByPowerOfTen(powerOfTen).doubleValue();
-        }
     }
 }

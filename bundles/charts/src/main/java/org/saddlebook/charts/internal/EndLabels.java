@@ -1,0 +1,89 @@
+package org.saddlebook.charts.internal;
+
+import java.awt.Color;
+import java.awt.Graphics2D;
+import java.awt.geom.Line2D;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+
+/** Names at the ends of lines, moved apart where they would touch, with a leader to the line each belongs to. */
+final class EndLabels {
+    static final int SIZE = 11;
+    static final double LINE_HEIGHT = 13;
+    static final double WIDEST = 130;
+
+    /** Distance from the drawing area to the text; room for the leader. */
+    static final double GAP = 22;
+
+    private static final class Label {
+        private final List<String> lines;
+        private final double endX;
+        private final double endY;
+        private final Color ink;
+        private double top;
+
+        Label(List<String> lines, double endX, double endY, Color ink) {
+            this.lines = lines;
+            this.endX = endX;
+            this.endY = endY;
+            this.ink = ink;
+            this.top = endY - height() / 2;
+        }
+
+        double height() {
+            return lines.size() * LINE_HEIGHT;
+        }
+    }
+
+    private final List<Label> labels = new ArrayList<>();
+
+    void add(String text, double endX, double endY, Color ink) {
+        if (!text.isEmpty()) {
+            labels.add(new Label(Lettering.wrap(text, SIZE, WIDEST), endX, endY, ink));
+        }
+    }
+
+    /** Room the names need at the right of the drawing area. */
+    static double room(List<String> names) {
+        double most = 0;
+        for (String name : names) {
+            for (String line : Lettering.wrap(name, SIZE, WIDEST)) {
+                most = Math.max(most, Lettering.width(line, SIZE, false));
+            }
+        }
+        return most == 0 ? 0 : GAP + most;
+    }
+
+    void draw(Graphics2D g, double right, double top, double bottom) {
+        labels.sort(Comparator.comparingDouble((Label label) -> label.endY));
+        spread(top, bottom);
+        for (Label label : labels) {
+            double middle = label.top + label.height() / 2;
+            g.setPaint(label.ink);
+            g.setStroke(Palette.HAIR);
+            g.draw(new Line2D.Double(label.endX + 2, label.endY, right + 5, label.endY));
+            g.draw(new Line2D.Double(right + 5, label.endY, right + GAP - 4, middle));
+            double y = label.top + LINE_HEIGHT - 3;
+            for (String line : label.lines) {
+                Lettering.draw(g, line, right + GAP, y, Lettering.Anchor.START, SIZE, false, Palette.INK);
+                y += LINE_HEIGHT;
+            }
+        }
+    }
+
+    /** Down the page each label keeps clear of the one above; then, from the foot, of the one below. */
+    private void spread(double top, double bottom) {
+        double free = top;
+        for (Label label : labels) {
+            label.top = Math.max(label.top, free);
+            free = label.top + label.height() + 2;
+        }
+        double foot = bottom;
+        for (int i = labels.size() - 1; i >= 0; i--) {
+            Label label = labels.get(i);
+            label.top = Math.min(label.top, foot - label.height());
+            foot = label.top - 2;
+        }
+    }
+}

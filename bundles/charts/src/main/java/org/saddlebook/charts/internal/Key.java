@@ -1,0 +1,89 @@
+package org.saddlebook.charts.internal;
+
+import java.awt.Graphics2D;
+import java.awt.geom.Line2D;
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import org.saddlebook.api.findings.Layer;
+
+/** One line under the title that shows each mark beside its word. Lines are named at their ends instead. */
+final class Key {
+    private static final Map<Layer.Kind, String> WORDS = new EnumMap<>(Map.of(
+            Layer.Kind.MEASURED, "measured",
+            Layer.Kind.EXCLUDED, "excluded",
+            Layer.Kind.PREDICTED, "predicted",
+            Layer.Kind.CONFIDENCE_BAND, "interval of the mean",
+            Layer.Kind.NEW_RUN_BAND, "interval of a new run"));
+
+    private record Entry(Layer.Kind kind, String word) {}
+
+    private final List<Entry> entries;
+
+    private Key(List<Entry> entries) {
+        this.entries = entries;
+    }
+
+    static Key of(List<Layer> layers) {
+        Set<String> lines = new HashSet<>();
+        for (Layer layer : layers) {
+            if (layer.kind() == Layer.Kind.LINE) {
+                lines.add(layer.label());
+            }
+        }
+        List<Entry> entries = new ArrayList<>();
+        for (Map.Entry<Layer.Kind, String> kind : WORDS.entrySet()) {
+            int found = 0;
+            Set<String> own = new HashSet<>();
+            for (Layer layer : layers) {
+                if (layer.kind() == kind.getKey() && layer.size() > 0) {
+                    found++;
+                    own.add(layer.label());
+                }
+            }
+            if (found > 0) {
+                String label = own.size() == 1 ? own.iterator().next() : "";
+                entries.add(
+                        new Entry(kind.getKey(), label.isEmpty() || lines.contains(label) ? kind.getValue() : label));
+            }
+        }
+        return new Key(entries);
+    }
+
+    boolean isEmpty() {
+        return entries.isEmpty();
+    }
+
+    void draw(Graphics2D g, double left, double baseline, int size) {
+        double x = left;
+        double y = baseline - 4;
+        for (Entry entry : entries) {
+            double wide = 16;
+            switch (entry.kind()) {
+                case MEASURED -> Marks.measured(g, x + 6, y, y + 8, y - 8);
+                case EXCLUDED -> Marks.excluded(g, x + 8, y, y, y);
+                case PREDICTED -> Marks.predicted(g, x + 8, y, y, y, Palette.INK);
+                case CONFIDENCE_BAND -> {
+                    wide = 24;
+                    g.setPaint(Palette.INK);
+                    g.setStroke(Palette.HAIR);
+                    g.draw(Hatch.of(
+                            new double[] {x, x + wide, x + wide, x}, new double[] {y - 5, y - 5, y + 5, y + 5}, -1, 5));
+                }
+                case NEW_RUN_BAND -> {
+                    wide = 24;
+                    g.setPaint(Palette.INK);
+                    g.setStroke(Palette.OUTLINE);
+                    g.draw(new Line2D.Double(x, y - 4.5, x + wide, y - 4.5));
+                    g.draw(new Line2D.Double(x, y + 4.5, x + wide, y + 4.5));
+                }
+                case LINE, VERTICAL_MARK, HORIZONTAL_MARK -> wide = 0;
+            }
+            Lettering.draw(g, entry.word(), x + wide + 5, baseline, Lettering.Anchor.START, size, false, Palette.INK);
+            x += wide + 5 + Lettering.width(entry.word(), size, false) + 18;
+        }
+    }
+}

@@ -24,13 +24,15 @@ public final class ExactConversion {
         try {
             Term term = UnitParser.parse(unit.code());
             BigDecimal[] exact = term.exactFactor();
-            if (exact != null && term.unit().equals(unit)) {
+            Unit own = term.unit();
+            // Compared by hand: record equality is set up at run time, which costs at start.
+            if (exact != null && own.factor() == unit.factor() && own.offset() == unit.offset()) {
                 BigDecimal offset = term.factors().size() == 1
                         ? term.factors().get(0).symbol().offset()
                         : BigDecimal.ZERO;
                 return new ExactConversion(exact[0], exact[1], offset);
             }
-        } catch (UnitException e) {
+        } catch (UnitException | ArithmeticException e) {
             // A unit made elsewhere: its double factor is all there is.
         }
         return new ExactConversion(new BigDecimal(unit.factor()), BigDecimal.ONE, new BigDecimal(unit.offset()));

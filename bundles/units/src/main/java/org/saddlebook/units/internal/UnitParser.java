@@ -147,7 +147,7 @@ final class UnitParser {
 
     /** Whether the symbol just read, with this exponent, is the whole expression. */
     private boolean alone(Exponent exponent) {
-        boolean bare = exponent.equals(Exponent.ONE);
+        boolean bare = exponent.numerator() == 1 && exponent.denominator() == 1;
         for (int i = 0; i < text.length(); i++) {
             char c = text.charAt(i);
             bare &= c != '/' && c != '.' && c != '*' && c != ' ';

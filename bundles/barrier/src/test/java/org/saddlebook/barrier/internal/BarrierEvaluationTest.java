@@ -149,6 +149,15 @@ class BarrierEvaluationTest {
     }
 
     @Test
+    void veryUncertainRateConstantsAreFittedThemselvesAndAgreeWhereThereIsNoScatter() {
+        RateTable table = Bench.table(Bench.PER_SECOND, 1, FIVE, rates(new double[5]), OptionalDouble.of(0.3));
+        Node.Group body = Bench.body(table, Choices.defaults());
+        assertEquals("k", TreeReader.text(body, "response"));
+        assertEquals(90_000, Bench.parameter(body, "arrhenius", "Ea").value().orElseThrow(), 1e-5);
+        assertEquals("fitted", TreeReader.text(Bench.model(body, "eyring"), "outcome"));
+    }
+
+    @Test
     void straightAndCurvedLawsCannotBeToldApartOnFiveScatteredPoints() {
         Node.Group comparison = TreeReader.group(Bench.body(arrhenius(SCATTER), Choices.defaults()), "comparison");
         assertTrue(TreeReader.member(comparison, "undecided", Node.Flag.class).value());

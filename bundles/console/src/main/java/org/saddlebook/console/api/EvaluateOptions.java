@@ -88,6 +88,11 @@ public final class EvaluateOptions {
         return options;
     }
 
+    /** Ids of the models asked for by name; empty for none. */
+    public List<String> models() {
+        return models;
+    }
+
     /** The campaign with what was given put in place. */
     public Campaign foldInto(Campaign campaign) {
         Choices choices = campaign.choices();

@@ -1,6 +1,7 @@
 package org.saddlebook.console.internal;
 
 import java.io.PrintStream;
+import java.util.List;
 import java.util.Optional;
 import java.util.TreeMap;
 import org.osgi.framework.BundleContext;
@@ -12,6 +13,7 @@ import org.saddlebook.api.model.RateModel;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.console.api.ExitCode;
 import org.saddlebook.console.api.Invocation;
+import org.saddlebook.console.api.Options;
 import org.saddlebook.console.api.Verb;
 
 /** Lists the rate models that are installed. */
@@ -47,7 +49,7 @@ public final class ModelsVerb implements Verb {
 
     @Override
     public int run(Invocation invocation) throws InputException {
-        Arguments.none(name(), invocation.arguments());
+        Options.parse(invocation.arguments(), List.of(), List.of());
         PrintStream out = invocation.out();
         TreeMap<String, ServiceReference<RateModel>> byId = new TreeMap<>();
         for (ServiceReference<RateModel> reference : services.references(RateModel.class, null)) {

@@ -85,7 +85,8 @@ public final class JsonCursor {
 
     /** A member that may be absent. */
     public Optional<JsonCursor> optional(String key) throws InputException {
-        return object().get(key).map(found -> step(key, found));
+        JsonValue found = object().members().get(key);
+        return found == null ? Optional.empty() : Optional.of(step(key, found));
     }
 
     /** The members in order. */

@@ -3,6 +3,7 @@ package org.saddlebook.json.api;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import java.nio.charset.StandardCharsets;
+import java.util.Locale;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.saddlebook.api.problem.InputException;
@@ -59,5 +60,15 @@ class CanonicalJsonValidationTest {
         assertEquals(
                 "\"\\b\\t\\n\\f\\r\\u0000\\u001f\u007f\u2028/<\"",
                 new String(CanonicalJson.bytes(new JsonString(text)), StandardCharsets.UTF_8));
+    }
+
+    /** The example "abc" of FIPS 180-4's published test values, from memory. */
+    @Test
+    void hashesTheExampleOfTheStandard() {
+        String hash = Sha256.of("abc".getBytes(StandardCharsets.US_ASCII));
+        assertEquals("ba7816bf8f01cfea414140de5dae2223b00361a396177a9cb410ff61f20015ad", hash);
+        assertEquals(true, Sha256.isHash(hash));
+        assertEquals(false, Sha256.isHash(hash.toUpperCase(Locale.ROOT)));
+        assertEquals(false, Sha256.isHash(hash.substring(1)));
     }
 }

@@ -34,14 +34,24 @@ final class Amounts {
      */
     record Amount(double si, OptionalDouble uncertainty, Unit unit) {}
 
-    /** Reads a text as a unit; that is how temperatures and rate constants differ. */
-    interface UnitReader {
-        Unit read(String text) throws UnitException;
+    /** What a unit must be one of. */
+    enum Kind {
+        /** A temperature: {@code C} is degrees Celsius. */
+        TEMPERATURE,
+        /** A rate constant. */
+        RATE,
+        /** Anything. */
+        ANY
     }
 
-    static Unit unit(JsonCursor at, UnitReader units) throws InputException {
+    static Unit unit(JsonCursor at, Kind kind) throws InputException {
+        String text = at.text();
         try {
-            return units.read(at.text());
+            return switch (kind) {
+                case TEMPERATURE -> Units.temperature(text);
+                case RATE -> Units.rateConstant(text);
+                case ANY -> Units.parse(text);
+            };
         } catch (UnitException e) {
             throw new InputException(e.at(at.place()));
         }
@@ -57,7 +67,7 @@ final class Amounts {
                 throw new InputException(e.at(at.place()));
             }
         } else {
-            amount = amount(at, plain, Units::temperature, "{\"value\": 25, \"unit\": \"degC\"}");
+            amount = amount(at, plain, Kind.TEMPERATURE, "{\"value\": 25, \"unit\": \"degC\"}");
         }
         if (!(amount.si() > 0)) {
             throw at.problem(
@@ -72,7 +82,7 @@ final class Amounts {
         if (at.value() instanceof JsonString text) {
             amount = measured(at, text.value());
         } else {
-            amount = amount(at, plain, Units::rateConstant, "{\"value\": 0.012, \"unit\": \"1/s\"}");
+            amount = amount(at, plain, Kind.RATE, "{\"value\": 0.012, \"unit\": \"1/s\"}");
         }
         if (!(amount.si() > 0)) {
             throw at.problem(
@@ -94,7 +104,7 @@ final class Amounts {
                 throw new InputException(e.at(at.place()));
             }
         }
-        Amount amount = amount(at, Optional.empty(), Units::parse, "\"1 mol/L\"");
+        Amount amount = amount(at, Optional.empty(), Kind.ANY, "\"1 mol/L\"");
         Dimension dimension = amount.unit().dimension();
         boolean pressure = dimension.equals(Dimension.PRESSURE);
         if (!(pressure || dimension.equals(Dimension.CONCENTRATION)) || !(amount.si() > 0)) {
@@ -132,8 +142,7 @@ final class Amounts {
         }
     }
 
-    private static Amount amount(JsonCursor at, Optional<Unit> plain, UnitReader units, String example)
-            throws InputException {
+    private static Amount amount(JsonCursor at, Optional<Unit> plain, Kind kind, String example) throws InputException {
         if (at.value() instanceof JsonNumber number) {
             if (plain.isEmpty()) {
                 throw withoutUnit(at, example);
@@ -144,7 +153,7 @@ final class Amounts {
             throw at.wrongType("a value with its unit, for example " + example);
         }
         at.onlyKeys(KEYS);
-        Unit unit = unit(at.member("unit"), units);
+        Unit unit = unit(at.member("unit"), kind);
         double si = toSi(at, unit, at.member("value").number());
         Optional<JsonCursor> u = at.optional("standardUncertainty");
         return new Amount(

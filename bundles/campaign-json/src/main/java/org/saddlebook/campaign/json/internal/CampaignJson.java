@@ -19,6 +19,7 @@ import org.saddlebook.json.api.JsonCursor;
 import org.saddlebook.json.api.JsonDocument;
 import org.saddlebook.json.api.JsonObject;
 import org.saddlebook.json.api.JsonValue;
+import org.saddlebook.json.api.Sha256;
 
 /** Campaigns as JSON, version 1. */
 final class CampaignJson {
@@ -28,6 +29,8 @@ final class CampaignJson {
             List.of("schema", "title", "notes", "sources", "rateTable", "choices", "settings", "history");
     private static final List<String> SOURCE_KEYS = List.of("path", "sha256", "size", "reader");
     private static final List<String> HISTORY_KEYS = List.of("who", "when", "what", "old", "new", "reason");
+
+    private static final int PARTS = 6;
 
     private CampaignJson() {}
 
@@ -107,18 +110,9 @@ final class CampaignJson {
         List<Problem> problems = new ArrayList<>();
         Campaign campaign = Campaign.titled("");
         // Each part on its own, so that one message names the mistakes of all of them.
-        for (Part part : List.<Part>of(
-                (c, at) -> {
-                    at.onlyKeys(KEYS);
-                    return c;
-                },
-                CampaignJson::readTexts,
-                CampaignJson::readSources,
-                CampaignJson::readTable,
-                CampaignJson::readSettings,
-                CampaignJson::readHistory)) {
+        for (int part = 0; part < PARTS; part++) {
             try {
-                campaign = part.read(campaign, root);
+                campaign = readPart(part, campaign, root);
             } catch (InputException e) {
                 problems.addAll(e.problems());
             }
@@ -129,9 +123,20 @@ final class CampaignJson {
         return campaign;
     }
 
-    /** One part of the document, added to the campaign. */
-    private interface Part {
-        Campaign read(Campaign before, JsonCursor root) throws InputException;
+    private static Campaign readPart(int part, Campaign before, JsonCursor root) throws InputException {
+        return switch (part) {
+            case 0 -> readKeys(before, root);
+            case 1 -> readTexts(before, root);
+            case 2 -> readSources(before, root);
+            case 3 -> readTable(before, root);
+            case 4 -> readSettings(before, root);
+            default -> readHistory(before, root);
+        };
+    }
+
+    private static Campaign readKeys(Campaign before, JsonCursor root) throws InputException {
+        root.onlyKeys(KEYS);
+        return before;
     }
 
     private static Campaign readTexts(Campaign before, JsonCursor root) throws InputException {
@@ -153,7 +158,7 @@ final class CampaignJson {
         at.onlyKeys(SOURCE_KEYS);
         String path = at.member("path").text();
         JsonCursor sha256 = at.member("sha256");
-        if (!Digests.isSha256(sha256.text())) {
+        if (!Sha256.isHash(sha256.text())) {
             throw sha256.wrongValue("a SHA-256 of 64 lower-case hexadecimal digits");
         }
         try {

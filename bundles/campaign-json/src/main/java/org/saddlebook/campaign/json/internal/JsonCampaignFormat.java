@@ -9,6 +9,7 @@ import org.saddlebook.api.service.CampaignFormat;
 import org.saddlebook.json.api.CanonicalJson;
 import org.saddlebook.json.api.JsonDocument;
 import org.saddlebook.json.api.PrettyJson;
+import org.saddlebook.json.api.Sha256;
 
 /** Campaigns and findings as JSON. */
 @Component(service = CampaignFormat.class)
@@ -39,7 +40,7 @@ public final class JsonCampaignFormat implements CampaignFormat {
 
     @Override
     public String digest(Campaign campaign) {
-        return Digests.sha256(
+        return Sha256.of(
                 CanonicalJson.bytes(CampaignJson.writeWithoutHistory(campaign).build()));
     }
 }

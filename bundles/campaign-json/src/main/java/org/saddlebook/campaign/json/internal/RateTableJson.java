@@ -106,7 +106,7 @@ final class RateTableJson {
             JsonCursor units = at.member("units");
             units.onlyKeys(UNIT_KEYS);
             if (units.optional("temperature").isPresent()) {
-                plainTemperature = Optional.of(Amounts.unit(units.member("temperature"), Units::temperature));
+                plainTemperature = Optional.of(Amounts.unit(units.member("temperature"), Amounts.Kind.TEMPERATURE));
             }
             if (units.optional("k").isPresent()) {
                 plainRate = Optional.of(plainRateUnit(units.member("k"), unit));
@@ -167,7 +167,7 @@ final class RateTableJson {
     }
 
     private static Unit rateUnit(JsonCursor at) throws InputException {
-        Unit unit = Amounts.unit(at, Units::rateConstant);
+        Unit unit = Amounts.unit(at, Amounts.Kind.RATE);
         if (Units.rateOrder(unit).isEmpty()) {
             throw at.problem(
                     "wrong-dimension",

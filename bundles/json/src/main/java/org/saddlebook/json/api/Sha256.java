@@ -1,15 +1,16 @@
-package org.saddlebook.campaign.json.internal;
+package org.saddlebook.json.api;
 
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 
-/** SHA-256 in lower-case hexadecimal. */
-final class Digests {
+/** SHA-256 (FIPS 180-4) as files and documents name it: 64 lower-case hexadecimal digits. */
+public final class Sha256 {
     private static final String HEX = "0123456789abcdef";
 
-    private Digests() {}
+    private Sha256() {}
 
-    static String sha256(byte[] bytes) {
+    /** The hash of these bytes. */
+    public static String of(byte[] bytes) {
         byte[] hash;
         try {
             hash = MessageDigest.getInstance("SHA-256").digest(bytes);
@@ -23,7 +24,8 @@ final class Digests {
         return text.toString();
     }
 
-    static boolean isSha256(String text) {
+    /** Whether a text has the form of a hash. */
+    public static boolean isHash(String text) {
         if (text.length() != 64) {
             return false;
         }

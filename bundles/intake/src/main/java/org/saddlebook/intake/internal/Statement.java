@@ -1,0 +1,123 @@
+package org.saddlebook.intake.internal;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.saddlebook.api.campaign.Campaign;
+import org.saddlebook.api.campaign.Choices;
+import org.saddlebook.api.problem.InputException;
+import org.saddlebook.api.reader.Imported.Directive;
+
+/** The statements that a comment line can make. */
+enum Statement {
+    TITLE,
+    NOTES,
+    STANDARD_STATE,
+    MOLECULARITY,
+    TRANSMISSION,
+    REFERENCE_TEMPERATURE,
+    CONSTANT,
+    ERROR_MODEL,
+    MODELS,
+    AT,
+    LEVEL,
+    SEED,
+    ENTHALPY,
+    ENTROPY,
+    CORRELATION,
+    COVARIANCE;
+
+    /** Words of their own that only look like one of ours. */
+    private static final List<String> UNRELATED = List.of("dg", "\u03b4g", "\u2206g", "delta g", "ph");
+
+    /** The keys that make a statement, as readers hand them on: lower case, single spaces. */
+    List<String> keys() {
+        return switch (this) {
+            case TITLE -> List.of("title");
+            case NOTES -> List.of("notes", "note");
+            case STANDARD_STATE -> List.of("standard state");
+            case MOLECULARITY -> List.of("molecularity", "order");
+            case TRANSMISSION -> List.of("transmission", "transmission coefficient");
+            case REFERENCE_TEMPERATURE -> List.of("reference temperature");
+            case CONSTANT -> List.of("constant", "constant kind", "kind of constant");
+            case ERROR_MODEL -> List.of("error model");
+            case MODELS -> List.of("models", "model");
+            case AT -> List.of("at");
+            case LEVEL -> List.of("level");
+            case SEED -> List.of("seed");
+            case ENTHALPY -> List.of("dh", "\u03b4h", "\u2206h", "delta h");
+            case ENTROPY -> List.of("ds", "\u03b4s", "\u2206s", "delta s");
+            case CORRELATION -> List.of("correlation(dh,ds)", "correlation(dh, ds)", "corr(dh,ds)", "corr(dh, ds)");
+            case COVARIANCE -> List.of("cov(dh,ds)", "cov(dh, ds)", "covariance(dh,ds)", "covariance(dh, ds)");
+        };
+    }
+
+    /** The statement with this key. */
+    static Optional<Statement> of(String key) {
+        for (Statement statement : values()) {
+            if (statement.keys().contains(key)) {
+                return Optional.of(statement);
+            }
+        }
+        return Optional.empty();
+    }
+
+    /** Keys whose loss would change results; that of a title would not. {@code at} is too short to be misspelt. */
+    static List<String> keysWithConsequences() {
+        List<String> keys = new ArrayList<>();
+        for (Statement statement : values()) {
+            if (statement != TITLE && statement != NOTES && statement != AT) {
+                keys.addAll(statement.keys());
+            }
+        }
+        return keys;
+    }
+
+    /** Whether a key is a word of its own that only looks like one of ours. */
+    static boolean isUnrelated(String key) {
+        return UNRELATED.contains(key);
+    }
+
+    /** A key as people write it. */
+    static String shown(String key) {
+        return key.equals("dh") || key.contains("(")
+                ? key.replace("dh", "dH").replace("ds", "dS")
+                : key.equals("ds") ? "dS" : key;
+    }
+
+    /** Whether it may stand in several lines. */
+    boolean repeatable() {
+        return this == NOTES || this == AT;
+    }
+
+    /**
+     * The campaign with what was stated.
+     *
+     * @param campaign the campaign so far, with its table
+     * @throws InputException when the value cannot be used
+     */
+    Campaign apply(Campaign campaign, Directive directive) throws InputException {
+        Choices choices = campaign.choices();
+        return switch (this) {
+            case TITLE -> campaign.withTitle(ValueReader.text(directive));
+            case NOTES ->
+                campaign.withNotes(
+                        campaign.notes().isEmpty() ? directive.value() : campaign.notes() + "\n" + directive.value());
+            case STANDARD_STATE -> campaign.withChoices(choices.withStandard(ValueReader.standardState(directive)));
+            case MOLECULARITY -> campaign.withChoices(choices.withMolecularity(ValueReader.order(directive, campaign)));
+            case TRANSMISSION -> campaign.withChoices(choices.withTransmission(ValueReader.positive(directive)));
+            case REFERENCE_TEMPERATURE ->
+                campaign.withChoices(choices.withReferenceKelvin(ValueReader.kelvin(directive, directive.value())));
+            case CONSTANT -> campaign.withChoices(choices.withConstantKind(ValueReader.constantKind(directive)));
+            case ERROR_MODEL -> campaign.withChoices(choices.withErrorModel(ValueReader.errorModel(directive)));
+            case MODELS -> campaign.withChoices(choices.withModels(ValueReader.words(directive)));
+            case AT -> campaign.withChoices(choices.withTargetsKelvin(ValueReader.targets(directive, campaign)));
+            case LEVEL -> campaign.withChoices(choices.withLevel(ValueReader.level(directive)));
+            case SEED -> campaign.withChoices(choices.withSeed(ValueReader.seed(directive)));
+            case ENTHALPY -> Thermodynamics.put(campaign, "dH", ValueReader.energy(directive));
+            case ENTROPY -> Thermodynamics.put(campaign, "dS", ValueReader.entropy(directive));
+            case CORRELATION -> Thermodynamics.put(campaign, "correlation", ValueReader.correlation(directive));
+            case COVARIANCE -> Thermodynamics.put(campaign, "covariance", ValueReader.covariance(directive));
+        };
+    }
+}

@@ -144,18 +144,13 @@ final class SpontaneityEvaluation {
         if (none) {
             return List.of();
         }
-        Map<String, Node> one = new LinkedHashMap<>();
-        one.put(
-                "temperature",
-                new Node.Quantity(
-                        crossover.kelvin(),
-                        Unit.KELVIN.code(),
-                        crossover.standardUncertainty(),
-                        OptionalDouble.empty(),
-                        crossover.interval(),
-                        SpontaneityCautions.ofCrossover(stated, crossover)));
-        one.put("outcome", new Node.Text(crossover.outcome().word()));
-        return List.of(new Node.Group(one));
+        return List.of(new Node.Quantity(
+                crossover.kelvin(),
+                Unit.KELVIN.code(),
+                crossover.standardUncertainty(),
+                OptionalDouble.empty(),
+                crossover.interval(),
+                SpontaneityCautions.ofCrossover(stated, crossover)));
     }
 
     private List<Node> notes(List<SignCase> cases) {

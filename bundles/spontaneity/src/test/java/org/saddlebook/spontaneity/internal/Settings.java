@@ -63,7 +63,7 @@ final class Settings {
     }
 
     static Node.Quantity crossover(Node.Group body) {
-        return quantity((Node.Group) items(body, "crossovers").get(0), "temperature");
+        return (Node.Quantity) items(body, "crossovers").get(0);
     }
 
     static Stated stated(

@@ -18,7 +18,7 @@ public final class ChiSquared {
         if (Double.isNaN(x)) {
             throw new IllegalArgumentException("x is NaN");
         }
-        return IncompleteGamma.of(dof / 2, x / 2).upper();
+        return new IncompleteGamma(dof / 2).at(x / 2).upper();
     }
 
     /**

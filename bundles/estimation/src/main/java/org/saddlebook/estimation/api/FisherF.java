@@ -25,7 +25,7 @@ public final class FisherF {
         double odds = numeratorDof / denominatorDof * f;
         double y = 1 / (1 + odds);
         double x = odds < 1 ? odds * y : 1 / (1 + 1 / odds);
-        return IncompleteBeta.of(numeratorDof / 2, denominatorDof / 2, x, y).upper();
+        return new IncompleteBeta(numeratorDof / 2, denominatorDof / 2).at(x, y).upper();
     }
 
     /**

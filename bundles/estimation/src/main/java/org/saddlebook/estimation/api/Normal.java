@@ -31,7 +31,7 @@ public final class Normal {
         if (Double.isNaN(z)) {
             throw new IllegalArgumentException("z is NaN");
         }
-        IncompleteGamma square = IncompleteGamma.of(HALF, z * z / 2);
+        IncompleteGamma square = new IncompleteGamma(HALF).at(z * z / 2);
         return z > 0 ? HALF * square.upper() : HALF + HALF * square.lower();
     }
 }

@@ -2,6 +2,7 @@ package org.saddlebook.estimation.api;
 
 import org.saddlebook.estimation.internal.IncompleteBeta;
 import org.saddlebook.estimation.internal.Quantiles;
+import org.saddlebook.estimation.internal.RecentValues;
 
 /**
  * Student's t distribution: incomplete beta function (DLMF 8.17), closed forms for 1, 2 and 4 degrees of freedom,
@@ -10,6 +11,8 @@ import org.saddlebook.estimation.internal.Quantiles;
 public final class StudentT {
     private static final double HALF = 0.5;
     private static final double NEARLY_NORMAL = 1e8;
+    /** One campaign, or a thousand resamples of it, asks for the same few quantiles over and over. */
+    private static final RecentValues RECENT = new RecentValues();
 
     private StudentT() {}
 
@@ -18,6 +21,8 @@ public final class StudentT {
      *
      * @param probability strictly between zero and one; 0.975 for a two-sided interval of 95 %
      * @param dof degrees of freedom, positive, not necessarily whole; infinity gives the normal quantile
+     * @return the quantile, to 13 digits or more; infinite where its square would leave the range of doubles (far tails of
+     *     fewer than one or two degrees of freedom)
      */
     public static double quantile(double probability, double dof) {
         Quantiles.requireProbability(probability);
@@ -25,6 +30,16 @@ public final class StudentT {
         if (probability == HALF) {
             return 0;
         }
+        double remembered = RECENT.get(probability, dof);
+        if (!Double.isNaN(remembered)) {
+            return remembered;
+        }
+        double value = compute(probability, dof);
+        RECENT.put(probability, dof, value);
+        return value;
+    }
+
+    private static double compute(double probability, double dof) {
         double tail = Math.min(probability, 1 - probability);
         double size = dof > NEARLY_NORMAL
                 ? fromNormal(Math.abs(Normal.quantile(probability)), dof)
@@ -64,7 +79,7 @@ public final class StudentT {
         double odds = t / dof * t;
         double y = 1 / (1 + odds);
         double x = odds < 1 ? odds * y : 1 / (1 + 1 / odds);
-        IncompleteBeta square = IncompleteBeta.of(HALF, dof / 2, x, y);
+        IncompleteBeta square = new IncompleteBeta(HALF, dof / 2).at(x, y);
         return t > 0 ? HALF * square.upper() : HALF + HALF * square.lower();
     }
 

@@ -2,51 +2,63 @@ package org.saddlebook.estimation.internal;
 
 /**
  * Regularised incomplete beta function by its continued fraction (DLMF 8.17.22) in Lentz's evaluation, both tails without
- * cancellation. Holds one evaluation: value, complement and the derivative a quantile search needs.
+ * cancellation. Holds the last evaluation: value, complement and the derivative a quantile search needs.
  */
 public final class IncompleteBeta {
     private static final double TINY = 1e-300;
     private static final int LIMIT = 1_000_000;
 
-    private final double lower;
-    private final double upper;
-    private final double slope;
+    private final double a;
+    private final double b;
+    private final double stirling;
+    private final double front;
+    private double lower;
+    private double upper;
+    private double slope;
 
-    private IncompleteBeta(double lower, double upper, double slope) {
-        this.lower = lower;
-        this.upper = upper;
-        this.slope = slope;
+    /**
+     * The function for two parameters; not for use by several threads.
+     *
+     * @param a first parameter, above zero
+     * @param b second parameter, above zero
+     */
+    public IncompleteBeta(double a, double b) {
+        this.a = a;
+        this.b = b;
+        stirling = Deviance.stirlingError(a + b) - Deviance.stirlingError(a) - Deviance.stirlingError(b);
+        front = Math.sqrt(a / (a + b) * b / (2 * Math.PI));
     }
 
     /**
      * Evaluates.
      *
-     * @param a first parameter, above zero
-     * @param b second parameter, above zero
      * @param x argument in [0, 1]
      * @param y one minus x, given separately so that neither is rounded away
+     * @return this, holding the values there
      */
-    public static IncompleteBeta of(double a, double b, double x, double y) {
+    public IncompleteBeta at(double x, double y) {
         if (!(x > 0)) {
-            return new IncompleteBeta(0, 1, 0);
+            return hold(0, 1, 0);
         }
         if (!(y > 0)) {
-            return new IncompleteBeta(1, 0, 0);
+            return hold(1, 0, 0);
         }
         double n = a + b;
-        double exponent = Deviance.stirlingError(n)
-                - Deviance.stirlingError(a)
-                - Deviance.stirlingError(b)
-                - Deviance.deviance(a, n * x)
-                - Deviance.deviance(b, n * y);
         // x^a y^b / B(a, b)
-        double slope = Math.sqrt(a / n * b / (2 * Math.PI)) * StrictMath.exp(exponent);
+        double density = front * StrictMath.exp(stirling - Deviance.deviance(a, n * x) - Deviance.deviance(b, n * y));
         if (x < (a + 1) / (n + 2)) {
-            double value = slope / fraction(a, b, x, y);
-            return new IncompleteBeta(value, 1 - value, slope);
+            double value = density / fraction(a, b, x, y);
+            return hold(value, 1 - value, density);
         }
-        double value = slope / fraction(b, a, y, x);
-        return new IncompleteBeta(1 - value, value, slope);
+        double value = density / fraction(b, a, y, x);
+        return hold(1 - value, value, density);
+    }
+
+    private IncompleteBeta hold(double below, double above, double density) {
+        lower = below;
+        upper = above;
+        slope = density;
+        return this;
     }
 
     /**

@@ -1,36 +1,41 @@
 package org.saddlebook.estimation.internal;
 
-/** Regularised incomplete gamma function: series (DLMF 8.11.4) and continued fraction (DLMF 8.9.2), both tails. */
+/** Regularised incomplete gamma function: series (DLMF 8.11.4) and continued fraction (DLMF 8.9.2), both tails. Holds the last evaluation. */
 public final class IncompleteGamma {
     private static final double TINY = 1e-300;
     private static final int LIMIT = 1_000_000;
 
-    private final double lower;
-    private final double upper;
-    private final double slope;
+    private final double a;
+    private final double stirling;
+    private double lower;
+    private double upper;
+    private double slope;
 
-    private IncompleteGamma(double lower, double upper, double slope) {
-        this.lower = lower;
-        this.upper = upper;
-        this.slope = slope;
+    /**
+     * The function for one parameter; not for use by several threads.
+     *
+     * @param a parameter, above zero
+     */
+    public IncompleteGamma(double a) {
+        this.a = a;
+        stirling = Deviance.stirlingError(a);
     }
 
     /**
      * Evaluates.
      *
-     * @param a parameter, above zero
-     * @param x argument, at least zero
+     * @param x argument; below zero counts as zero
+     * @return this, holding the values there
      */
-    public static IncompleteGamma of(double a, double x) {
+    public IncompleteGamma at(double x) {
         if (!(x > 0)) {
-            return new IncompleteGamma(0, 1, 0);
+            return hold(0, 1, 0);
         }
         if (x == Double.POSITIVE_INFINITY) {
-            return new IncompleteGamma(1, 0, 0);
+            return hold(1, 0, 0);
         }
         // x^a e^-x / Gamma(a + 1)
-        double density =
-                StrictMath.exp(-Deviance.stirlingError(a) - Deviance.deviance(a, x)) / Math.sqrt(2 * Math.PI * a);
+        double density = StrictMath.exp(-stirling - Deviance.deviance(a, x)) / Math.sqrt(2 * Math.PI * a);
         if (x < a + 1) {
             double term = 1;
             double sum = 1;
@@ -42,7 +47,7 @@ public final class IncompleteGamma {
                 }
             }
             double value = density * sum;
-            return new IncompleteGamma(value, 1 - value, density * a);
+            return hold(value, 1 - value, density * a);
         }
         double b = x + 1 - a;
         double c = 1 / TINY;
@@ -62,7 +67,14 @@ public final class IncompleteGamma {
             }
         }
         double value = density * a * h;
-        return new IncompleteGamma(1 - value, value, density * a);
+        return hold(1 - value, value, density * a);
+    }
+
+    private IncompleteGamma hold(double below, double above, double derivative) {
+        lower = below;
+        upper = above;
+        slope = derivative;
+        return this;
     }
 
     /** {@code P(a, x)}. */

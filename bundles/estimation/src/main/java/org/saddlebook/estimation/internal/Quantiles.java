@@ -20,11 +20,12 @@ public final class Quantiles {
 
     /** x with {@code P(a, x) = lower}. */
     public static double gammaLower(double a, double lower, double start) {
+        IncompleteGamma function = new IncompleteGamma(a);
         return QuantileSearch.solve(
                 (x, result) -> {
-                    IncompleteGamma at = IncompleteGamma.of(a, x);
-                    result[0] = at.lower();
-                    result[1] = at.slope();
+                    function.at(x);
+                    result[0] = function.lower();
+                    result[1] = function.slope();
                 },
                 true,
                 lower,
@@ -33,11 +34,12 @@ public final class Quantiles {
 
     /** x with {@code Q(a, x) = upper}. */
     public static double gammaUpper(double a, double upper, double start) {
+        IncompleteGamma function = new IncompleteGamma(a);
         return QuantileSearch.solve(
                 (x, result) -> {
-                    IncompleteGamma at = IncompleteGamma.of(a, x);
-                    result[0] = at.upper();
-                    result[1] = at.slope();
+                    function.at(x);
+                    result[0] = function.upper();
+                    result[1] = function.slope();
                 },
                 false,
                 upper,
@@ -46,11 +48,12 @@ public final class Quantiles {
 
     /** Odds {@code r = x / y} with {@code I_x(a, b) = lower}, x = r / (1 + r). */
     public static double betaOddsLower(double a, double b, double lower, double start) {
+        IncompleteBeta function = new IncompleteBeta(a, b);
         return QuantileSearch.solve(
                 (r, result) -> {
-                    IncompleteBeta at = IncompleteBeta.of(a, b, r / (1 + r), 1 / (1 + r));
-                    result[0] = at.lower();
-                    result[1] = at.slope();
+                    function.at(r / (1 + r), 1 / (1 + r));
+                    result[0] = function.lower();
+                    result[1] = function.slope();
                 },
                 true,
                 lower,
@@ -59,11 +62,12 @@ public final class Quantiles {
 
     /** Odds {@code r = x / y} with {@code 1 - I_x(a, b) = upper}. */
     public static double betaOddsUpper(double a, double b, double upper, double start) {
+        IncompleteBeta function = new IncompleteBeta(a, b);
         return QuantileSearch.solve(
                 (r, result) -> {
-                    IncompleteBeta at = IncompleteBeta.of(a, b, r / (1 + r), 1 / (1 + r));
-                    result[0] = at.upper();
-                    result[1] = at.slope();
+                    function.at(r / (1 + r), 1 / (1 + r));
+                    result[0] = function.upper();
+                    result[1] = function.slope();
                 },
                 false,
                 upper,

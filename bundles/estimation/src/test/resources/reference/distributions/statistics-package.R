@@ -1,0 +1,11 @@
+# Reference values from R's distribution functions.
+# Run as: Rscript statistics-package.R > statistics-package.csv   (R 4.2.2)
+options(digits = 17)
+cat("# statistics-package.R, R 4.2.2; name, arguments, value\n")
+for (v in c(1,2,3,4,5,6,8,10,30,120)) cat(sprintf("studentQuantile,0.975,%d,%.17g\n",v,qt(0.975,v)))
+for (v in c(1,2,3,6,10,30)) cat(sprintf("studentQuantile,0.995,%d,%.17g\n",v,qt(0.995,v)))
+for (p in c(0.9,0.95,0.975,0.995,0.9995)) cat(sprintf("normalQuantile,%.17g,%.17g\n",p,qnorm(p)))
+for (v in c(1,2,5,9,30)) cat(sprintf("chiSquaredQuantile,0.95,%d,%.17g\n",v,qchisq(0.95,v)))
+for (v in c(1,5,9,30)) cat(sprintf("chiSquaredUpperTail,%.17g,%d,%.17g\n",v*1.5,v,pchisq(v*1.5,v,lower.tail=FALSE)))
+for (v in c(1,2,5)) for (w in c(3,8,40)) cat(sprintf("fisherQuantile,0.95,%d,%d,%.17g\n",v,w,qf(0.95,v,w)))
+for (v in c(1,2,5)) for (w in c(3,8,40)) cat(sprintf("fisherUpperTail,4.5,%d,%d,%.17g\n",v,w,pf(4.5,v,w,lower.tail=FALSE)))

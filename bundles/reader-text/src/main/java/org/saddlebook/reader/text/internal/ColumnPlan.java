@@ -98,7 +98,7 @@ final class ColumnPlan {
                     problems.add(
                             "duplicate-column",
                             problems.place(header.line(), cells.get(i)),
-                            "the column name \"" + cells.get(i) + "\" twice",
+                            "the column name " + Problems.quoted(cells.get(i)) + " twice",
                             "each column name once",
                             "rename or remove one of the two columns");
                     // Only the first is looked at further, so that the same fault is not reported twice.
@@ -120,7 +120,7 @@ final class ColumnPlan {
             StringBuilder found = new StringBuilder();
             for (int index : candidates) {
                 found.append(found.length() == 0 ? "" : " and ")
-                        .append(quoted(header.cells().get(index)));
+                        .append(Problems.quoted(header.cells().get(index)));
             }
             problems.add(
                     code,
@@ -158,8 +158,8 @@ final class ColumnPlan {
             problems.add(
                     "two-columns",
                     problems.place(header.line(), header.cells().get(index)),
-                    quoted(column(Kind.RATE_UNCERTAINTY).heading()) + " and "
-                            + quoted(header.cells().get(index)),
+                    Problems.quoted(column(Kind.RATE_UNCERTAINTY).heading()) + " and "
+                            + Problems.quoted(header.cells().get(index)),
                     "one column for the standard uncertainty of the rate constant",
                     "keep the absolute or the relative uncertainty and remove the other");
         } else {
@@ -181,7 +181,7 @@ final class ColumnPlan {
             problems.add(
                     "two-units",
                     problems.place(units.line(), heading(index)),
-                    quoted(below) + " below " + quoted(heading(index)),
+                    Problems.quoted(below) + " below " + Problems.quoted(heading(index)),
                     "one unit for the column",
                     "state the unit in the header or in the row of units, not in both");
             return null;
@@ -237,7 +237,7 @@ final class ColumnPlan {
         if (unit.dimension().equals(Dimension.NONE)) {
             throw new UnitException(
                     "wrong-dimension",
-                    quoted(text) + " for u(k)",
+                    Problems.quoted(text) + " for u(k)",
                     "the unit of the rate constant, or %",
                     "name the column u(k)/k when it holds u(k) divided by k");
         }
@@ -254,7 +254,7 @@ final class ColumnPlan {
         problems.add(
                 "missing-unit",
                 problems.place(header.line(), heading(index)),
-                quoted(heading(index)) + ", the " + kind.words() + " without a unit",
+                Problems.quoted(heading(index)) + ", the " + kind.words() + " without a unit",
                 "the unit in the header",
                 "write the unit after the name, for example " + example);
     }
@@ -281,10 +281,7 @@ final class ColumnPlan {
                         "scaled-column",
                         "the rate constant itself",
                         "write the power of ten into the values or into" + " the unit, for example \"k / 10^-5 s^-1\"");
-            } else if (kind == Kind.UNCLEAR_UNCERTAINTY
-                    && column(Kind.RATE_UNCERTAINTY) == null
-                    && column(Kind.RELATIVE_RATE_UNCERTAINTY) == null
-                    && column(Kind.TEMPERATURE_UNCERTAINTY) == null) {
+            } else if (kind == Kind.UNCLEAR_UNCERTAINTY && !isSpare(i)) {
                 refuse(
                         i,
                         "unclear-uncertainty",
@@ -296,8 +293,15 @@ final class ColumnPlan {
         }
     }
 
+    /** An unclear uncertainty beside a clear one of k is spare, unless it is written like one of ours. */
+    private boolean isSpare(int index) {
+        return !heading(index).toLowerCase(Locale.ROOT).startsWith("u(")
+                && (column(Kind.RATE_UNCERTAINTY) != null || column(Kind.RELATIVE_RATE_UNCERTAINTY) != null);
+    }
+
     private void refuse(int index, String code, String expected, String remedy) {
-        problems.add(code, problems.place(header.line(), heading(index)), quoted(heading(index)), expected, remedy);
+        problems.add(
+                code, problems.place(header.line(), heading(index)), Problems.quoted(heading(index)), expected, remedy);
     }
 
     private void requireBoth() {
@@ -317,7 +321,8 @@ final class ColumnPlan {
         }
         StringBuilder found = new StringBuilder("the columns ");
         for (int i = 0; i < header.cells().size(); i++) {
-            found.append(i == 0 ? "" : ", ").append(quoted(header.cells().get(i)));
+            found.append(i == 0 ? "" : ", ")
+                    .append(Problems.quoted(header.cells().get(i)));
         }
         problems.add(
                 code,
@@ -361,9 +366,5 @@ final class ColumnPlan {
         return wrapped && cell.indexOf(cell.charAt(0), 1) < 0
                 ? cell.substring(1, cell.length() - 1).strip()
                 : cell;
-    }
-
-    static String quoted(String text) {
-        return "\"" + text + "\"";
     }
 }

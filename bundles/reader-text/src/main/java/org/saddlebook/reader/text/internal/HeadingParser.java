@@ -1,5 +1,6 @@
 package org.saddlebook.reader.text.internal;
 
+import java.util.List;
 import java.util.Locale;
 import org.saddlebook.reader.text.internal.Heading.Kind;
 
@@ -26,11 +27,15 @@ final class HeadingParser {
         new Name("u(k)", Kind.RATE_UNCERTAINTY),
         new Name("u_k", Kind.RATE_UNCERTAINTY),
         new Name("u(t)", Kind.TEMPERATURE_UNCERTAINTY),
+        new Name("u(θ)", Kind.TEMPERATURE_UNCERTAINTY),
+        new Name("u(ϑ)", Kind.TEMPERATURE_UNCERTAINTY),
         new Name("u_t", Kind.TEMPERATURE_UNCERTAINTY),
         new Name("temperature", Kind.TEMPERATURE),
         new Name("temp.", Kind.TEMPERATURE),
         new Name("temp", Kind.TEMPERATURE),
         new Name("t", Kind.TEMPERATURE),
+        new Name("θ", Kind.TEMPERATURE),
+        new Name("ϑ", Kind.TEMPERATURE),
         new Name("rate constant", Kind.RATE),
         new Name("rate_constant", Kind.RATE),
         new Name("rate coefficient", Kind.RATE),
@@ -52,34 +57,15 @@ final class HeadingParser {
     private static final String[] RECIPROCALS = {
         "1/t", "1000/t", "10^3/t", "10³/t", "1e3/t", "reciprocaltemp", "inversetemp", "t^-1", "t⁻¹"
     };
-    private static final String[] UNCLEAR = {
-        "u(",
-        "u_",
-        "sd",
-        "se",
-        "s(",
-        "std",
-        "stderr",
-        "stdev",
-        "stddev",
-        "sigma",
-        "σ",
-        "err",
-        "error",
-        "±",
-        "+/-",
-        "+-",
-        "uncertainty",
-        "delta",
-        "δ",
-        "ci",
-        "ci95",
-        "95%",
-        "confidence",
-        "standard",
-        "uk",
-        "ut"
+    /** Words and their beginnings that speak of an uncertainty without saying which. */
+    private static final List<String> UNCLEAR_WORDS =
+            List.of("u", "uk", "ut", "s", "sk", "sd", "se", "std", "err", "kerr", "unc", "ci", "dk", "σ", "δ", "δk");
+
+    private static final String[] UNCLEAR_BEGINNINGS = {
+        "uncert", "error", "deviat", "stdev", "stddev", "stderr", "sigma", "confid"
     };
+
+    private static final Heading UNCLEAR = new Heading(Kind.UNCLEAR_UNCERTAINTY, null, true);
 
     private HeadingParser() {}
 
@@ -94,16 +80,43 @@ final class HeadingParser {
             if (lower.startsWith(name.text()) && isMeant(text, name)) {
                 Heading read = rest(text.substring(name.text().length()), name.kind());
                 if (read != null) {
-                    return read;
+                    // "k error" is not k in units of error.
+                    boolean value = read.kind() == Kind.TEMPERATURE || read.kind() == Kind.RATE;
+                    return value && !read.certain() && mentionsUncertainty(lower) ? UNCLEAR : read;
                 }
             }
         }
-        for (String unclear : UNCLEAR) {
-            if (lower.startsWith(unclear) && endsThere(lower, unclear)) {
-                return new Heading(Kind.UNCLEAR_UNCERTAINTY, null, true);
+        return mentionsUncertainty(lower) ? UNCLEAR : Heading.OTHER;
+    }
+
+    /** Whether a word before the unit speaks of an uncertainty. */
+    private static boolean mentionsUncertainty(String lower) {
+        int start = 0;
+        for (int i = 0; i <= lower.length(); i++) {
+            boolean letter = i < lower.length() && Character.isLetter(lower.charAt(i));
+            if (!letter) {
+                // "u(k)" and "s (k)" are functions; "note / s" and "time (s)" have a unit.
+                String word = lower.substring(start, i);
+                boolean alone = word.length() > 2 || start == 0;
+                if ((alone && UNCLEAR_WORDS.contains(word)) || beginsUnclear(word)) {
+                    return true;
+                }
+                if (i < lower.length() && lower.charAt(i) == '±') {
+                    return true;
+                }
+                start = i + 1;
             }
         }
-        return Heading.OTHER;
+        return false;
+    }
+
+    private static boolean beginsUnclear(String word) {
+        for (String beginning : UNCLEAR_BEGINNINGS) {
+            if (word.startsWith(beginning)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     /** A capital U is an expanded uncertainty; u(k)/K is a unit, not a ratio. */
@@ -167,6 +180,9 @@ final class HeadingParser {
         if (first == ',') {
             return new Heading(kind, text.substring(1).strip(), false);
         }
+        if (first == '°') {
+            return new Heading(kind, text, false);
+        }
         if (text.startsWith("in ")) {
             return new Heading(kind, text.substring(3).strip(), false);
         }
@@ -189,12 +205,5 @@ final class HeadingParser {
             }
         }
         return false;
-    }
-
-    private static boolean endsThere(String lower, String word) {
-        char last = word.charAt(word.length() - 1);
-        return !Character.isLetterOrDigit(last)
-                || lower.length() == word.length()
-                || !Character.isLetterOrDigit(lower.charAt(word.length()));
     }
 }

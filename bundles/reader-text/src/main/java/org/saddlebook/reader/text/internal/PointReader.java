@@ -92,7 +92,7 @@ final class PointReader {
             problems.add(
                     "below-absolute-zero",
                     problems.place(row.line(), column.heading()),
-                    ColumnPlan.quoted(row.cell(column)) + " " + column.unit().code(),
+                    Problems.quoted(row.cell(column)) + " " + column.unit().code(),
                     "a temperature above 0 K",
                     "check the value and the unit in the header");
             return Double.NaN;
@@ -108,7 +108,7 @@ final class PointReader {
             problems.add(
                     "not-positive",
                     problems.place(row.line(), column.heading()),
-                    ColumnPlan.quoted(row.cell(column)),
+                    Problems.quoted(row.cell(column)),
                     "a rate constant above zero",
                     "remove the row, or exclude it with a reason and a positive value: its logarithm is fitted");
             return Double.NaN;
@@ -132,7 +132,7 @@ final class PointReader {
             problems.add(
                     "not-positive",
                     problems.place(row.line(), column.heading()),
-                    ColumnPlan.quoted(row.cell(column)),
+                    Problems.quoted(row.cell(column)),
                     "a standard uncertainty above zero",
                     "state the uncertainty, or remove the whole column when it is not known");
             return Double.NaN;
@@ -163,7 +163,7 @@ final class PointReader {
         problems.add(
                 "number-out-of-range",
                 problems.place(row.line(), column.heading()),
-                ColumnPlan.quoted(row.cell(column)) + " " + column.unit().code(),
+                Problems.quoted(row.cell(column)) + " " + column.unit().code(),
                 "a number between 5e-324 and 1.8e308 in SI units",
                 "check the exponent and the unit in the header");
         return Double.NaN;
@@ -176,7 +176,7 @@ final class PointReader {
             problems.add(
                     "exclusion-without-reason",
                     problems.place(row.line(), column.heading()),
-                    ColumnPlan.quoted(reason),
+                    Problems.quoted(reason),
                     "the reason why the row is excluded, or nothing when it is used",
                     "write the reason in words, or leave the cell empty");
         }

@@ -1,6 +1,7 @@
 package org.saddlebook.reader.text.internal;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.api.problem.Place;
@@ -10,6 +11,17 @@ import org.saddlebook.units.api.UnitException;
 /** The problems of one file, in order; after the first {@value #LIMIT} they are counted only. */
 final class Problems {
     static final int LIMIT = 50;
+
+    private static final int LONGEST_QUOTE = 80;
+
+    /** Those of the whole file first. */
+    private static final Comparator<Problem> BY_LINE = new Comparator<>() {
+        @Override
+        public int compare(Problem one, Problem other) {
+            return Integer.compare(
+                    one.place().line().orElse(0), other.place().line().orElse(0));
+        }
+    };
 
     private final String file;
     private final List<Problem> list = new ArrayList<>();
@@ -43,6 +55,14 @@ final class Problems {
         add(cause.code(), place, cause.found(), cause.expected(), cause.remedy());
     }
 
+    /** A text of the file in double quotes, cut when it is long. */
+    static String quoted(String text) {
+        String stripped = text.strip();
+        return stripped.length() > LONGEST_QUOTE
+                ? "\"" + stripped.substring(0, LONGEST_QUOTE) + "…\""
+                : "\"" + stripped + "\"";
+    }
+
     boolean isEmpty() {
         return list.isEmpty();
     }
@@ -52,6 +72,7 @@ final class Problems {
         if (list.isEmpty()) {
             return;
         }
+        list.sort(BY_LINE);
         if (further > 0) {
             list.add(new Problem(
                     "more-problems",

@@ -62,7 +62,7 @@ final class SeparatorChoice {
         throw problems.fatal(
                 "no-separator",
                 problems.place(header.number()),
-                "\"" + header.text().strip() + "\"",
+                Problems.quoted(header.text()),
                 "column names separated by commas, semicolons or tabs",
                 "separate the columns by semicolons or tabs, in the header and in every row");
     }

@@ -59,10 +59,11 @@ final class TableReader {
         return new RateTable(unit, order.orElseThrow(), points);
     }
 
-    /** Rows with as many cells as the header, or fewer problems when one cause explains them all. */
+    /** The rows with as many cells as the header; the others are problems, or one when one cause explains them. */
     private List<Row> rows(List<Line> table, Separator separator, List<String> header) {
         List<Row> rows = new ArrayList<>(table.size());
-        boolean commaReported = false;
+        List<Ragged> ragged = new ArrayList<>();
+        int digits = 0;
         for (int i = 1; i < table.size(); i++) {
             Line line = table.get(i);
             List<String> cells = separator.cells(line.text());
@@ -73,30 +74,46 @@ final class TableReader {
             cells = withoutPadding(cells, header.size());
             if (cells.size() == header.size()) {
                 rows.add(new Row(line.number(), cells));
-            } else if (separator == Separator.COMMA && cells.size() > header.size() && areDigits(cells)) {
-                if (!commaReported) {
-                    problems.add(
-                            "decimal-comma",
-                            problems.place(line.number()),
-                            "\"" + line.text().strip() + "\", " + cells.size() + " cells under " + header.size()
-                                    + " column names",
-                            "commas between columns only, or decimal commas only",
-                            "separate the columns by semicolons or tabs, or write numbers with a decimal point");
-                }
-                commaReported = true;
             } else {
-                problems.add(
-                        "ragged-row",
-                        problems.place(line.number()),
-                        cells.size() + (cells.size() == 1 ? " cell" : " cells"),
-                        header.size() + " cells, one for each column name",
-                        cells.size() < header.size()
-                                ? "add what is missing, or an empty cell for it"
-                                : "remove what is too much, or put a text that contains the separator in double"
-                                        + " quotes");
+                boolean decimals = separator == Separator.COMMA && cells.size() > header.size() && areDigits(cells);
+                ragged.add(new Ragged(line, cells.size(), decimals));
+                digits += decimals ? 1 : 0;
+            }
+        }
+        // Too many numbers between commas in most rows: these are decimal commas.
+        if (digits * 2 > ragged.size() + rows.size()) {
+            Ragged first = ragged.get(0);
+            problems.add(
+                    "decimal-comma",
+                    problems.place(first.line().number()),
+                    Problems.quoted(first.line().text()) + ": " + first.cells() + " cells under " + header.size()
+                            + " column names",
+                    "commas between columns only, or decimal commas only",
+                    "separate the columns by semicolons or tabs, or write numbers with a decimal point");
+        } else {
+            for (Ragged row : ragged) {
+                refuseRagged(row, header.size());
             }
         }
         return rows;
+    }
+
+    /** A line with another number of cells than the header; whether its commas may be decimal ones. */
+    private record Ragged(Line line, int cells, boolean decimals) {}
+
+    private void refuseRagged(Ragged row, int width) {
+        String remedy = "remove what is too much, or put a text that contains the separator in double quotes";
+        if (row.cells() < width) {
+            remedy = "add what is missing, or an empty cell for it";
+        } else if (row.decimals()) {
+            remedy = "remove what is too much, or separate the columns by semicolons when these are decimal commas";
+        }
+        problems.add(
+                "ragged-row",
+                problems.place(row.line().number()),
+                Problems.quoted(row.line().text()) + ": " + row.cells() + (row.cells() == 1 ? " cell" : " cells"),
+                width + " cells, one for each column name",
+                remedy);
     }
 
     private static List<String> withoutPadding(List<String> cells, int width) {
@@ -127,7 +144,7 @@ final class TableReader {
         throw problems.fatal(
                 "missing-header",
                 problems.place(line.number()),
-                "\"" + line.text().strip() + "\", numbers in the first line",
+                Problems.quoted(line.text()) + ", numbers in the first line",
                 "a line with column names and units",
                 "add a first line such as \"T (K);k (1/s)\"");
     }
@@ -226,7 +243,7 @@ final class TableReader {
         problems.add(
                 "unclosed-quote",
                 problems.place(line.number()),
-                "\"" + line.text().strip() + "\"",
+                Problems.quoted(line.text()),
                 "double quotes that enclose a whole cell and close on the same line",
                 "close the quotes, and write a double quote inside them twice");
     }

@@ -5,6 +5,7 @@ import java.nio.charset.CharacterCodingException;
 import java.nio.charset.Charset;
 import java.nio.charset.CodingErrorAction;
 import java.nio.charset.StandardCharsets;
+import java.util.Locale;
 import org.saddlebook.api.problem.InputException;
 
 /** Bytes to text. What is not text in UTF-8, UTF-16 or Windows-1252 is refused; no character is replaced. */
@@ -19,6 +20,9 @@ final class TextDecoder {
 
     private static final String REMEDY =
             "save the table as text in UTF-8, with columns separated by commas," + " semicolons or tabs";
+
+    /** Fewer bytes show no pattern. */
+    private static final int SHORTEST_UTF16 = 8;
 
     private TextDecoder() {}
 
@@ -67,11 +71,12 @@ final class TextDecoder {
             }
         }
         // Tables are nearly all ASCII: one byte of each pair is zero in most pairs, and the other never.
-        int most = length / 2 * 7 / 10;
-        if (length >= 4 && oddZeros >= most && evenZeros == 0) {
+        int most = length / 2 * 8 / 10;
+        boolean candidate = length >= SHORTEST_UTF16 && length % 2 == 0;
+        if (candidate && oddZeros >= most && evenZeros == 0) {
             return -1;
         }
-        return length >= 4 && evenZeros >= most && oddZeros == 0 ? 1 : 0;
+        return candidate && evenZeros >= most && oddZeros == 0 ? 1 : 0;
     }
 
     private static Decoded detected(byte[] bytes, Problems problems) throws InputException {
@@ -168,7 +173,7 @@ final class TextDecoder {
 
     private static String hex(char c) {
         String digits = Integer.toHexString(c);
-        return "0000".substring(digits.length()) + digits.toUpperCase(java.util.Locale.ROOT);
+        return "0000".substring(digits.length()) + digits.toUpperCase(Locale.ROOT);
     }
 
     private static InputException wrong(String found, Problems problems) {

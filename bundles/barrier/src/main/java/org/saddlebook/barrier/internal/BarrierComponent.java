@@ -25,6 +25,7 @@ import org.saddlebook.api.problem.Problem;
 import org.saddlebook.api.service.Prediction;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Task;
+import org.saddlebook.barrier.api.FittedLaws;
 
 /** The barrier analysis and predictions from its findings, over whatever rate models are installed at the moment. */
 @Component
@@ -79,7 +80,7 @@ public final class BarrierComponent implements Analysis, Prediction {
                         "findings of an evaluated rate table",
                         "Evaluate a campaign that has a rate table and predict from its findings.")));
         try {
-            StoredLaws laws = new StoredLaws((Node.Group) section.body());
+            StoredLaws laws = new StoredLaws(FittedLaws.of(section));
             List<Node> rows = new ArrayList<>();
             for (String id : models.isEmpty() ? laws.ids() : models) {
                 if (!laws.ids().contains(id)) {

@@ -140,7 +140,7 @@ final class BarrierEvaluation {
                     notes.add(plausibility.hint(law, law.parameter(i), choices.level()));
                 }
             }
-            return new Computed(law, nodes.fitted(law), rows, notes);
+            return new Computed(law, nodes.fitted(law, context.fixed()), rows, notes);
         });
         if (answer instanceof Contained.Answer<Computed> given) {
             Computed computed = given.value();

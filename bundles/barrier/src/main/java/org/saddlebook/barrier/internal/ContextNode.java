@@ -8,10 +8,10 @@ import org.saddlebook.units.api.UnitException;
 import org.saddlebook.units.api.Units;
 
 /** Writes and reads the context that every law was bound to. */
-final class ContextNode {
+public final class ContextNode {
     private ContextNode() {}
 
-    static Node.Group of(RateContext context, boolean assumedStandard) {
+    public static Node.Group of(RateContext context, boolean assumedStandard) {
         boolean pressure = context.standard().kind() == StandardState.Kind.PRESSURE;
         return new Tree()
                 .put("rateUnit", context.rateUnit().code())
@@ -25,7 +25,7 @@ final class ContextNode {
     }
 
     /** The context written by {@link #of}; throws {@link IllegalArgumentException} for a group that is not one. */
-    static RateContext read(Node.Group group) {
+    public static RateContext read(Node.Group group) {
         Node.Quantity standard = TreeReader.quantity(group, "standardState");
         Unit unit;
         try {

@@ -5,10 +5,12 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.TreeMap;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.model.Derived;
 import org.saddlebook.api.model.Parameter;
 import org.saddlebook.api.quantity.Unit;
+import org.saddlebook.barrier.api.FittedLaws;
 
 /** Writes one member of {@code barrier.models}. */
 final class LawNode {
@@ -35,8 +37,12 @@ final class LawNode {
                 .group();
     }
 
-    /** A fitted law. */
-    Node.Group fitted(FittedLaw law) {
+    /**
+     * A fitted law.
+     *
+     * @param heldParameters parameters that were held, in the form handed to the law
+     */
+    Node.Group fitted(FittedLaw law, Map<String, Double> heldParameters) {
         Quantities quantities = Quantities.of(law.degreesOfFreedom(), level);
         Map<String, Node> parameters = new LinkedHashMap<>();
         for (int i = 0; i < law.parameters().size(); i++) {
@@ -65,9 +71,19 @@ final class LawNode {
                 .put("parameters", new Node.Group(parameters))
                 .put("derived", new Node.Group(derived))
                 .put("derivedAt", Node.Quantity.of(centreKelvin, "K"));
+        List<String> basis = new ArrayList<>();
+        for (Parameter parameter : law.parameters()) {
+            basis.add((logarithm(parameter) ? FittedLaws.LOGARITHM : "") + parameter.symbol());
+        }
+        tree.put("basis", Tree.texts(basis));
+        if (!heldParameters.isEmpty()) {
+            Tree held = new Tree();
+            new TreeMap<>(heldParameters).forEach(held::put);
+            tree.put("held", held.group());
+        }
         double[][] covariance = law.covariance();
         if (covariance.length > 0) {
-            tree.put("covariance", covariance(law, covariance));
+            tree.put("covariance", covariance(law, basis, covariance));
             tree.put("newRunScatter", law.newRunScatter());
         }
         return tree.put("statistics", new FitStatistics(law).node()).group();
@@ -84,13 +100,10 @@ final class LawNode {
                         <= quantile * Math.sqrt(estimate.variance().getAsDouble());
     }
 
-    private static Node.Group covariance(FittedLaw law, double[][] matrix) {
-        List<String> basis = new ArrayList<>();
+    private static Node.Group covariance(FittedLaw law, List<String> basis, double[][] matrix) {
         List<String> units = new ArrayList<>();
         for (Parameter parameter : law.parameters()) {
-            boolean logarithm = parameter.scale() == Parameter.Scale.LOG;
-            basis.add((logarithm ? "ln " : "") + parameter.symbol());
-            units.add(logarithm ? "1" : parameter.unit().code());
+            units.add(logarithm(parameter) ? "1" : parameter.unit().code());
         }
         double[][] inUnits = new double[matrix.length][matrix.length];
         for (int i = 0; i < matrix.length; i++) {
@@ -111,6 +124,10 @@ final class LawNode {
 
     private static double factor(FittedLaw law, int i) {
         Parameter parameter = law.parameters().get(i);
-        return parameter.scale() == Parameter.Scale.LOG ? 1 : parameter.unit().factor();
+        return logarithm(parameter) ? 1 : parameter.unit().factor();
+    }
+
+    private static boolean logarithm(Parameter parameter) {
+        return parameter.scale() == Parameter.Scale.LOG;
     }
 }

@@ -257,6 +257,22 @@ class BarrierEvaluationTest {
     }
 
     @Test
+    void aLawWithAHeldParameterPredictsFromFindingsToo() throws InputException {
+        Choices choices = Choices.defaults()
+                .withTargetsKelvin(List.of(300.0))
+                .withModels(List.of("modified-arrhenius"))
+                .withFixed(Map.of("modified-arrhenius/n", 0.5));
+        Section section = Bench.section(arrhenius(SCATTER), choices);
+        Node.Group first = (Node.Group)
+                TreeReader.items((Node.Group) section.body(), "predictions").get(0);
+        Node.Group again = (Node.Group)
+                BarrierComponent.predict(Bench.findings(section), List.of(300.0), List.of(), Bench.models())
+                        .get(0);
+        double k = TreeReader.quantity(first, "k").value().orElseThrow();
+        assertEquals(k, TreeReader.quantity(again, "k").value().orElseThrow(), 1e-10 * k);
+    }
+
+    @Test
     void aHintFromTheEntropyNeedsItsConditions() {
         RateTable table = arrhenius(SCATTER);
         assertTrue(hint(table, Choices.defaults()).contains("not stated that the constant belongs to an elementary"));

@@ -1,0 +1,198 @@
+package org.saddlebook.barrier.api;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import org.saddlebook.api.findings.Node;
+import org.saddlebook.api.findings.Section;
+import org.saddlebook.api.model.FittedModel;
+import org.saddlebook.api.model.RateContext;
+import org.saddlebook.api.quantity.Unit;
+import org.saddlebook.barrier.internal.ContextNode;
+import org.saddlebook.barrier.internal.TreeReader;
+import org.saddlebook.units.api.UnitException;
+import org.saddlebook.units.api.Units;
+
+/**
+ * The fitted laws of a section {@code barrier}, read back from findings: whoever has the findings needs neither the
+ * measurements nor the bundles of then. Temperatures in K.
+ */
+public final class FittedLaws {
+    /** Marks a member of the basis that stands for the natural logarithm of the parameter's SI value. */
+    public static final String LOGARITHM = "ln ";
+
+    private final RateContext context;
+    private final double lowestKelvin;
+    private final double highestKelvin;
+    private final double centreKelvin;
+    private final double level;
+    private final boolean stated;
+    private final List<FittedLawView> laws;
+    private final List<String> candidates;
+
+    /**
+     * One fitted law.
+     *
+     * @param id id of the rate model
+     * @param title name of the law
+     * @param fitted estimates, covariance, degrees of freedom
+     * @param newRunScatter standard deviation in ln k of one more run; absent when the scale of the errors is unknown
+     */
+    public record FittedLawView(String id, String title, FittedModel fitted, OptionalDouble newRunScatter) {}
+
+    private FittedLaws(Node.Group body) {
+        context = ContextNode.read(TreeReader.group(body, "context"));
+        Node.Group table = TreeReader.group(body, "table");
+        lowestKelvin = kelvin(table, "lowest");
+        highestKelvin = kelvin(table, "highest");
+        centreKelvin = kelvin(table, "centre");
+        level = TreeReader.number(body, "level");
+        stated = TreeReader.text(body, "errorModel").equals("stated");
+        List<FittedLawView> read = new ArrayList<>();
+        for (Node model : TreeReader.items(body, "models")) {
+            if (model instanceof Node.Group group
+                    && TreeReader.text(group, "outcome").equals("fitted")) {
+                read.add(law(group));
+            }
+        }
+        laws = List.copyOf(read);
+        List<String> ids = new ArrayList<>();
+        if (body.get("comparison").isPresent()) {
+            for (Node id : TreeReader.items(TreeReader.group(body, "comparison"), "candidates")) {
+                ids.add(((Node.Text) id).value());
+            }
+        }
+        candidates = List.copyOf(ids);
+    }
+
+    /**
+     * The laws of a section.
+     *
+     * @throws IllegalArgumentException when the section is not one that the barrier analysis wrote, or was refused
+     */
+    public static FittedLaws of(Section barrier) {
+        if (!(barrier.body() instanceof Node.Group group)) {
+            throw new IllegalArgumentException("the section is no group");
+        }
+        return new FittedLaws(group);
+    }
+
+    /** Every fitted law, in order of the findings. */
+    public List<FittedLawView> laws() {
+        return laws;
+    }
+
+    /** The fitted law with this id. */
+    public Optional<FittedLawView> law(String id) {
+        return laws.stream().filter(law -> law.id().equals(id)).findFirst();
+    }
+
+    /** Ids of the laws that the comparison left standing; more than one when they cannot be told apart. */
+    public List<String> candidates() {
+        return candidates;
+    }
+
+    /** The first law left standing that has a covariance, else the first that has one; empty when none has. */
+    public Optional<FittedLawView> preferred() {
+        return laws.stream()
+                .filter(law -> law.fitted().hasCovariance() && candidates.contains(law.id()))
+                .findFirst()
+                .or(() -> laws.stream()
+                        .filter(law -> law.fitted().hasCovariance())
+                        .findFirst());
+    }
+
+    /** The context every law was bound to, without held parameters. */
+    public RateContext context() {
+        return context;
+    }
+
+    /** Lowest measured temperature that was used, K. */
+    public double lowestKelvin() {
+        return lowestKelvin;
+    }
+
+    /** Highest measured temperature that was used, K. */
+    public double highestKelvin() {
+        return highestKelvin;
+    }
+
+    /** Centre of the table, K: where slope and intercept are uncorrelated. */
+    public double centreKelvin() {
+        return centreKelvin;
+    }
+
+    /** Coverage probability of the section's intervals. */
+    public double level() {
+        return level;
+    }
+
+    /** Whether the covariance rests on stated uncertainties (normal quantiles), not on the scatter (t quantiles). */
+    public boolean stated() {
+        return stated;
+    }
+
+    private FittedLawView law(Node.Group group) {
+        String id = TreeReader.text(group, "id");
+        Node.Group parameters = TreeReader.group(group, "parameters");
+        List<String> symbols = new ArrayList<>();
+        List<Node> basis = TreeReader.items(group, "basis");
+        double[] values = new double[basis.size()];
+        double[] factors = new double[values.length];
+        for (int i = 0; i < values.length; i++) {
+            String name = ((Node.Text) basis.get(i)).value();
+            boolean logarithm = name.startsWith(LOGARITHM);
+            String symbol = logarithm ? name.substring(LOGARITHM.length()) : name;
+            Node.Quantity quantity = TreeReader.quantity(parameters, symbol);
+            Unit unit = unit(quantity.unit());
+            double si = unit.toSi(quantity.value()
+                    .orElseThrow(() -> new IllegalArgumentException(
+                            "parameter “" + symbol + "” of " + id + " is beyond the range of numbers")));
+            symbols.add(symbol);
+            values[i] = logarithm ? StrictMath.log(si) : si;
+            factors[i] = logarithm ? 1 : unit.factor();
+        }
+        double[][] covariance = new double[0][];
+        if (group.get("covariance").isPresent()) {
+            covariance = TreeReader.member(TreeReader.group(group, "covariance"), "matrix", Node.Matrix.class)
+                    .toArray();
+            for (int i = 0; i < covariance.length; i++) {
+                for (int j = 0; j < covariance.length; j++) {
+                    covariance[i][j] *= factors[i] * factors[j];
+                }
+            }
+        }
+        OptionalDouble scatter = group.get("newRunScatter").isPresent()
+                ? OptionalDouble.of(TreeReader.number(group, "newRunScatter"))
+                : OptionalDouble.empty();
+        double dof = TreeReader.number(TreeReader.group(group, "statistics"), "dof");
+        FittedModel fitted = new FittedModel(
+                id, held(group), symbols, values, covariance, stated ? OptionalDouble.empty() : OptionalDouble.of(dof));
+        return new FittedLawView(id, TreeReader.text(group, "title"), fitted, scatter);
+    }
+
+    /** The context with the parameters that were held in this fit. */
+    private RateContext held(Node.Group group) {
+        RateContext own = context;
+        if (group.get("held").isPresent()) {
+            Node.Group held = TreeReader.group(group, "held");
+            for (String symbol : held.members().keySet()) {
+                own = own.withFixed(symbol, TreeReader.number(held, symbol));
+            }
+        }
+        return own;
+    }
+
+    private static double kelvin(Node.Group table, String key) {
+        return TreeReader.quantity(table, key).value().orElseThrow();
+    }
+
+    private static Unit unit(String code) {
+        try {
+            return Units.parse(code);
+        } catch (UnitException unreadable) {
+            throw new IllegalArgumentException(unreadable.getMessage(), unreadable);
+        }
+    }
+}

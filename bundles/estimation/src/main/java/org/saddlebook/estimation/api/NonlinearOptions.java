@@ -4,7 +4,15 @@ import java.util.Objects;
 
 /** How to search for the minimum of a non-linear fit. Immutable; start from {@link #defaults()}. */
 public final class NonlinearOptions {
-    private static final NonlinearOptions DEFAULTS = new NonlinearOptions(2000, true, null, null, () -> {});
+    private static final NonlinearOptions DEFAULTS = new NonlinearOptions(2000, true, null, null, new NeverCancelled());
+
+    /** A class, not a lambda: the first lambda of a process costs milliseconds. */
+    private static final class NeverCancelled implements Runnable {
+        @Override
+        public void run() {
+            // nothing to check
+        }
+    }
 
     private final int maximumIterations;
     private final boolean thorough;

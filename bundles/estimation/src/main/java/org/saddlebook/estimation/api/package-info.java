@@ -1,6 +1,35 @@
 /**
- * Least squares a reviewer can trust: estimates, covariances, quantiles and confidence sets, to known digits and the
- * same bits on every machine. Knows nothing of chemistry and of no other bundle.
+ * Least squares a reviewer can trust: estimates, covariances, quantiles and confidence sets, to known digits and the same
+ * bits on every machine. Knows nothing of chemistry and uses no other bundle.
+ *
+ * <p><b>Start here.</b> {@link org.saddlebook.estimation.api.LinearLeastSquares} when the response is linear in the
+ * parameters, {@link org.saddlebook.estimation.api.NonlinearLeastSquares} when it is not. Both return a sealed outcome:
+ * the fit, or a named reason why there is none; data never cause an exception, only input that no data file can hold (NaN,
+ * negative weights, lengths that disagree) does, as an {@link java.lang.IllegalArgumentException} naming place and value.
+ * Whatever the kind, a {@link org.saddlebook.estimation.api.Fit} answers the same questions.
+ *
+ * <pre>{@code
+ * LinearOutcome outcome = LinearLeastSquares.fit(new double[][] {{1, 0}, {1, 1}, {1, 2}, {1, 3}},
+ *         new double[] {1, 3, 4, 4}, null);
+ * if (outcome instanceof LinearFit fit) {
+ *     double t = StudentT.quantile(0.975, fit.degreesOfFreedom());
+ *     double half = t * Math.sqrt(fit.residualVariance() * fit.unscaledCovariance()[1][1]);
+ *     System.out.println("slope " + fit.parameters()[1] + " +/- " + half);
+ * }
+ * }</pre>
+ *
+ * <p><b>Weights and scale.</b> A weight multiplies a squared residual. With weights of one over a stated variance,
+ * {@code unscaledCovariance()} is the covariance, the residual sum of squares is a chi-squared and quantiles are
+ * {@link org.saddlebook.estimation.api.Normal}'s. With weights known up to a factor, multiply by
+ * {@code residualVariance()} and take the quantiles of {@link org.saddlebook.estimation.api.StudentT}. The engine never
+ * chooses between the two.
+ *
+ * <p><b>Ratios.</b> {@link org.saddlebook.estimation.api.Fieller} gives the set of ratios the data allow, whatever its
+ * kind. <b>Comparison.</b> {@link org.saddlebook.estimation.api.InformationCriteria} and
+ * {@link org.saddlebook.estimation.api.FisherF}.
+ *
+ * <p><b>Same bits everywhere.</b> Elementary functions are those of {@link java.lang.StrictMath}, sums run in a fixed
+ * order, nothing is random and nothing runs in another thread. Everything returned is immutable and thread-safe.
  */
 @Export
 @Version("1.0.0")

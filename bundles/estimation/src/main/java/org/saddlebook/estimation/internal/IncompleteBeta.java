@@ -4,7 +4,7 @@ package org.saddlebook.estimation.internal;
  * Regularised incomplete beta function by its continued fraction (DLMF 8.17.22) in Lentz's evaluation, both tails without
  * cancellation. Holds the last evaluation: value, complement and the derivative a quantile search needs.
  */
-public final class IncompleteBeta {
+public final class IncompleteBeta implements QuantileSearch.Tails {
     private static final double TINY = 1e-300;
     private static final int LIMIT = 1_000_000;
 
@@ -54,6 +54,12 @@ public final class IncompleteBeta {
         return hold(1 - value, value, density);
     }
 
+    /** Moves to the x whose odds {@code x / y} are given. */
+    @Override
+    public void move(double odds) {
+        at(odds / (1 + odds), 1 / (1 + odds));
+    }
+
     private IncompleteBeta hold(double below, double above, double density) {
         lower = below;
         upper = above;
@@ -89,16 +95,19 @@ public final class IncompleteBeta {
     }
 
     /** {@code I_x(a, b)}. */
+    @Override
     public double lower() {
         return lower;
     }
 
     /** {@code 1 - I_x(a, b)}. */
+    @Override
     public double upper() {
         return upper;
     }
 
     /** {@code dI / d ln(x / y)}. */
+    @Override
     public double slope() {
         return slope;
     }

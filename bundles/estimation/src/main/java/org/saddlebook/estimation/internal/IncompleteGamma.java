@@ -1,7 +1,7 @@
 package org.saddlebook.estimation.internal;
 
 /** Regularised incomplete gamma function: series (DLMF 8.11.4) and continued fraction (DLMF 8.9.2), both tails. Holds the last evaluation. */
-public final class IncompleteGamma {
+public final class IncompleteGamma implements QuantileSearch.Tails {
     private static final double TINY = 1e-300;
     private static final int LIMIT = 1_000_000;
 
@@ -70,6 +70,11 @@ public final class IncompleteGamma {
         return hold(1 - value, value, density * a);
     }
 
+    @Override
+    public void move(double x) {
+        at(x);
+    }
+
     private IncompleteGamma hold(double below, double above, double derivative) {
         lower = below;
         upper = above;
@@ -78,16 +83,19 @@ public final class IncompleteGamma {
     }
 
     /** {@code P(a, x)}. */
+    @Override
     public double lower() {
         return lower;
     }
 
     /** {@code Q(a, x) = 1 - P(a, x)}. */
+    @Override
     public double upper() {
         return upper;
     }
 
     /** {@code dP / d ln x}. */
+    @Override
     public double slope() {
         return slope;
     }

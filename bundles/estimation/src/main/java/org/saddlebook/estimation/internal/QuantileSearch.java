@@ -11,43 +11,48 @@ final class QuantileSearch {
 
     private QuantileSearch() {}
 
-    /** One evaluation of a tail. */
-    interface Tail {
-        /**
-         * Evaluates the tail.
-         *
-         * @param x positive argument
-         * @param result receives the probability and its absolute derivative with respect to ln x
-         */
-        void at(double x, double[] result);
+    /** A distribution on the positive numbers. */
+    interface Tails {
+        /** Moves to an argument. */
+        void move(double x);
+
+        /** Probability below the argument. */
+        double lower();
+
+        /** Probability above the argument. */
+        double upper();
+
+        /** Density with respect to the logarithm of the argument. */
+        double slope();
     }
 
     /**
-     * Finds x with a tail of the given probability.
+     * Finds the argument below (or above) which the given probability lies.
      *
-     * @param tail the tail
-     * @param rising whether the tail grows with x
+     * @param tails the distribution
+     * @param below whether the probability is the one below
      * @param probability wanted, above zero
      * @param start positive guess
      */
-    static double solve(Tail tail, boolean rising, double probability, double start) {
-        double[] at = new double[2];
+    static double solve(Tails tails, boolean below, double probability, double start) {
         double x = start;
         double known = start;
         for (int i = 0; i < LIMIT; i++) {
-            tail.at(x, at);
-            if (!(at[0] > 0 && at[1] > 0)) {
+            tails.move(x);
+            double tail = below ? tails.lower() : tails.upper();
+            double slope = tails.slope();
+            if (!(tail > 0 && slope > 0)) {
                 // Underflow: the step went too far out; back half-way to where there was a value.
                 if (x == known) {
-                    x *= rising ? 2 : HALF;
+                    x *= below ? 2 : HALF;
                     known = x;
                 } else {
                     x = Math.sqrt(x) * Math.sqrt(known);
                 }
                 continue;
             }
-            double step = StrictMath.log(at[0] / probability) * at[0] / at[1];
-            step = Math.max(-LARGEST_STEP, Math.min(LARGEST_STEP, rising ? -step : step));
+            double step = StrictMath.log(tail / probability) * tail / slope;
+            step = Math.max(-LARGEST_STEP, Math.min(LARGEST_STEP, below ? -step : step));
             known = x;
             x = Math.max(Double.MIN_NORMAL, Math.min(Double.MAX_VALUE, x * StrictMath.exp(step)));
             if (Math.abs(step) < 1e-9) {

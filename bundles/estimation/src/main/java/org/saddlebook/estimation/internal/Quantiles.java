@@ -20,57 +20,21 @@ public final class Quantiles {
 
     /** x with {@code P(a, x) = lower}. */
     public static double gammaLower(double a, double lower, double start) {
-        IncompleteGamma function = new IncompleteGamma(a);
-        return QuantileSearch.solve(
-                (x, result) -> {
-                    function.at(x);
-                    result[0] = function.lower();
-                    result[1] = function.slope();
-                },
-                true,
-                lower,
-                start);
+        return QuantileSearch.solve(new IncompleteGamma(a), true, lower, start);
     }
 
     /** x with {@code Q(a, x) = upper}. */
     public static double gammaUpper(double a, double upper, double start) {
-        IncompleteGamma function = new IncompleteGamma(a);
-        return QuantileSearch.solve(
-                (x, result) -> {
-                    function.at(x);
-                    result[0] = function.upper();
-                    result[1] = function.slope();
-                },
-                false,
-                upper,
-                start);
+        return QuantileSearch.solve(new IncompleteGamma(a), false, upper, start);
     }
 
     /** Odds {@code r = x / y} with {@code I_x(a, b) = lower}, x = r / (1 + r). */
     public static double betaOddsLower(double a, double b, double lower, double start) {
-        IncompleteBeta function = new IncompleteBeta(a, b);
-        return QuantileSearch.solve(
-                (r, result) -> {
-                    function.at(r / (1 + r), 1 / (1 + r));
-                    result[0] = function.lower();
-                    result[1] = function.slope();
-                },
-                true,
-                lower,
-                start);
+        return QuantileSearch.solve(new IncompleteBeta(a, b), true, lower, start);
     }
 
     /** Odds {@code r = x / y} with {@code 1 - I_x(a, b) = upper}. */
     public static double betaOddsUpper(double a, double b, double upper, double start) {
-        IncompleteBeta function = new IncompleteBeta(a, b);
-        return QuantileSearch.solve(
-                (r, result) -> {
-                    function.at(r / (1 + r), 1 / (1 + r));
-                    result[0] = function.upper();
-                    result[1] = function.slope();
-                },
-                false,
-                upper,
-                start);
+        return QuantileSearch.solve(new IncompleteBeta(a, b), false, upper, start);
     }
 }

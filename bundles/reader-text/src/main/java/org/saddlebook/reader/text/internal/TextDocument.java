@@ -70,12 +70,21 @@ record TextDocument(List<Line> table, List<Directive> directives, boolean blank)
 
     private static void addDirective(String comment, int line, List<Directive> directives, Problems problems) {
         int colon = comment.indexOf(':');
-        boolean separated = colon > 0 && (colon + 1 == comment.length() || comment.charAt(colon + 1) == ' ');
-        if (!separated || colon > LONGEST_KEY) {
+        if (colon <= 0 || colon > LONGEST_KEY || !isKeyEnd(comment, colon)) {
             return;
         }
         String key = collapse(comment.substring(0, colon)).toLowerCase(Locale.ROOT);
         directives.add(new Directive(key, comment.substring(colon + 1).strip(), problems.place(line)));
+    }
+
+    /** Not the colon of an address, a path or a time of day. */
+    private static boolean isKeyEnd(String comment, int colon) {
+        char before = comment.charAt(colon - 1);
+        char after = colon + 1 < comment.length() ? comment.charAt(colon + 1) : ' ';
+        return Character.isLetter(comment.charAt(0))
+                && after != '/'
+                && after != '\\'
+                && !(Character.isDigit(before) && Character.isDigit(after));
     }
 
     /** Single spaces, none at the ends. */

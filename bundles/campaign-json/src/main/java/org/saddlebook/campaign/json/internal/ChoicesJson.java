@@ -114,7 +114,11 @@ final class ChoicesJson {
         Choices choices = before;
         Optional<JsonCursor> molecularity = at.optional("molecularity");
         if (molecularity.isPresent()) {
-            choices = choices.withMolecularity(positive(molecularity.get(), "a molecularity above zero"));
+            double order = molecularity.get().number();
+            if (!(order >= 0)) {
+                throw molecularity.get().wrongValue("an order, for example 1 or 2");
+            }
+            choices = choices.withMolecularity(order);
         }
         Optional<JsonCursor> transmission = at.optional("transmission");
         if (transmission.isPresent()) {

@@ -29,6 +29,9 @@ final class SvgPaper extends SVGGraphics2D {
 
     private static final String FONTS = "'DejaVu Sans', 'Segoe UI', 'Helvetica Neue', 'Noto Sans', Arial, sans-serif";
 
+    /** Declared by Batik for images and links, of which there are none. */
+    private static final String UNUSED_NAMESPACE = " xmlns:xlink=\"http://www.w3.org/1999/xlink\"";
+
     private final double paperWidth;
     private final double paperHeight;
 
@@ -97,7 +100,7 @@ final class SvgPaper extends SVGGraphics2D {
             stream(root, out, false, false);
             // Batik begins with a document type whose address some parsers would fetch; SVG needs none.
             String svg = out.toString();
-            String body = svg.substring(svg.indexOf("<svg"));
+            String body = svg.substring(svg.indexOf("<svg")).replace(UNUSED_NAMESPACE, "");
             return ("<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n" + body).getBytes(StandardCharsets.UTF_8);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
@@ -148,7 +151,6 @@ final class SvgPaper extends SVGGraphics2D {
             Map.entry("image-rendering", ""),
             Map.entry("font-family", ""),
             Map.entry("font-style", ""),
-            Map.entry("xmlns:xlink", ""),
             Map.entry("stroke-miterlimit", ""),
             Map.entry("stroke-dashoffset", "0"),
             Map.entry("fill-opacity", "1"),

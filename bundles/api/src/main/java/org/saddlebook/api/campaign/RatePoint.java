@@ -47,8 +47,13 @@ public record RatePoint(
     public RatePoint {
         positive("temperature in kelvin", kelvin);
         positive("rate constant", rate);
-        kelvinUncertainty.ifPresent(u -> positive("uncertainty of the temperature", u));
-        rateUncertainty.ifPresent(u -> positive("uncertainty of the rate constant", u));
+        // No lambdas: a table is read at every start.
+        if (kelvinUncertainty.isPresent()) {
+            positive("uncertainty of the temperature", kelvinUncertainty.getAsDouble());
+        }
+        if (rateUncertainty.isPresent()) {
+            positive("uncertainty of the rate constant", rateUncertainty.getAsDouble());
+        }
         Objects.requireNonNull(label, "label");
         Objects.requireNonNull(excluded, "excluded");
         Objects.requireNonNull(asRead, "asRead");

@@ -54,4 +54,24 @@ public record Dimension(double mass, double length, double time, double temperat
                 temperature * exponent + 0.0,
                 amount * exponent + 0.0);
     }
+
+    /** Written out, because the equality of records is set up at run time, which costs at every start. */
+    @Override
+    public boolean equals(Object object) {
+        return object instanceof Dimension other
+                && Double.compare(mass, other.mass) == 0
+                && Double.compare(length, other.length) == 0
+                && Double.compare(time, other.time) == 0
+                && Double.compare(temperature, other.temperature) == 0
+                && Double.compare(amount, other.amount) == 0;
+    }
+
+    @Override
+    public int hashCode() {
+        int hash = Double.hashCode(mass);
+        hash = 31 * hash + Double.hashCode(length);
+        hash = 31 * hash + Double.hashCode(time);
+        hash = 31 * hash + Double.hashCode(temperature);
+        return 31 * hash + Double.hashCode(amount);
+    }
 }

@@ -56,7 +56,7 @@ class NumberTextValidationTest {
     }
 
     /** The value read back is the same, and no decimal with one digit fewer reads back as it. */
-    @Property(tries = 20_000)
+    @Property(tries = 4_000)
     void isTheShortestThatReadsBack(@ForAll long bits) {
         double value = Double.longBitsToDouble(bits);
         if (Double.isFinite(value)) {
@@ -64,13 +64,13 @@ class NumberTextValidationTest {
         }
     }
 
-    @Property(tries = 2_000)
+    @Property(tries = 1_000)
     void isTheShortestAmongTheSmallestNumbersToo(@ForAll @IntRange(min = 1) int bits) {
         assertShortest(Double.longBitsToDouble(bits));
         assertShortest(Double.longBitsToDouble(bits % 64 + 1));
     }
 
-    @Property(tries = 2_000)
+    @Property(tries = 1_000)
     void isTheShortestAmongNumbersPeopleType(@ForAll int digits, @ForAll byte exponent) {
         assertShortest(new BigDecimal(digits).scaleByPowerOfTen(exponent).doubleValue());
     }

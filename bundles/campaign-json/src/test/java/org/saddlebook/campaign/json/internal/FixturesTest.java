@@ -61,8 +61,12 @@ class FixturesTest {
      */
     @Test
     void digestsStay() throws Exception {
-        assertEquals("560162ccbc08f109158e662f7e005e6b5236ee331f9c9156e59805eab3b7c0b3", format.digest(format.readCampaign("f", bytes("v1/campaign-full.json"))));
-        assertEquals("97da14cf9a688ea3092d5190fb2eb9f0ed10911befc96a4a35b0257970a3fbcc", format.digest(format.readCampaign("f", bytes("v1/campaign-by-hand.json"))));
+        assertEquals(
+                "560162ccbc08f109158e662f7e005e6b5236ee331f9c9156e59805eab3b7c0b3",
+                format.digest(format.readCampaign("f", bytes("v1/campaign-full.json"))));
+        assertEquals(
+                "97da14cf9a688ea3092d5190fb2eb9f0ed10911befc96a4a35b0257970a3fbcc",
+                format.digest(format.readCampaign("f", bytes("v1/campaign-by-hand.json"))));
     }
 
     @Test

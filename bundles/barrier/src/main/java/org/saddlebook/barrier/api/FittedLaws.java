@@ -28,6 +28,7 @@ public final class FittedLaws {
     private final double centreKelvin;
     private final double level;
     private final boolean stated;
+    private final boolean targetOnSameSensor;
     private final List<FittedLawView> laws;
     private final List<String> candidates;
 
@@ -38,8 +39,33 @@ public final class FittedLaws {
      * @param title name of the law
      * @param fitted estimates, covariance, degrees of freedom
      * @param newRunScatter standard deviation in ln k of one more run; absent when the scale of the errors is unknown
+     * @param sharedErrors errors common to all runs, as the findings state them; the covariance includes them
      */
-    public record FittedLawView(String id, String title, FittedModel fitted, OptionalDouble newRunScatter) {}
+    public record FittedLawView(
+            String id, String title, FittedModel fitted, OptionalDouble newRunScatter, List<Node> sharedErrors) {
+        /** Copies the list. */
+        public FittedLawView {
+            sharedErrors = List.copyOf(sharedErrors);
+        }
+
+        /**
+         * Covariance from errors common to all runs alone, whose quantiles are normal; the rest of the covariance has the
+         * fit's degrees of freedom. In the order of the basis, zero where none is stated.
+         */
+        public double[][] sharedCovariance() {
+            int size = fitted.basis().size();
+            double[][] covariance = new double[size][size];
+            for (Node each : sharedErrors) {
+                List<Node> shift = TreeReader.items((Node.Group) each, "shift");
+                for (int i = 0; i < size; i++) {
+                    for (int j = 0; j < size; j++) {
+                        covariance[i][j] += ((Node.Scalar) shift.get(i)).value() * ((Node.Scalar) shift.get(j)).value();
+                    }
+                }
+            }
+            return covariance;
+        }
+    }
 
     private FittedLaws(Node.Group body) {
         context = ContextNode.read(TreeReader.group(body, "context"));
@@ -49,6 +75,8 @@ public final class FittedLaws {
         centreKelvin = kelvin(table, "centre");
         level = TreeReader.number(body, "level");
         stated = TreeReader.text(body, "errorModel").equals("stated");
+        targetOnSameSensor = body.get("targets").isPresent()
+                && TreeReader.text(body, "targets").equals("same-sensor");
         List<FittedLawView> read = new ArrayList<>();
         for (Node model : TreeReader.items(body, "models")) {
             if (model instanceof Node.Group group
@@ -133,6 +161,11 @@ public final class FittedLaws {
         return stated;
     }
 
+    /** Whether target temperatures are read on the thermometer of the measurements; else they are true ones. */
+    public boolean targetOnSameSensor() {
+        return targetOnSameSensor;
+    }
+
     private FittedLawView law(Node.Group group) {
         String id = TreeReader.text(group, "id");
         Node.Group parameters = TreeReader.group(group, "parameters");
@@ -169,7 +202,8 @@ public final class FittedLaws {
         double dof = TreeReader.number(TreeReader.group(group, "statistics"), "dof");
         FittedModel fitted = new FittedModel(
                 id, held(group), symbols, values, covariance, stated ? OptionalDouble.empty() : OptionalDouble.of(dof));
-        return new FittedLawView(id, TreeReader.text(group, "title"), fitted, scatter);
+        List<Node> shared = group.get("sharedErrors").isPresent() ? TreeReader.items(group, "sharedErrors") : List.of();
+        return new FittedLawView(id, TreeReader.text(group, "title"), fitted, scatter, shared);
     }
 
     /** The context with the parameters that were held in this fit. */

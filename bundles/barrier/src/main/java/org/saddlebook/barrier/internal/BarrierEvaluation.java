@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.campaign.Choices;
@@ -28,6 +29,7 @@ final class BarrierEvaluation {
     private final RateTable table;
     private final Map<String, InstalledModel> installed;
     private final Task task;
+    private final Optional<Node> settings;
 
     /**
      * An evaluation.
@@ -40,6 +42,7 @@ final class BarrierEvaluation {
         this.table = campaign.rateTable().orElseThrow();
         this.installed = installed;
         this.task = task;
+        this.settings = Optional.ofNullable(campaign.settings().get(SECTION));
     }
 
     /** A law with everything computed from its own code. */
@@ -50,20 +53,32 @@ final class BarrierEvaluation {
             return Section.refused(
                     SECTION, TITLE, "Every point of the rate table is excluded; use at least one to fit a law.");
         }
+        SharedErrors shared;
+        double tolerance;
+        try {
+            shared = SharedErrors.read(settings);
+            tolerance = SharedErrors.tolerance(settings);
+        } catch (IllegalArgumentException unusable) {
+            return Section.refused(SECTION, TITLE, String.valueOf(unusable.getMessage()));
+        }
         Measurements data = Measurements.of(table, choices.errorModel().orElseThrow());
         RateContext context = context();
-        Plausibility plausibility = new Plausibility(context, choices, data);
+        Plausibility plausibility = new Plausibility(context, choices, data, shared);
         double centre = data.centreKelvin();
         LawNode nodes = new LawNode(plausibility, table.rateUnit(), centre, choices.level());
-        Predictions predictions =
-                new Predictions(table.rateUnit(), data.lowestKelvin(), data.highestKelvin(), choices.level());
+        Predictions predictions = new Predictions(
+                table.rateUnit(),
+                data.lowestKelvin(),
+                data.highestKelvin(),
+                choices.level(),
+                shared.targetOnSameSensor());
 
         List<Node> models = new ArrayList<>();
         List<FittedLaw> fitted = new ArrayList<>();
         List<Node> predicted = new ArrayList<>();
         List<String> notes = new ArrayList<>();
         for (String id : choices.models()) {
-            Computed computed = compute(id, context(id, context), data, plausibility, nodes, predictions);
+            Computed computed = compute(id, context(id, context), data, shared, plausibility, nodes, predictions);
             models.add(computed.node());
             predicted.addAll(computed.predictions());
             notes.addAll(computed.notes());
@@ -78,6 +93,7 @@ final class BarrierEvaluation {
                 .put("errorModel", data.errorModel().key())
                 .put("response", data.response().text())
                 .put("level", choices.level())
+                .put("targets", shared.targetOnSameSensor() ? "same-sensor" : "true")
                 .put("context", ContextNode.of(context, choices.standard().isEmpty()))
                 .put("table", table(data, centre))
                 .put("models", new Node.Items(models));
@@ -91,7 +107,6 @@ final class BarrierEvaluation {
             notes.add(broke.reason());
         }
         body.put("predictions", new Node.Items(predicted));
-        body.put("notes", Tree.texts(notes));
         if (!fitted.isEmpty()) {
             FittedLaw shown = shown(fitted, candidates);
             Contained<Node.Items> figures = task.contain(
@@ -101,7 +116,20 @@ final class BarrierEvaluation {
                 body.put("figures", drawn.value());
             }
         }
+        if (!fitted.isEmpty()) {
+            Set<String> left = candidates;
+            Contained<Node.Group> reach = task.contain(
+                    "the error budget",
+                    () -> new Reach(fitted, left, choices.level(), tolerance, shared.targetOnSameSensor())
+                            .node(choices.targetsKelvin()));
+            if (reach instanceof Contained.Answer<Node.Group> answer) {
+                answer.value().members().forEach(body::put);
+            } else if (reach instanceof Contained.Broke<Node.Group> broke) {
+                notes.add(broke.reason());
+            }
+        }
         List<String> tableCautions = plausibility.table();
+        body.put("notes", Tree.texts(notes));
         body.put("cautions", Tree.texts(tableCautions));
         Node.Group group = body.group();
         Set<String> ids = new LinkedHashSet<>(tableCautions);
@@ -113,6 +141,7 @@ final class BarrierEvaluation {
             String id,
             RateContext context,
             Measurements data,
+            SharedErrors shared,
             Plausibility plausibility,
             LawNode nodes,
             Predictions predictions)
@@ -126,7 +155,7 @@ final class BarrierEvaluation {
                     "The model " + id + " is not installed; install the bundle that provides it."));
         }
         Contained<Computed> answer = task.contain(model.culprit(id), () -> {
-            LawOutcome outcome = fit(model.model(), context, data);
+            LawOutcome outcome = fit(model.model(), context, data, shared.causes(context.order()));
             if (!(outcome instanceof FittedLaw law)) {
                 return without((LawOutcome.NotFitted) outcome);
             }
@@ -154,9 +183,14 @@ final class BarrierEvaluation {
                 id, id, LawOutcome.Kind.FAILED, ((Contained.Broke<Computed>) answer).reason()));
     }
 
-    private LawOutcome fit(RateModel model, RateContext context, Measurements data) throws Cancelled {
+    private LawOutcome fit(RateModel model, RateContext context, Measurements data, List<SharedErrors.Cause> causes)
+            throws Cancelled {
         try {
-            return LawFitter.fit(model, context, data, new CancelCheck(task));
+            CancelCheck check = new CancelCheck(task);
+            LawOutcome outcome = LawFitter.fit(model, context, data, check);
+            return outcome instanceof FittedLaw law
+                    ? LawFitter.withShared(law, model, context, causes, check)
+                    : outcome;
         } catch (CancelCheck.Stopped stopped) {
             throw new Cancelled();
         }

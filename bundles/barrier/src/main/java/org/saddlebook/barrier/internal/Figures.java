@@ -98,13 +98,16 @@ final class Figures {
     }
 
     private Layer band(Layer.Kind kind, String label, FittedLaw law, double[] grid, double scatter) {
-        double quantile = law.quantile(level);
         double[] y = new double[grid.length];
         double[] low = new double[grid.length];
         double[] high = new double[grid.length];
         for (int i = 0; i < grid.length; i++) {
             FittedLaw.Estimate estimate = law.lnRate(grid[i]);
-            double half = quantile * Math.sqrt(estimate.variance().orElseThrow() + scatter * scatter);
+            double half = new FittedLaw.Estimate(
+                            estimate.value(),
+                            OptionalDouble.of(estimate.variance().orElseThrow() + scatter * scatter),
+                            estimate.sharedVariance())
+                    .halfWidth(level, law.degreesOfFreedom());
             y[i] = estimate.value() - lnUnit;
             low[i] = y[i] - half;
             high[i] = y[i] + half;

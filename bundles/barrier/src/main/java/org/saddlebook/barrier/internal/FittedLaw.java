@@ -7,6 +7,7 @@ import org.saddlebook.api.model.Parameter;
 import org.saddlebook.api.model.RateFunction;
 import org.saddlebook.estimation.api.Fit;
 import org.saddlebook.estimation.api.Normal;
+import org.saddlebook.estimation.api.StudentPlusNormal;
 import org.saddlebook.estimation.api.StudentT;
 
 /**
@@ -17,15 +18,43 @@ import org.saddlebook.estimation.api.StudentT;
  * @param law the bound law
  * @param fit estimates in the form handed to the law
  * @param data what it was fitted to
+ * @param shared how errors common to all runs shift the estimates; empty when none is stated
  */
-record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurements data) implements LawOutcome {
+record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurements data, List<SharedShift> shared)
+        implements LawOutcome {
     /**
-     * A number with its variance.
+     * A number with its variances.
      *
      * @param value the number
-     * @param variance its variance; absent when the scale of the errors is unknown
+     * @param variance its variance from the scatter or the stated errors of single runs; absent when their scale is
+     *     unknown
+     * @param sharedVariance its variance from errors common to all runs; 0 when none is stated
      */
-    record Estimate(double value, OptionalDouble variance) {}
+    record Estimate(double value, OptionalDouble variance, double sharedVariance) {
+        /** Half the width of its interval; the variance must be present. */
+        double halfWidth(double level, OptionalDouble degreesOfFreedom) {
+            double own = variance.orElseThrow();
+            if (degreesOfFreedom.isEmpty()) {
+                return quantile(level, degreesOfFreedom) * Math.sqrt(own + sharedVariance);
+            }
+            return StudentPlusNormal.quantile(
+                    0.5 + level / 2, Math.sqrt(own), degreesOfFreedom.getAsDouble(), Math.sqrt(sharedVariance));
+        }
+
+        /** Its standard uncertainty; the variance must be present. */
+        double standardUncertainty() {
+            return Math.sqrt(variance.orElseThrow() + sharedVariance);
+        }
+    }
+
+    FittedLaw {
+        shared = List.copyOf(shared);
+    }
+
+    /** The same with errors common to all runs. */
+    FittedLaw withShared(List<SharedShift> shifts) {
+        return new FittedLaw(id, title, law, fit, data, shifts);
+    }
 
     /** The variance of an observation of weight one: 1 for stated errors, else estimated; absent without a degree of freedom. */
     OptionalDouble scale() {
@@ -69,21 +98,35 @@ record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurement
     Estimate parameter(int i) {
         double[] row = new double[fit.parameterCount()];
         row[i] = 1;
-        return new Estimate(fit.parameters()[i], scaled(fit.predictionVariance(row)));
+        return estimate(fit.parameters()[i], row);
     }
 
-    /** ln k in SI at a temperature. */
+    /** ln k in SI at a true temperature. */
     Estimate lnRate(double kelvin) {
+        return lnRate(kelvin, false);
+    }
+
+    /**
+     * ln k in SI at a target temperature.
+     *
+     * @param onSameSensor whether the temperature will be read on the thermometer of the measurements
+     */
+    Estimate lnRate(double kelvin, boolean onSameSensor) {
         double[] gradient = new double[fit.parameterCount()];
         double value = law.lnRate(kelvin, fit.parameters(), gradient);
-        return new Estimate(value, scaled(fit.predictionVariance(gradient)));
+        double variance = 0;
+        for (SharedShift shift : shared) {
+            double effect = shift.onLnRate(law, fit.parameters(), gradient, kelvin, onSameSensor);
+            variance += effect * effect;
+        }
+        return new Estimate(value, scaled(fit.predictionVariance(gradient)), variance);
     }
 
     /** A derived quantity at a temperature, in SI or as a logarithm of it. */
     Estimate derived(Derived derived, double kelvin) {
         double[] gradient = new double[fit.parameterCount()];
         double value = derived.function().value(kelvin, fit.parameters(), gradient);
-        return new Estimate(value, scaled(fit.predictionVariance(gradient)));
+        return estimate(value, gradient);
     }
 
     /** Standard deviation in ln k of one more run; absent when the scale of the errors is unknown. */
@@ -95,16 +138,19 @@ record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurement
         return scale.isPresent() ? OptionalDouble.of(Math.sqrt(scale.getAsDouble())) : OptionalDouble.empty();
     }
 
-    /** Covariance of the estimates; of size 0 when the scale of the errors is unknown. */
+    /** Covariance of the estimates, shared errors included; of size 0 when the scale of the errors is unknown. */
     double[][] covariance() {
         OptionalDouble scale = scale();
         if (scale.isEmpty()) {
             return new double[0][];
         }
         double[][] covariance = fit.unscaledCovariance();
-        for (double[] row : covariance) {
-            for (int j = 0; j < row.length; j++) {
-                row[j] *= scale.getAsDouble();
+        for (int i = 0; i < covariance.length; i++) {
+            for (int j = 0; j < covariance.length; j++) {
+                covariance[i][j] *= scale.getAsDouble();
+                for (SharedShift shift : shared) {
+                    covariance[i][j] += shift.parameter(i) * shift.parameter(j);
+                }
             }
         }
         return covariance;
@@ -118,6 +164,15 @@ record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurement
             }
         }
         return -1;
+    }
+
+    private Estimate estimate(double value, double[] gradient) {
+        double variance = 0;
+        for (SharedShift shift : shared) {
+            double effect = shift.along(gradient);
+            variance += effect * effect;
+        }
+        return new Estimate(value, scaled(fit.predictionVariance(gradient)), variance);
     }
 
     private OptionalDouble scaled(double variance) {

@@ -1,5 +1,6 @@
 package org.saddlebook.barrier.internal;
 
+import java.util.ArrayList;
 import java.util.List;
 import org.saddlebook.api.model.Inapplicable;
 import org.saddlebook.api.model.Parameter;
@@ -54,6 +55,21 @@ final class LawFitter {
         return NonlinearFitter.fit(id, title, law, data, starts, check);
     }
 
+    /** The law with the shifts that common errors cause, by fits to displaced measurements. */
+    static FittedLaw withShared(
+            FittedLaw law, RateModel model, RateContext context, List<SharedErrors.Cause> causes, Runnable check) {
+        List<SharedShift> shifts = new ArrayList<>();
+        for (SharedErrors.Cause cause : causes) {
+            LawOutcome above = fit(model, context, law.data().displaced(cause, 1), check);
+            LawOutcome below = fit(model, context, law.data().displaced(cause, -1), check);
+            if (!(above instanceof FittedLaw high) || !(below instanceof FittedLaw low)) {
+                throw new IllegalStateException("no fit to measurements displaced by the " + cause.title());
+            }
+            shifts.add(SharedShift.of(high, low, cause));
+        }
+        return law.withShared(shifts);
+    }
+
     private static LawOutcome linear(String id, String title, RateFunction law, Measurements data) {
         int n = data.size();
         int p = law.parameters().size();
@@ -92,7 +108,7 @@ final class LawFitter {
                 return new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, broken);
             }
         }
-        return new FittedLaw(id, title, law, fit, data);
+        return new FittedLaw(id, title, law, fit, data, List.of());
     }
 
     static String notFinite(RateFunction law, double kelvin, double value, double[] gradient) {

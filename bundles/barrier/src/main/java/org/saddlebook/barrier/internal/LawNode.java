@@ -43,13 +43,13 @@ final class LawNode {
      * @param heldParameters parameters that were held, in the form handed to the law
      */
     Node.Group fitted(FittedLaw law, Map<String, Double> heldParameters) {
-        Quantities quantities = Quantities.of(law.degreesOfFreedom(), level);
+        Quantities quantities = new Quantities(level, law.degreesOfFreedom());
         Map<String, Node> parameters = new LinkedHashMap<>();
         for (int i = 0; i < law.parameters().size(); i++) {
             Parameter parameter = law.parameters().get(i);
             FittedLaw.Estimate estimate = law.parameter(i);
             List<String> cautions = plausibility.quantity(parameter.symbol(), law, estimate);
-            if (undetermined(parameter, estimate, quantities.quantile())) {
+            if (undetermined(parameter, estimate, law)) {
                 cautions.add(0, "undetermined");
             }
             parameters.put(parameter.symbol(), quantities.of(estimate, parameter.scale(), parameter.unit(), cautions));
@@ -85,6 +85,11 @@ final class LawNode {
         if (covariance.length > 0) {
             tree.put("covariance", covariance(law, basis, covariance));
             tree.put("newRunScatter", law.newRunScatter());
+            if (!law.shared().isEmpty()) {
+                List<Node> shared = new ArrayList<>();
+                law.shared().forEach(shift -> shared.add(shift.node()));
+                tree.put("sharedErrors", new Node.Items(shared));
+            }
         }
         return tree.put("statistics", new FitStatistics(law).node()).group();
     }
@@ -93,11 +98,11 @@ final class LawNode {
      * An extra parameter whose interval includes the value of no effect is not determined: the data do not even say
      * whether the law needs it.
      */
-    private static boolean undetermined(Parameter parameter, FittedLaw.Estimate estimate, double quantile) {
+    private boolean undetermined(Parameter parameter, FittedLaw.Estimate estimate, FittedLaw law) {
         return parameter.neutral().isPresent()
                 && estimate.variance().isPresent()
                 && Math.abs(estimate.value() - parameter.neutral().getAsDouble())
-                        <= quantile * Math.sqrt(estimate.variance().getAsDouble());
+                        <= estimate.halfWidth(level, law.degreesOfFreedom());
     }
 
     private static Node.Group covariance(FittedLaw law, List<String> basis, double[][] matrix) {

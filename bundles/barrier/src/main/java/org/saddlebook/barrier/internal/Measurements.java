@@ -72,6 +72,17 @@ final class Measurements {
         return new Measurements(errorModel, kelvin, lnRate, relative);
     }
 
+    /** The same as a common error would have shown them: temperatures and ln k displaced, {@code sign} +1 or -1. */
+    Measurements displaced(SharedErrors.Cause cause, int sign) {
+        double[] shown = new double[kelvin.length];
+        double[] ln = new double[kelvin.length];
+        for (int i = 0; i < shown.length; i++) {
+            shown[i] = cause.shifted(kelvin[i], sign);
+            ln[i] = lnRate[i] + sign * cause.lnRateShift();
+        }
+        return new Measurements(errorModel, shown, ln, relative);
+    }
+
     int size() {
         return kelvin.length;
     }

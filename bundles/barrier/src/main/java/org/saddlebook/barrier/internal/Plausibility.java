@@ -26,11 +26,13 @@ final class Plausibility {
     private final RateContext context;
     private final Choices choices;
     private final Measurements data;
+    private final SharedErrors shared;
 
-    Plausibility(RateContext context, Choices choices, Measurements data) {
+    Plausibility(RateContext context, Choices choices, Measurements data, SharedErrors shared) {
         this.context = context;
         this.choices = choices;
         this.data = data;
+        this.shared = shared;
     }
 
     /** Cautions for the whole table. */
@@ -48,7 +50,9 @@ final class Plausibility {
         if (!data.stated()) {
             cautions.add("assumed-error-model");
         }
-        cautions.add("thermometer-not-included");
+        if (!shared.hasThermometer()) {
+            cautions.add("thermometer-not-included");
+        }
         if (context.order() == 1) {
             double limit = Constants.LN_BOLTZMANN_OVER_PLANCK;
             for (int i = 0; i < data.size(); i++) {

@@ -15,8 +15,9 @@ import org.saddlebook.api.quantity.Unit;
  * @param lowestKelvin lowest measured temperature, K
  * @param highestKelvin highest measured temperature, K
  * @param level coverage probability
+ * @param targetOnSameSensor whether targets are read on the thermometer of the measurements
  */
-record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, double level) {
+record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, double level, boolean targetOnSameSensor) {
     /**
      * One row.
      *
@@ -45,7 +46,7 @@ record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, dou
         if (kelvin < lowestKelvin) {
             cautions.add("storage-lower-bound");
         }
-        Quantities quantities = Quantities.of(degreesOfFreedom, level);
+        Quantities quantities = new Quantities(level, degreesOfFreedom);
         Tree tree = new Tree()
                 .put("temperature", Node.Quantity.of(kelvin, "K"))
                 .put("model", model)
@@ -53,7 +54,9 @@ record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, dou
         if (lnRate.variance().isPresent() && newRunScatter.isPresent()) {
             double scatter = newRunScatter.getAsDouble();
             FittedLaw.Estimate newRun = new FittedLaw.Estimate(
-                    lnRate.value(), OptionalDouble.of(lnRate.variance().getAsDouble() + scatter * scatter));
+                    lnRate.value(),
+                    OptionalDouble.of(lnRate.variance().getAsDouble() + scatter * scatter),
+                    lnRate.sharedVariance());
             List<String> more = new ArrayList<>(cautions);
             if (assumedScatter) {
                 more.add("new-run-as-stated");
@@ -67,7 +70,7 @@ record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, dou
         return row(
                 kelvin,
                 law.id(),
-                law.lnRate(kelvin),
+                law.lnRate(kelvin, targetOnSameSensor),
                 law.newRunScatter(),
                 law.degreesOfFreedom(),
                 law.data().stated());

@@ -11,21 +11,10 @@ import org.saddlebook.api.quantity.Unit;
 /**
  * Turns estimates into quantities of the findings.
  *
- * @param quantile two-sided quantile of the level
  * @param level coverage probability
- * @param method word for the quantile
+ * @param degreesOfFreedom of the scale; empty for normal quantiles
  */
-record Quantities(double quantile, double level, String method) {
-    /** Quantities with the quantile that belongs to these degrees of freedom; normal when they are empty. */
-    static Quantities of(OptionalDouble degreesOfFreedom, double level) {
-        // Without a degree of freedom there is no scale, hence no variance and no use of the quantile.
-        boolean usable = degreesOfFreedom.isEmpty() || degreesOfFreedom.getAsDouble() > 0;
-        return new Quantities(
-                usable ? FittedLaw.quantile(level, degreesOfFreedom) : Double.NaN,
-                level,
-                FittedLaw.method(degreesOfFreedom));
-    }
-
+record Quantities(double level, OptionalDouble degreesOfFreedom) {
     /** A quantity on either scale; logarithms become values with a factor. */
     Node.Quantity of(FittedLaw.Estimate estimate, Parameter.Scale scale, Unit unit, List<String> cautions) {
         return scale == Parameter.Scale.LOG ? logarithmic(estimate, unit, cautions) : linear(estimate, unit, cautions);
@@ -36,9 +25,9 @@ record Quantities(double quantile, double level, String method) {
         if (estimate.variance().isEmpty()) {
             return Node.Quantity.of(value, unit.code()).withCautions(cautions);
         }
-        double u = Math.sqrt(estimate.variance().getAsDouble()) / unit.factor();
-        return Node.Quantity.of(value, unit.code(), u)
-                .withInterval(Interval.between(value - quantile * u, value + quantile * u, level, method))
+        double half = estimate.halfWidth(level, degreesOfFreedom) / unit.factor();
+        return Node.Quantity.of(value, unit.code(), estimate.standardUncertainty() / unit.factor())
+                .withInterval(Interval.between(value - half, value + half, level, method(estimate)))
                 .withCautions(cautions);
     }
 
@@ -50,21 +39,22 @@ record Quantities(double quantile, double level, String method) {
             return new Node.Quantity(
                     shown, unit.code(), OptionalDouble.empty(), OptionalDouble.empty(), Optional.empty(), cautions);
         }
-        double u = Math.sqrt(estimate.variance().getAsDouble());
-        double factor = StrictMath.exp(u);
+        double half = estimate.halfWidth(level, degreesOfFreedom);
+        double factor = StrictMath.exp(estimate.standardUncertainty());
         return new Node.Quantity(
                 shown,
                 unit.code(),
                 OptionalDouble.empty(),
                 Double.isFinite(factor) ? OptionalDouble.of(factor) : OptionalDouble.empty(),
                 Optional.of(limits(
-                        StrictMath.exp(estimate.value() - quantile * u) / unit.factor(),
-                        StrictMath.exp(estimate.value() + quantile * u) / unit.factor())),
+                        StrictMath.exp(estimate.value() - half) / unit.factor(),
+                        StrictMath.exp(estimate.value() + half) / unit.factor(),
+                        method(estimate))),
                 cautions);
     }
 
     /** Limits beyond the range of a double leave that side open. */
-    private Interval limits(double lower, double upper) {
+    private Interval limits(double lower, double upper, String method) {
         boolean low = lower > 0 && Double.isFinite(lower);
         boolean high = Double.isFinite(upper);
         if (low && high) {
@@ -78,5 +68,11 @@ record Quantities(double quantile, double level, String method) {
             return new Interval(Interval.Kind.AT_MOST, level, OptionalDouble.empty(), OptionalDouble.of(upper), method);
         }
         return Interval.everything(level, method);
+    }
+
+    /** The word for the quantile: {@code t}, {@code normal}, or {@code t+normal} where a shared error of stated size joins. */
+    private String method(FittedLaw.Estimate estimate) {
+        String own = FittedLaw.method(degreesOfFreedom);
+        return degreesOfFreedom.isPresent() && estimate.sharedVariance() > 0 ? own + "+normal" : own;
     }
 }

@@ -40,10 +40,19 @@ record StoredLaws(FittedLaws laws) {
         }
         double[] gradient = new double[symbols.size()];
         double lnRate = function.lnRate(kelvin, fitted.values(), gradient);
+        double shared = 0;
+        double along = 0;
+        for (Node each : law.sharedErrors()) {
+            SharedShift shift = SharedShift.read((Node.Group) each);
+            double effect = shift.onLnRate(function, fitted.values(), gradient, kelvin, laws.targetOnSameSensor());
+            shared += effect * effect;
+            along += shift.along(gradient) * shift.along(gradient);
+        }
         OptionalDouble variance = OptionalDouble.empty();
         if (fitted.hasCovariance()) {
+            // The stored covariance includes the shared errors; what remains is that of the single runs.
             double[][] covariance = fitted.covariance();
-            double sum = 0;
+            double sum = -along;
             for (int i = 0; i < gradient.length; i++) {
                 for (int j = 0; j < gradient.length; j++) {
                     sum += gradient[i] * covariance[i][j] * gradient[j];
@@ -52,11 +61,16 @@ record StoredLaws(FittedLaws laws) {
             // Rounding in nearly cancelling products can leave a tiny negative number.
             variance = OptionalDouble.of(Math.max(0, sum));
         }
-        return new Predictions(laws.context().rateUnit(), laws.lowestKelvin(), laws.highestKelvin(), laws.level())
+        return new Predictions(
+                        laws.context().rateUnit(),
+                        laws.lowestKelvin(),
+                        laws.highestKelvin(),
+                        laws.level(),
+                        laws.targetOnSameSensor())
                 .row(
                         kelvin,
                         id,
-                        new FittedLaw.Estimate(lnRate, variance),
+                        new FittedLaw.Estimate(lnRate, variance, shared),
                         law.newRunScatter(),
                         fitted.degreesOfFreedom(),
                         laws.stated());

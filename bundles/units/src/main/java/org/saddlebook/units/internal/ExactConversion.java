@@ -9,6 +9,15 @@ import org.saddlebook.units.api.UnitException;
 public final class ExactConversion {
     private static final MathContext DIGITS = new MathContext(40);
 
+    /** Whole numbers of as many digits are exact in a double. */
+    private static final int EXACT_DIGITS = 15;
+
+    private static final double LARGEST_EXACT = 0x1p53;
+
+    private static final double[] POWERS = {
+        1, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15
+    };
+
     private final BigDecimal numerator;
     private final BigDecimal denominator;
     private final BigDecimal offset;
@@ -49,8 +58,18 @@ public final class ExactConversion {
     }
 
     private double quotient(BigDecimal dividend) {
-        return denominator.compareTo(BigDecimal.ONE) == 0
-                ? dividend.doubleValue()
-                : dividend.divide(denominator, DIGITS).doubleValue();
+        int scale = dividend.scale() - denominator.scale();
+        boolean small = dividend.precision() <= EXACT_DIGITS && denominator.precision() <= EXACT_DIGITS;
+        if (small && Math.abs(scale) < POWERS.length) {
+            double above = dividend.unscaledValue().longValue();
+            double below = denominator.unscaledValue().longValue();
+            above = scale < 0 ? above * POWERS[-scale] : above;
+            below = scale > 0 ? below * POWERS[scale] : below;
+            if (Math.abs(above) < LARGEST_EXACT && below < LARGEST_EXACT) {
+                // Both are whole numbers that a double holds, so the one division is the one rounding.
+                return above / below;
+            }
+        }
+        return dividend.divide(denominator, DIGITS).doubleValue();
     }
 }

@@ -13,6 +13,12 @@ public final class NumeralScanner {
 
     private static final int LARGEST_POWER = 400;
 
+    /** As many digits fit a long, sign included. */
+    private static final int LONG_DIGITS = 18;
+
+    /** Magnitudes to this power of ten are within the range of double for certain. */
+    private static final int SURE_POWER = 300;
+
     private final String original;
     private final String text;
     private final DecimalSign sign;
@@ -37,10 +43,14 @@ public final class NumeralScanner {
         if (Math.abs(power) > LARGEST_POWER) {
             throw range();
         }
-        BigDecimal value = new BigDecimal(new BigInteger(digits.toString()), scale - power);
-        double rounded = value.doubleValue();
-        if (Double.isInfinite(rounded) || (rounded == 0 && value.signum() != 0)) {
-            throw range();
+        BigDecimal value = digits.length() <= LONG_DIGITS
+                ? BigDecimal.valueOf(Long.parseLong(digits.toString()), scale - power)
+                : new BigDecimal(new BigInteger(digits.toString()), scale - power);
+        if (Math.abs((long) value.precision() - value.scale()) > SURE_POWER) {
+            double rounded = value.doubleValue();
+            if (Double.isInfinite(rounded) || (rounded == 0 && value.signum() != 0)) {
+                throw range();
+            }
         }
         return value;
     }

@@ -4,12 +4,15 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.math.BigDecimal;
+import java.math.MathContext;
 import net.jqwik.api.Arbitraries;
 import net.jqwik.api.Arbitrary;
 import net.jqwik.api.Combinators;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.Provide;
+import net.jqwik.api.constraints.IntRange;
+import net.jqwik.api.constraints.LongRange;
 import org.saddlebook.api.model.StandardState;
 import org.saddlebook.api.quantity.Unit;
 
@@ -124,5 +127,30 @@ class AnyTextTest {
     @Property
     void standardStatesReadBack(@ForAll("states") StandardState state) throws UnitException {
         assertEquals(state, Units.standardState(Units.text(state)));
+    }
+
+    /** The expected value is the definition in 60 digits, rounded once: 1 h = 3600 s, T/K = (t/°F + 459.67) 5/9. */
+    @Property
+    void conversionsAreRoundedOnce(
+            @ForAll @LongRange(min = -999_999_999_999L, max = 999_999_999_999L) long digits,
+            @ForAll @IntRange(min = -20, max = 40) int scale)
+            throws UnitException {
+        BigDecimal value = BigDecimal.valueOf(digits, scale);
+        MathContext exact = new MathContext(60);
+        BigDecimal perHour = value.divide(BigDecimal.valueOf(3600), exact);
+        assertEquals(perHour.doubleValue(), Converter.of(Units.parse("1/h")).toSi(value));
+        BigDecimal fahrenheit =
+                value.add(new BigDecimal("459.67")).multiply(BigDecimal.valueOf(5)).divide(BigDecimal.valueOf(9), exact);
+        assertEquals(fahrenheit.doubleValue(), Converter.of(Units.parse("degF")).toSi(value));
+        assertEquals(
+                value.multiply(BigDecimal.valueOf(5)).divide(BigDecimal.valueOf(9), exact).doubleValue(),
+                Converter.of(Units.parse("degF")).differenceToSi(value));
+        BigDecimal perMolecule = value.multiply(new BigDecimal("6.02214076E17"));
+        assertEquals(
+                perMolecule.doubleValue(),
+                Converter.of(Units.parse("cm3 molecule-1 s-1")).toSi(value));
+        assertEquals(
+                value.add(new BigDecimal("273.15")).doubleValue(),
+                Converter.of(Units.parse("°C")).toSi(value));
     }
 }

@@ -3,17 +3,14 @@ package org.saddlebook.reader.text.internal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
-import org.saddlebook.api.quantity.Dimension;
 import org.saddlebook.api.quantity.Unit;
 import org.saddlebook.reader.text.internal.Heading.Kind;
 import org.saddlebook.units.api.UnitException;
-import org.saddlebook.units.api.Units;
 
 /** Decides which column holds what, in which unit. */
 final class ColumnPlan {
     private final Row header;
-    private final Row units;
-    private final Rule rule;
+    private final ColumnUnits units;
     private final Problems problems;
     private final List<Heading> headings = new ArrayList<>();
     private final List<Column> columns = new ArrayList<>();
@@ -26,8 +23,7 @@ final class ColumnPlan {
      */
     ColumnPlan(Row header, Row units, Rule rule, Problems problems) {
         this.header = header;
-        this.units = units;
-        this.rule = rule;
+        this.units = new ColumnUnits(header, units, rule, problems);
         this.problems = problems;
         for (String heading : header.cells()) {
             headings.add(HeadingParser.parse(heading));
@@ -132,7 +128,10 @@ final class ColumnPlan {
         if (!candidates.isEmpty()) {
             int index = candidates.get(0);
             columns.add(Column.of(
-                    index, header.cells().get(index), kind, candidates.size() > 1 ? null : unit(index, kind)));
+                    index,
+                    header.cells().get(index),
+                    kind,
+                    candidates.size() > 1 || isText(kind) ? null : units.unit(index, headings.get(index), rateUnit())));
         }
     }
 
@@ -165,98 +164,6 @@ final class ColumnPlan {
         } else {
             add(Kind.RELATIVE_RATE_UNCERTAINTY);
         }
-    }
-
-    private Unit unit(int index, Kind kind) {
-        if (isText(kind)) {
-            return null;
-        }
-        Heading heading = headings.get(index);
-        String below = units == null || index >= units.cells().size()
-                ? ""
-                : unwrapped(units.cells().get(index));
-        String text = heading.unit();
-        int line = header.line();
-        if (text != null && !below.isEmpty() && !text.equals(below)) {
-            problems.add(
-                    "two-units",
-                    problems.place(units.line(), heading(index)),
-                    Problems.quoted(below) + " below " + Problems.quoted(heading(index)),
-                    "one unit for the column",
-                    "state the unit in the header or in the row of units, not in both");
-            return null;
-        }
-        if (text == null && !below.isEmpty()) {
-            text = below;
-            line = units.line();
-        }
-        boolean fromRule = text == null && rule.unit(kind) != null;
-        if (fromRule) {
-            text = rule.unit(kind);
-        }
-        if (text == null && kind == Kind.RELATIVE_RATE_UNCERTAINTY) {
-            // u(k)/k is a pure number by its name.
-            return Unit.ONE;
-        }
-        if (text == null || text.isEmpty()) {
-            refuseMissingUnit(index, kind);
-            return null;
-        }
-        try {
-            return parse(text, kind);
-        } catch (UnitException e) {
-            problems.add(e, fromRule ? Rule.place("unit." + kind.key()) : problems.place(line, heading(index)));
-            return null;
-        }
-    }
-
-    private Unit parse(String text, Kind kind) throws UnitException {
-        switch (kind) {
-            case TEMPERATURE, TEMPERATURE_UNCERTAINTY -> {
-                return Units.temperature(text);
-            }
-            case RELATIVE_RATE_UNCERTAINTY -> {
-                return Units.parse(text, Dimension.NONE, "1 or %");
-            }
-            case RATE_UNCERTAINTY -> {
-                return rateUncertainty(text);
-            }
-            default -> {
-                return Units.rateConstant(text);
-            }
-        }
-    }
-
-    /** A percentage, or a unit of the dimension of k. */
-    private Unit rateUncertainty(String text) throws UnitException {
-        Unit unit = Units.parse(text);
-        Column rate = column(Kind.RATE);
-        if (unit.code().equals("%") || rate == null || rate.unit() == null) {
-            return unit;
-        }
-        if (unit.dimension().equals(Dimension.NONE)) {
-            throw new UnitException(
-                    "wrong-dimension",
-                    Problems.quoted(text) + " for u(k)",
-                    "the unit of the rate constant, or %",
-                    "name the column u(k)/k when it holds u(k) divided by k");
-        }
-        return Units.parse(text, rate.unit().dimension(), rate.unit().code() + " or in %");
-    }
-
-    private void refuseMissingUnit(int index, Kind kind) {
-        String example = switch (kind) {
-            case TEMPERATURE -> "\"T (K)\" or \"T (degC)\"";
-            case TEMPERATURE_UNCERTAINTY -> "\"u(T) (K)\"";
-            case RATE -> "\"k (1/s)\" or \"k (L mol-1 s-1)\"";
-            default -> "\"u(k) (%)\" or \"u(k) (1/s)\"";
-        };
-        problems.add(
-                "missing-unit",
-                problems.place(header.line(), heading(index)),
-                Problems.quoted(heading(index)) + ", the " + kind.words() + " without a unit",
-                "the unit in the header",
-                "write the unit after the name, for example " + example);
     }
 
     private void refuseTransformed() {
@@ -332,6 +239,11 @@ final class ColumnPlan {
                 "name the column with its unit, for example " + example);
     }
 
+    private Unit rateUnit() {
+        Column rate = column(Kind.RATE);
+        return rate == null ? null : rate.unit();
+    }
+
     private boolean isUsed(int index) {
         for (Column column : columns) {
             if (column.index() == index) {
@@ -346,7 +258,7 @@ final class ColumnPlan {
             return false;
         }
         try {
-            parse(heading.unit(), heading.kind());
+            ColumnUnits.parse(heading.unit(), heading.kind(), rateUnit());
             return true;
         } catch (UnitException e) {
             return false;
@@ -359,12 +271,5 @@ final class ColumnPlan {
 
     private String heading(int index) {
         return header.cells().get(index);
-    }
-
-    private static String unwrapped(String cell) {
-        boolean wrapped = (cell.startsWith("(") && cell.endsWith(")")) || (cell.startsWith("[") && cell.endsWith("]"));
-        return wrapped && cell.indexOf(cell.charAt(0), 1) < 0
-                ? cell.substring(1, cell.length() - 1).strip()
-                : cell;
     }
 }

@@ -117,11 +117,7 @@ public final class EnterVerb implements Verb {
                 .withReason(options.value("--reason").orElse(""));
         try (Register register = Locations.open(services, invocation, options, opening(supersedes))) {
             if (supersedes.isPresent()) {
-                Entry old = register.show(target); // refuses early, before parts are stored
-                invocation
-                        .out()
-                        .println("Supersedes entry " + old.number() + ": "
-                                + old.record().title());
+                register.show(target); // refuses a number that is no entry before parts are stored
             }
             Receipt receipt = register.enter(draft, parts);
             print(invocation.out(), register, receipt, effective, parts);
@@ -171,7 +167,7 @@ public final class EnterVerb implements Verb {
         out.println("Entered as " + receipt.number() + ": " + Text.line(effective.title()));
         out.println("Register   " + register.location());
         out.println("Root hash  " + receipt.head().root() + " over "
-                + receipt.head().size() + " records");
+                + Text.count(receipt.head().size(), "record"));
         out.println("Parts");
         for (PartFile part : parts) {
             out.println("  " + part.name());

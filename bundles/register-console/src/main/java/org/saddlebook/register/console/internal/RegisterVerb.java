@@ -166,7 +166,7 @@ public final class RegisterVerb implements Verb {
             }
             out.println("Leaf hash  " + entry.receipt().leaf());
             out.println("Root hash  " + entry.receipt().head().root() + " over "
-                    + entry.receipt().head().size() + " records, when it was entered");
+                    + Text.count(entry.receipt().head().size(), "record") + ", when it was entered");
             out.println("Parts");
             for (PartEntry part : record.parts()) {
                 out.println("  " + part.sha256() + "  " + part.name() + "  " + part.size() + " bytes");
@@ -190,18 +190,19 @@ public final class RegisterVerb implements Verb {
             for (Verification.Difference difference : verification.differences()) {
                 out.println(difference.code() + ": " + Text.line(difference.message()));
             }
-            out.println(verification.records() + " records and " + verification.parts() + " parts ("
+            out.println(Text.count(verification.records(), "record") + " and "
+                    + Text.count(verification.parts(), "part") + " ("
                     + verification.bytes() + " bytes) read in " + register.location());
             if (verification.unreferenced() > 0) {
-                out.println(verification.unreferenced() + " stored parts belong to no record: left behind by a process"
-                        + " that died before it had entered; harmless.");
+                out.println("Stored parts that belong to no record: " + verification.unreferenced()
+                        + ", left behind by a process" + " that died before it had entered; harmless.");
             }
             if (!verification.agrees()) {
                 out.println("Differences: " + verification.differences().size());
                 return ExitCode.DIFFERENCE;
             }
             out.println("Everything agrees. Root hash " + verification.head().root() + " over "
-                    + verification.head().size() + " records");
+                    + Text.count(verification.head().size(), "record"));
             return ExitCode.DONE;
         } catch (RegisterDamagedException e) {
             out.println("store-damaged: " + Text.line(e.getMessage()));
@@ -262,7 +263,7 @@ public final class RegisterVerb implements Verb {
             invocation
                     .out()
                     .println("Root hash  " + receipt.head().root() + " over "
-                            + receipt.head().size() + " records");
+                            + Text.count(receipt.head().size(), "record"));
         }
         return ExitCode.DONE;
     }

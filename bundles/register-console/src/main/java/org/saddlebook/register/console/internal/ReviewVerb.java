@@ -71,7 +71,7 @@ public final class ReviewVerb implements Verb {
             invocation
                     .out()
                     .println("Root hash  " + receipt.head().root() + " over "
-                            + receipt.head().size() + " records");
+                            + Text.count(receipt.head().size(), "record"));
         }
         return ExitCode.DONE;
     }

@@ -18,6 +18,11 @@ final class Text {
         return out.toString();
     }
 
+    /** {@code 1 record}, {@code 2 records}. */
+    static String count(long number, String word) {
+        return number + " " + word + (number == 1 ? "" : "s");
+    }
+
     /** The status in a word. */
     static String status(Entry entry) {
         return entry.status().name().toLowerCase(Locale.ROOT);

@@ -139,11 +139,14 @@ class AnyTextTest {
         MathContext exact = new MathContext(60);
         BigDecimal perHour = value.divide(BigDecimal.valueOf(3600), exact);
         assertEquals(perHour.doubleValue(), Converter.of(Units.parse("1/h")).toSi(value));
-        BigDecimal fahrenheit =
-                value.add(new BigDecimal("459.67")).multiply(BigDecimal.valueOf(5)).divide(BigDecimal.valueOf(9), exact);
+        BigDecimal fahrenheit = value.add(new BigDecimal("459.67"))
+                .multiply(BigDecimal.valueOf(5))
+                .divide(BigDecimal.valueOf(9), exact);
         assertEquals(fahrenheit.doubleValue(), Converter.of(Units.parse("degF")).toSi(value));
         assertEquals(
-                value.multiply(BigDecimal.valueOf(5)).divide(BigDecimal.valueOf(9), exact).doubleValue(),
+                value.multiply(BigDecimal.valueOf(5))
+                        .divide(BigDecimal.valueOf(9), exact)
+                        .doubleValue(),
                 Converter.of(Units.parse("degF")).differenceToSi(value));
         BigDecimal perMolecule = value.multiply(new BigDecimal("6.02214076E17"));
         assertEquals(

@@ -1,5 +1,7 @@
 package org.saddlebook.report.internal;
 
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -9,6 +11,7 @@ import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.presentation.api.QuantityText;
 import org.saddlebook.presentation.api.Rounding;
+import org.saddlebook.presentation.api.UnitText;
 import org.saddlebook.report.api.ReportPart;
 import org.saddlebook.report.api.ReportTools;
 
@@ -127,38 +130,74 @@ final class BarrierPart implements ReportPart {
         return text.length() == 0 ? String.join(", ", ids) : text.toString();
     }
 
+    /** One table for each temperature; cautions that all its laws share stand with the temperature. */
     private static String predictions(Node body, ReportTools tools) {
-        List<Node> rows = Trees.items(body, "predictions");
-        if (rows.isEmpty()) {
+        Map<String, List<Node>> byTemperature = byTemperature(Trees.items(body, "predictions"));
+        if (byTemperature.isEmpty()) {
             return "";
         }
-        StringBuilder html =
-                new StringBuilder("<h3>Predictions</h3>\n<div class=\"wide\"><table class=\"numbers\">\n<thead><tr>");
-        for (String head : List.of(
-                "at", "law", "<i>k</i>", "interval of the mean", "interval of a new run", "outside the data by")) {
-            html.append(Html.columnHead(head));
-        }
-        html.append("</tr></thead>\n<tbody>\n");
-        String last = "";
+        StringBuilder html = new StringBuilder("<h3>Predictions</h3>\n");
+        byTemperature.forEach((at, rows) -> {
+            List<String> shared = shared(rows, "k");
+            html.append("<div class=\"wide\"><table class=\"numbers\">\n<caption>At ")
+                    .append(Html.text(at))
+                    .append(", ")
+                    .append(Html.text(outside(rows.get(0))))
+                    .append(tools.cautions(shared))
+                    .append("</caption>\n<thead><tr>");
+            String unit = Trees.quantity(rows.get(0), "k")
+                    .map(k -> UnitText.forPeople(k.unit()))
+                    .orElse("");
+            html.append(Html.columnHead("law"));
+            for (String head : List.of("<i>k</i>", "interval of the mean", "interval of a new run")) {
+                html.append(Html.columnHead(head + "<br/><small>" + Html.text(unit) + "</small>"));
+            }
+            html.append("</tr></thead>\n<tbody>\n");
+            rows.forEach(row -> html.append(row(row, body, shared, tools)));
+            html.append("</tbody></table></div>\n");
+        });
+        return html.toString();
+    }
+
+    private static String row(Node row, Node body, List<String> shared, ReportTools tools) {
+        Optional<Node.Quantity> k = Trees.quantity(row, "k");
+        Optional<Node.Quantity> newRun = Trees.quantity(row, "kNewRun");
+        List<String> own = without(cautions(k), shared);
+        List<String> more = without(without(cautions(newRun), shared), own);
+        return "<tr>" + Html.rowHead(Html.text(titles(body, Set.of(Trees.text(row, "model")))))
+                + cell(k.map(BarrierPart::bare).map(QuantityText::of).orElse("not determined"), own, tools)
+                + cell(interval(k), List.of(), tools)
+                + cell(interval(newRun), more, tools)
+                + "</tr>\n";
+    }
+
+    /** Rows of predictions under the temperature they hold at, in order. */
+    static Map<String, List<Node>> byTemperature(List<Node> rows) {
+        Map<String, List<Node>> groups = new LinkedHashMap<>();
         for (Node row : rows) {
             String at = Trees.quantity(row, "temperature")
                     .map(QuantityText::temperature)
-                    .orElse("");
-            Optional<Node.Quantity> k = Trees.quantity(row, "k");
-            Optional<Node.Quantity> newRun = Trees.quantity(row, "kNewRun");
-            html.append("<tr").append(at.equals(last) ? ">" : " class=\"first\">");
-            html.append(Html.rowHead(at.equals(last) ? "″" : Html.text(at)));
-            html.append(Html.element("td", Html.text(titles(body, Set.of(Trees.text(row, "model"))))));
-            html.append(cautioned(k.map(QuantityText::of).orElse("not determined"), k, tools));
-            html.append(Html.element("td", Html.text(interval(k))));
-            List<String> more = newRun.map(Node.Quantity::cautions).orElse(List.of()).stream()
-                    .filter(id -> k.isEmpty() || !k.get().cautions().contains(id))
-                    .toList();
-            html.append(Html.element("td", Html.text(interval(newRun)) + tools.cautions(more)));
-            html.append(Html.element("td", Html.text(outside(row)))).append("</tr>\n");
-            last = at;
+                    .orElse("a temperature that is not stated");
+            groups.computeIfAbsent(at, key -> new ArrayList<>()).add(row);
         }
-        return html.append("</tbody></table></div>\n").toString();
+        return groups;
+    }
+
+    /** Ids of the cautions that the quantity carries in every row. */
+    static List<String> shared(List<Node> rows, String key) {
+        List<String> shared = new ArrayList<>(cautions(Trees.quantity(rows.get(0), key)));
+        for (Node row : rows) {
+            shared.retainAll(cautions(Trees.quantity(row, key)));
+        }
+        return shared;
+    }
+
+    static List<String> without(List<String> ids, List<String> shared) {
+        return ids.stream().filter(id -> !shared.contains(id)).toList();
+    }
+
+    static List<String> cautions(Optional<Node.Quantity> quantity) {
+        return quantity.map(Node.Quantity::cautions).orElse(List.of());
     }
 
     private static String outside(Node row) {
@@ -167,18 +206,25 @@ final class BarrierPart implements ReportPart {
             return "";
         }
         double kelvin = extrapolation.get().value().getAsDouble();
-        return kelvin == 0 ? "inside" : Rounding.significant(kelvin, 3) + "\u00a0K";
+        return kelvin == 0
+                ? "inside the measured temperatures"
+                : Rounding.significant(kelvin, 3) + "\u00a0K outside the measured temperatures";
     }
 
     private static String interval(Optional<Node.Quantity> quantity) {
-        return quantity.flatMap(q -> q.interval().map(i -> QuantityText.set(i, q.unit())))
+        return quantity.flatMap(Node.Quantity::interval)
+                .map(interval -> QuantityText.set(interval, "1"))
                 .orElse("none");
     }
 
-    /** A cell; with cautions its corner is dog-eared. */
-    static String cautioned(String text, Optional<Node.Quantity> quantity, ReportTools tools) {
-        List<String> ids = quantity.map(Node.Quantity::cautions).orElse(List.of());
-        String content = Html.element("span", "number", Html.text(text)) + tools.cautions(ids);
-        return ids.isEmpty() ? Html.element("td", content) : Html.element("td", "eared", content);
+    /** The same without its unit, which stands in the head of the column. */
+    private static Node.Quantity bare(Node.Quantity k) {
+        return new Node.Quantity(
+                k.value(), "1", k.standardUncertainty(), k.standardFactor(), k.interval(), k.cautions());
+    }
+
+    /** A cell with a number and the numbers of its cautions. */
+    static String cell(String text, List<String> cautions, ReportTools tools) {
+        return Html.element("td", Html.element("span", "number", Html.text(text)) + tools.cautions(cautions));
     }
 }

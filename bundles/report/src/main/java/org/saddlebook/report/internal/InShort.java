@@ -1,7 +1,9 @@
 package org.saddlebook.report.internal;
 
 import java.util.LinkedHashSet;
+import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import org.saddlebook.api.findings.Findings;
 import org.saddlebook.api.findings.Node;
@@ -25,8 +27,16 @@ final class InShort {
             } else if (section.id().equals("barrier")) {
                 barrier(html, section.body(), tools);
             } else if (section.id().equals("spontaneity")) {
-                String text = Trees.text(section.body(), "case");
-                html.append(text.isEmpty() ? "" : Html.element("p", Html.text(text)) + "\n");
+                Trees.texts(section.body(), "notes").stream()
+                        .limit(1)
+                        .forEach(note ->
+                                html.append(Html.element("p", Html.text(note))).append('\n'));
+                for (Node crossover : Trees.items(section.body(), "crossovers")) {
+                    if (crossover instanceof Node.Quantity quantity) {
+                        html.append(Html.element("p", "Crossover: " + tools.temperature(quantity) + "."))
+                                .append('\n');
+                    }
+                }
             }
         }
         return html.toString();
@@ -69,19 +79,29 @@ final class InShort {
                         .append(".</p>\n");
             }
         }
-        for (Node row : Trees.items(body, "predictions")) {
-            String model = Trees.text(row, "model");
-            var at = Trees.quantity(row, "temperature");
-            var k = Trees.quantity(row, "k");
-            if (at.isPresent() && k.isPresent() && (candidates.isEmpty() || candidates.contains(model))) {
-                html.append("<p>At ")
-                        .append(Html.text(QuantityText.temperature(at.get())))
-                        .append(" the law ")
-                        .append(Html.text(BarrierPart.titles(body, Set.of(model))))
-                        .append(" gives <i>k</i> ")
-                        .append(tools.quantity(k.get()))
+        BarrierPart.byTemperature(Trees.items(body, "predictions")).forEach((at, rows) -> {
+            StringBuilder values = new StringBuilder();
+            Set<String> cautions = new LinkedHashSet<>();
+            for (Node row : rows) {
+                String model = Trees.text(row, "model");
+                Optional<Node.Quantity> k = Trees.quantity(row, "k");
+                if (k.isPresent() && (candidates.isEmpty() || candidates.contains(model))) {
+                    values.append(values.length() == 0 ? "" : "; ")
+                            .append(Html.element("span", "number", Html.text(QuantityText.of(k.get()))))
+                            .append(" (")
+                            .append(Html.text(BarrierPart.titles(body, Set.of(model))))
+                            .append(')');
+                    cautions.addAll(k.get().cautions());
+                }
+            }
+            if (values.length() > 0) {
+                html.append("<p><i>k</i> at ")
+                        .append(Html.text(at))
+                        .append(tools.cautions(List.copyOf(cautions)))
+                        .append(": ")
+                        .append(values)
                         .append(".</p>\n");
             }
-        }
+        });
     }
 }

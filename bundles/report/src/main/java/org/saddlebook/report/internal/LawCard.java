@@ -61,7 +61,7 @@ final class LawCard {
             html.append("<tr>").append(Html.rowHead(Symbols.activation(member.getKey())));
             html.append(Html.element("td", Html.text(Symbols.name(member.getKey()))));
             String value = QuantityText.isUndetermined(quantity) ? "not determined" : QuantityText.of(quantity);
-            html.append(BarrierPart.cautioned(value, Optional.of(quantity), tools));
+            html.append(BarrierPart.cell(value, quantity.cautions(), tools));
             html.append(Html.element(
                             "td", Html.text(QuantityText.interval(quantity).orElse("none"))))
                     .append("</tr>\n");
@@ -109,7 +109,13 @@ final class LawCard {
             }
         }
         RoundedSet set = RoundedSet.reproducing(values, logarithmic, shown);
-        StringBuilder html = new StringBuilder("<p class=\"set\">To calculate with: ");
+        boolean open = false;
+        for (String symbol : symbols) {
+            open |= parameters.members().get(symbol) instanceof Node.Quantity quantity
+                    && QuantityText.isUndetermined(quantity);
+        }
+        StringBuilder html = new StringBuilder("<p class=\"set\">To calculate with");
+        html.append(open ? ", all together only, since single ones are not determined: " : ": ");
         for (int i = 0; i < n; i++) {
             html.append(i == 0 ? "" : "; ")
                     .append(Symbols.activation(symbols.get(i)))
@@ -179,7 +185,9 @@ final class LawCard {
                         "probability of a larger χ²", p >= 0 && p <= 1 ? Rounding.probability(p) : digits(p, 2))));
         Trees.number(node, "birgeRatio")
                 .ifPresent(r -> list.append(Html.entry("√(χ²/degrees of freedom), not applied", digits(r, 3))));
-        Trees.number(node, "rss").ifPresent(x -> list.append(Html.entry("weighted sum of squares", digits(x, 4))));
+        if (Trees.number(node, "chiSquared").isEmpty()) {
+            Trees.number(node, "rss").ifPresent(x -> list.append(Html.entry("sum of squares", digits(x, 4))));
+        }
         list.append(Html.entry(
                 "AICc",
                 Trees.number(node, "aicc").isPresent()

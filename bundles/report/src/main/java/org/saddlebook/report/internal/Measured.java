@@ -67,7 +67,7 @@ final class Measured {
             kelvin += ", u = " + Rounding.significant(point.kelvinUncertainty().getAsDouble(), 2) + "\u00a0K";
         }
         html.append(Html.element("td", Html.text(kelvin)));
-        html.append(Html.element("td", Rounding.significant(table.rateUnit().fromSi(point.rate()), 6)));
+        html.append(Html.element("td", Rounding.shortest(table.rateUnit().fromSi(point.rate()))));
         if (sure) {
             html.append(Html.element(
                     "td",

@@ -24,7 +24,7 @@ final class Page {
         FigureShelf shelf = new FigureShelf(renderer);
         StringBuilder body = new StringBuilder();
         Tools tools = new Tools(campaign, findings, numbers, shelf, "in-short");
-        body.append(stratum("In short", InShort.html(findings, tools), tools));
+        body.append(stratum("stratum short", "In short", InShort.html(findings, tools), tools));
         tools = new Tools(campaign, findings, numbers, shelf, "measured");
         body.append(stratum("Measured", Measured.html(campaign, tools), tools));
         for (Section section : findings.sections().values()) {
@@ -54,11 +54,17 @@ final class Page {
     }
 
     private static String stratum(String name, String content, Tools tools) {
+        return stratum("stratum", name, content, tools);
+    }
+
+    private static String stratum(String style, String name, String content, Tools tools) {
         if (content.isEmpty()) {
             return "";
         }
-        return "<section class=\"stratum\">\n<h2>" + Html.text(name) + "</h2>\n<div class=\"content\">\n" + content
-                + "</div>\n" + tools.margin() + "</section>\n";
+        // On paper and on narrow screens the cautions stand before what they belong to; wide ones put them in the
+        // margin.
+        return "<section class=\"" + style + "\">\n<h2>" + Html.text(name) + "</h2>\n" + tools.margin()
+                + "<div class=\"content\">\n" + content + "</div>\n</section>\n";
     }
 
     private static String style() {

@@ -21,27 +21,27 @@ final class SpontaneityPart implements ReportPart {
 
     @Override
     public String html(Section section, ReportTools tools) {
+        if (!(section.body() instanceof Node.Group body)) {
+            return tools.node("", section.body());
+        }
         StringBuilder head = new StringBuilder();
         StringBuilder list = new StringBuilder();
         StringBuilder rest = new StringBuilder();
         StringBuilder foot = new StringBuilder();
-        if (!(section.body() instanceof Node.Group body)) {
-            return tools.node("", section.body());
+        boolean verdict = false;
+        for (String note : Trees.texts(body, "notes")) {
+            head.append(verdict ? Html.element("p", Html.text(note)) : Html.element("p", "verdict", Html.text(note)));
+            head.append('\n');
+            verdict = true;
         }
         for (Map.Entry<String, Node> member : body.members().entrySet()) {
             String key = member.getKey();
             Node node = member.getValue();
-            if (key.equals("case") && node instanceof Node.Text text) {
-                head.append(Html.element("p", "verdict", Html.text(text.value())))
-                        .append('\n');
-            } else if (key.equals("notes") && node instanceof Node.Items) {
-                for (String note : Trees.texts(body, key)) {
-                    head.append(Html.element("p", Html.text(note))).append('\n');
-                }
-            } else if (node instanceof Node.Quantity quantity) {
-                list.append(Html.entry(
-                                SYMBOLS.getOrDefault(key, Html.text(Symbols.words(key))), tools.quantity(quantity)))
-                        .append('\n');
+            if (key.equals("notes") || (key.equals("possibleCases") && single(node))) {
+                continue;
+            }
+            if (node instanceof Node.Quantity || node instanceof Node.Scalar || node instanceof Node.Text) {
+                list.append(entry(key, node, tools)).append('\n');
             } else if (key.equals("crossovers") && node instanceof Node.Items items) {
                 rest.append(crossovers(items.items(), tools));
             } else if (key.equals("dG") && node instanceof Node.Items items) {
@@ -56,6 +56,23 @@ final class SpontaneityPart implements ReportPart {
         }
         String quantities = list.length() == 0 ? "" : "<dl>\n" + list + "</dl>\n";
         return head + quantities + rest + foot;
+    }
+
+    /** One possible case only: then it is the case. */
+    private static boolean single(Node cases) {
+        return cases instanceof Node.Items items && items.items().size() == 1;
+    }
+
+    private static String entry(String key, Node node, ReportTools tools) {
+        String name = SYMBOLS.getOrDefault(key, Html.text(Symbols.words(key)));
+        if (node instanceof Node.Quantity quantity) {
+            return Html.entry(name, tools.quantity(quantity));
+        }
+        return Html.entry(
+                name,
+                node instanceof Node.Scalar scalar
+                        ? DefaultPart.number(scalar.value())
+                        : Html.text(((Node.Text) node).value()));
     }
 
     private static String crossovers(List<Node> items, ReportTools tools) {
@@ -86,24 +103,35 @@ final class SpontaneityPart implements ReportPart {
     }
 
     private static String energies(Node.Items items, ReportTools tools) {
-        StringBuilder rows = new StringBuilder();
-        for (Node row : items.items()) {
-            Optional<Node.Quantity> at = Trees.quantity(row, "temperature");
-            Optional<Node.Quantity> energy = Trees.quantity(row, "dG");
-            if (at.isEmpty() || energy.isEmpty()) {
-                return tools.node("dG", items);
-            }
-            rows.append("<tr>").append(Html.rowHead(Html.text(QuantityText.temperature(at.get()))));
-            rows.append(BarrierPart.cautioned(QuantityText.of(energy.get()), energy, tools));
-            rows.append(Html.element(
-                            "td", Html.text(QuantityText.interval(energy.get()).orElse("none"))))
-                    .append("</tr>\n");
-        }
-        if (rows.length() == 0) {
+        if (items.items().isEmpty()) {
             return "";
         }
-        return "<div class=\"wide\"><table class=\"numbers\">\n<thead><tr>" + Html.columnHead("at")
-                + Html.columnHead("Δ<i>G</i>") + Html.columnHead("interval") + "</tr></thead>\n<tbody>\n" + rows
-                + "</tbody></table></div>\n";
+        for (Node row : items.items()) {
+            if (Trees.quantity(row, "temperature").isEmpty()
+                    || Trees.quantity(row, "dG").isEmpty()) {
+                return tools.node("dG", items);
+            }
+        }
+        List<String> shared = BarrierPart.shared(items.items(), "dG");
+        StringBuilder html =
+                new StringBuilder("<div class=\"wide\"><table class=\"numbers\">\n<caption>Δ<i>G</i> at single"
+                        + " temperatures" + tools.cautions(shared) + "</caption>\n<thead><tr>");
+        for (String head : List.of("at", "Δ<i>G</i>", "interval", "sign")) {
+            html.append(Html.columnHead(head));
+        }
+        html.append("</tr></thead>\n<tbody>\n");
+        for (Node row : items.items()) {
+            Node.Quantity energy = Trees.quantity(row, "dG").orElseThrow();
+            html.append("<tr>")
+                    .append(Html.rowHead(Html.text(QuantityText.temperature(
+                            Trees.quantity(row, "temperature").orElseThrow()))))
+                    .append(BarrierPart.cell(
+                            QuantityText.of(energy), BarrierPart.without(energy.cautions(), shared), tools))
+                    .append(Html.element(
+                            "td", Html.text(QuantityText.interval(energy).orElse("none"))))
+                    .append(Html.element("td", Html.text(Trees.text(row, "sign"))))
+                    .append("</tr>\n");
+        }
+        return html.append("</tbody></table></div>\n").toString();
     }
 }

@@ -78,7 +78,9 @@ final class Tools implements ReportTools {
         Optional<String> interval = QuantityText.interval(quantity);
         String html = Html.element("span", "number", Html.text(text));
         if (interval.isPresent() && !QuantityText.isUndetermined(quantity)) {
-            html += " " + Html.element("span", "interval", "(" + Html.text(interval.get()) + ")");
+            html += " "
+                    + Html.element(
+                            "span", "interval", "(" + Html.text(interval.get().replace(" %", "\u00a0%")) + ")");
         }
         return html + cautions(quantity.cautions());
     }

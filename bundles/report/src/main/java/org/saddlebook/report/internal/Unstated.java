@@ -9,7 +9,7 @@ import org.saddlebook.api.findings.Findings;
 
 /**
  * What a defensible record holds and this report does not state. Follows the lists of ISO/IEC 17025:2017, 7.8.2 and IUPAC's
- * "Good reporting practice" (Pure Appl. Chem. 2021), shortened; it names gaps and fills none.
+ * "Good reporting practice" (doi:10.1515/pac-2020-0403), shortened; it names gaps and fills none.
  */
 final class Unstated {
     private Unstated() {}

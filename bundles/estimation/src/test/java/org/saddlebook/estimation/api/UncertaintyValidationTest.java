@@ -144,4 +144,53 @@ class UncertaintyValidationTest {
         assertTrue(InformationCriteria.aicc(10, 3, 4).isEmpty());
         assertTrue(InformationCriteria.aicc(10, 3, 5).isPresent());
     }
+
+    private static RobustFit stackloss(RobustLoss loss, double tolerance, int limit) throws IOException {
+        List<String[]> rows = table("stackloss");
+        double[][] design = new double[rows.size()][];
+        double[] measured = new double[rows.size()];
+        for (int i = 0; i < design.length; i++) {
+            String[] row = rows.get(i);
+            design[i] =
+                    new double[] {1, Double.parseDouble(row[0]), Double.parseDouble(row[1]), Double.parseDouble(row[2])
+                    };
+            measured[i] = Double.parseDouble(row[3]);
+        }
+        return assertInstanceOf(RobustFit.class, RobustRegression.fit(design, measured, null, loss, tolerance, limit));
+    }
+
+    @Test
+    void robustFitsOfTheStackLossComeOutToEveryPrintedDigit() throws IOException {
+        // Brownlee 1965; Venables & Ripley 2002, package MASS, function rlm with its own stopping rule (1e-4, 20
+        // iterations).
+        RobustFit huber = stackloss(RobustLoss.huber(), 1e-4, 20);
+        assertArrayEquals(new double[] {-41.0265, 0.8294, 0.9261, -0.1278}, huber.parameters(), 0.5e-4);
+        assertArrayEquals(new double[] {9.8073, 0.1112, 0.3034, 0.1289}, huber.standardErrors(), 0.5e-4);
+        assertEquals(2.441, huber.scale(), 0.5e-3);
+        RobustFit bisquare = stackloss(RobustLoss.bisquare(), 1e-4, 20);
+        assertArrayEquals(new double[] {-42.2853, 0.9275, 0.6507, -0.1123}, bisquare.parameters(), 0.5e-4);
+        assertArrayEquals(new double[] {9.5316, 0.1081, 0.2949, 0.1252}, bisquare.standardErrors(), 0.5e-4);
+        assertEquals(2.282, bisquare.scale(), 0.5e-3);
+        // R's digits beyond the printed ones.
+        assertEquals(-41.026531052233, huber.parameters()[0], 1e-10);
+        assertEquals(9.807347196401, huber.standardErrors()[0], 1e-10);
+        assertEquals(-42.285253687792, bisquare.parameters()[0], 1e-10);
+        assertEquals(0.1252292846308, bisquare.standardErrors()[3], 1e-12);
+        assertEquals(-39.919674420124, huber.ordinary().parameters()[0], 1e-11);
+    }
+
+    @Test
+    void robustFitsOfTheStackLossAreThoseOfTheFullyConvergedReference() throws IOException {
+        // R run on with a tolerance of 1e-12 (stackloss.json, "fully_converged").
+        RobustFit huber = stackloss(RobustLoss.huber(), 1e-12, 1000);
+        assertArrayEquals(
+                new double[] {-41.026485373295, 0.8293857702537, 0.926059415549, -0.1278463179654},
+                huber.parameters(),
+                1e-9);
+        assertEquals(9.806872294357, huber.standardErrors()[0], 1e-9);
+        assertEquals(2.440489045994, huber.scale(), 1e-10);
+        RobustFit bisquare = stackloss(RobustLoss.bisquare(), 1e-12, 1000);
+        assertEquals(9.531385661491, bisquare.standardErrors()[0], 1e-9);
+        assertEquals(2.281853314567, bisquare.scale(), 1e-10);
+    }
 }

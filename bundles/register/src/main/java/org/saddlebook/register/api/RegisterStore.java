@@ -23,7 +23,7 @@ public interface RegisterStore extends AutoCloseable {
      */
     void put(Digest part, InputStream bytes) throws RegisterException;
 
-    /** The bytes of a part, as stored; a missing part is a {@link RegisterException}. */
+    /** The bytes of a part, as stored; a missing part is a {@link RegisterDamagedException}. */
     InputStream part(Digest part) throws RegisterException;
 
     /** Every part stored. */

@@ -41,9 +41,18 @@ final class Rules implements Sealer {
                 draft.reason(),
                 draft.target(),
                 draft.parts());
-        byte[] bytes = RecordJson.canonical(record);
+        byte[] bytes = canonical(record);
         Digest leaf = MerkleTree.leaf(bytes);
         return new SealedRecord(bytes, new Receipt(number, leaf, head.grow(leaf)));
+    }
+
+    private static byte[] canonical(LogRecord record) throws RegisterException {
+        try {
+            return RecordJson.canonical(record);
+        } catch (IllegalArgumentException e) {
+            throw new RegisterException(
+                    "A name, meaning, reason or title has no UTF-8 form (" + e.getMessage() + "). Type it again.", e);
+        }
     }
 
     private void checkTarget(Draft draft, long target) throws RegisterException {

@@ -138,7 +138,7 @@ final class Verifier {
         }
     }
 
-    private void part(Digest digest, List<Use> named) {
+    private void part(Digest digest, List<Use> named) throws RegisterException {
         MessageDigest sha = Digest.algorithm();
         long size = 0;
         try (InputStream in = store.part(digest)) {
@@ -147,7 +147,7 @@ final class Verifier {
                 sha.update(buffer, 0, count);
                 size += count;
             }
-        } catch (IOException e) {
+        } catch (RegisterDamagedException e) {
             for (Use use : named) {
                 differ(
                         "part-missing",
@@ -156,6 +156,10 @@ final class Verifier {
                                 + e.getMessage());
             }
             return;
+        } catch (RegisterException e) {
+            throw e; // a lock or a failing disk is no difference
+        } catch (IOException e) {
+            throw new RegisterException("A part cannot be read: " + e.getMessage(), e);
         }
         bytes += size;
         Digest found = Digest.of(sha.digest());

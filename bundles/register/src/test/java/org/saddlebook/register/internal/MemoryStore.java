@@ -12,6 +12,7 @@ import org.saddlebook.register.api.Digest;
 import org.saddlebook.register.api.Draft;
 import org.saddlebook.register.api.PartEntry;
 import org.saddlebook.register.api.Receipt;
+import org.saddlebook.register.api.RegisterDamagedException;
 import org.saddlebook.register.api.RegisterException;
 import org.saddlebook.register.api.RegisterStore;
 import org.saddlebook.register.api.SealedRecord;
@@ -21,6 +22,8 @@ import org.saddlebook.register.api.Sealer;
 final class MemoryStore implements RegisterStore {
     final List<SealedRecord> records = new ArrayList<>();
     final Map<Digest, byte[]> parts = new LinkedHashMap<>();
+
+    boolean broken;
 
     @Override
     public String location() {
@@ -42,9 +45,12 @@ final class MemoryStore implements RegisterStore {
 
     @Override
     public InputStream part(Digest part) throws RegisterException {
+        if (broken) {
+            throw new RegisterException("the disk does not answer");
+        }
         byte[] bytes = parts.get(part);
         if (bytes == null) {
-            throw new RegisterException("no part " + part);
+            throw new RegisterDamagedException("no part " + part);
         }
         return new ByteArrayInputStream(bytes);
     }

@@ -155,6 +155,21 @@ class StoredRegisterTest {
     }
 
     @Test
+    void doesNotTakeAFailingDiskForADifference() throws Exception {
+        enter("one", "1");
+        store.broken = true;
+        assertThrows(RegisterException.class, () -> verify());
+    }
+
+    @Test
+    void refusesTextWithoutAUtf8Form() {
+        String message = assertThrows(RegisterException.class, () -> enter("half \ud83d", "1"))
+                .getMessage();
+        assertTrue(message.contains("no UTF-8 form"), message);
+        assertTrue(store.records.isEmpty());
+    }
+
+    @Test
     void namesARecordOfWhichAnyOneByteWasFlipped() throws Exception {
         fill(5);
         SealedRecord honest = store.records.get(2);

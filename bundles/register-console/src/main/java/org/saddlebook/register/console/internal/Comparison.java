@@ -2,6 +2,7 @@ package org.saddlebook.register.console.internal;
 
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -11,6 +12,7 @@ import org.saddlebook.json.api.CanonicalJson;
 import org.saddlebook.json.api.JsonArray;
 import org.saddlebook.json.api.JsonNumber;
 import org.saddlebook.json.api.JsonObject;
+import org.saddlebook.json.api.JsonString;
 import org.saddlebook.json.api.JsonValue;
 
 /**
@@ -112,7 +114,7 @@ final class Comparison {
 
     /** The bundles of findings, name to "version, SHA-256", in their order. */
     static Map<String, String> bundles(JsonObject findings) {
-        Map<String, String> bundles = new java.util.LinkedHashMap<>();
+        Map<String, String> bundles = new LinkedHashMap<>();
         if (findings.get("software").orElse(null) instanceof JsonObject software
                 && software.get("bundles").orElse(null) instanceof JsonArray list) {
             for (JsonValue item : list.items()) {
@@ -125,8 +127,6 @@ final class Comparison {
     }
 
     private static String word(JsonObject object, String key) {
-        return object.get(key).orElse(null) instanceof org.saddlebook.json.api.JsonString text
-                ? text.value()
-                : "not stated";
+        return object.get(key).orElse(null) instanceof JsonString text ? text.value() : "not stated";
     }
 }

@@ -1,5 +1,6 @@
 package org.saddlebook.register.sqlite.internal;
 
+import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Random;
@@ -24,6 +25,7 @@ final class EnteringProcess {
         if (System.in.read() < 0) {
             return;
         }
+        endWithTheTest();
         try (Register register = Fixture.open(file, Opening.CREATE)) {
             for (int i = 0; i < count; i++) {
                 byte[] campaign = new byte[random.nextInt(2_000)];
@@ -39,6 +41,22 @@ final class EnteringProcess {
                 say("ack " + receipt.number() + " " + receipt.head().root());
             }
         }
+    }
+
+    /** Standard input ends when the test's own process does: nobody is left entering. */
+    private static void endWithTheTest() {
+        Thread watch = new Thread(() -> {
+            try {
+                while (System.in.read() >= 0) {
+                    // nothing more is said to this process
+                }
+            } catch (IOException e) {
+                // the pipe broke, which says the same
+            }
+            Runtime.getRuntime().halt(1);
+        });
+        watch.setDaemon(true);
+        watch.start();
     }
 
     private static void say(String line) {

@@ -8,6 +8,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.attribute.FileTime;
 import java.time.Instant;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
@@ -41,7 +42,7 @@ class NativeLibraryTest {
         damaged[damaged.length / 2] ^= 1;
         Files.write(library, damaged);
         open();
-        assertEquals(-1, java.util.Arrays.mismatch(honest, Files.readAllBytes(library)));
+        assertEquals(-1, Arrays.mismatch(honest, Files.readAllBytes(library)));
     }
 
     /** Opens a register with this cache, in another process. */

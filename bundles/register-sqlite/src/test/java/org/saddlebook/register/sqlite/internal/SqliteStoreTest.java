@@ -14,8 +14,10 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.attribute.PosixFilePermissions;
 import java.sql.Connection;
+import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.sql.Statement;
+import java.time.Clock;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
@@ -203,7 +205,7 @@ class SqliteStoreTest {
     @Test
     void recordsNothingWhenTheDiskIsFullAndGoesOnWhenThereIsRoom() throws Exception {
         SqliteStore store = create();
-        try (Register register = new StoredRegister(store, java.time.Clock.systemUTC())) {
+        try (Register register = new StoredRegister(store, Clock.systemUTC())) {
             Fixture.enter(register, "1");
             // SQLite's own limit gives the same error as a full disk (SQLITE_FULL).
             long pages = Schema.number(store.connection, "PRAGMA page_count");
@@ -220,7 +222,7 @@ class SqliteStoreTest {
     @Test
     void saysSoWhenAnotherProcessHoldsTheLock() throws Exception {
         SqliteStore store = create();
-        try (Register register = new StoredRegister(store, java.time.Clock.systemUTC());
+        try (Register register = new StoredRegister(store, Clock.systemUTC());
                 Connection other = new JDBC().connect("jdbc:sqlite:" + file(), new Properties());
                 Statement statement = other.createStatement()) {
             ((SQLiteConnection) store.connection).setBusyTimeout(1);
@@ -236,7 +238,7 @@ class SqliteStoreTest {
     @Test
     void saysSoWhenTheRegisterIsReadOnly() throws Exception {
         SqliteStore store = create();
-        try (Register register = new StoredRegister(store, java.time.Clock.systemUTC())) {
+        try (Register register = new StoredRegister(store, Clock.systemUTC())) {
             // A file without write permission gives the same error (SQLITE_READONLY); permissions do not bind root.
             try (Statement statement = store.connection.createStatement()) {
                 statement.execute("PRAGMA query_only = ON");
@@ -252,7 +254,7 @@ class SqliteStoreTest {
         SqliteStore store = create();
         assertEquals(3, Schema.number(store.connection, "PRAGMA synchronous"), "3 is EXTRA");
         try (Statement statement = store.connection.createStatement();
-                java.sql.ResultSet row = statement.executeQuery("PRAGMA journal_mode")) {
+                ResultSet row = statement.executeQuery("PRAGMA journal_mode")) {
             assertEquals("delete", row.getString(1));
         }
         store.close();

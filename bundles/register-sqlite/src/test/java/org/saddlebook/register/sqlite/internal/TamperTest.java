@@ -5,7 +5,13 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.sql.Connection;
+import java.sql.ResultSet;
+import java.sql.SQLException;
+import java.sql.Statement;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Properties;
 import java.util.Random;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -14,8 +20,10 @@ import org.saddlebook.register.api.Checkpoint;
 import org.saddlebook.register.api.Head;
 import org.saddlebook.register.api.Register;
 import org.saddlebook.register.api.RegisterDamagedException;
+import org.saddlebook.register.api.RegisterException;
 import org.saddlebook.register.api.RegisterStoreFactory.Opening;
 import org.saddlebook.register.api.Verification;
+import org.sqlite.JDBC;
 
 /** Somebody with the right to write the file changes it: the check names what. */
 class TamperTest {
@@ -41,22 +49,23 @@ class TamperTest {
 
     /** Changes the file, puts the triggers back as they were, and checks. */
     private List<String> after(String... changes) throws Exception {
-        String[] triggers;
-        try (java.sql.Connection connection =
-                        new org.sqlite.JDBC().connect("jdbc:sqlite:" + file, new java.util.Properties());
-                java.sql.Statement statement = connection.createStatement();
-                java.sql.ResultSet rows =
-                        statement.executeQuery("SELECT sql FROM sqlite_master WHERE type = 'trigger'")) {
-            java.util.List<String> found = new java.util.ArrayList<>();
-            while (rows.next()) {
-                found.add(rows.getString(1));
-            }
-            triggers = found.toArray(new String[0]);
-        }
+        String[] triggers = triggers();
         Fixture.sql(file, UNLOCK);
         Fixture.sql(file, changes);
         Fixture.sql(file, triggers);
         return Fixture.codes(Fixture.verify(file));
+    }
+
+    private String[] triggers() throws SQLException {
+        List<String> found = new ArrayList<>();
+        try (Connection connection = new JDBC().connect("jdbc:sqlite:" + file, new Properties());
+                Statement statement = connection.createStatement();
+                ResultSet rows = statement.executeQuery("SELECT sql FROM sqlite_master WHERE type = 'trigger'")) {
+            while (rows.next()) {
+                found.add(rows.getString(1));
+            }
+        }
+        return found.toArray(new String[0]);
     }
 
     @Test
@@ -177,7 +186,7 @@ class TamperTest {
                 } else {
                     found++;
                 }
-            } catch (org.saddlebook.register.api.RegisterException e) {
+            } catch (RegisterException e) {
                 found++;
                 assertTrue(e.getMessage().length() > 20, where);
                 if (e instanceof RegisterDamagedException) {

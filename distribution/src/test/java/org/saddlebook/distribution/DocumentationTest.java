@@ -13,6 +13,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.TimeUnit;
 import java.util.stream.Stream;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.Timeout;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -48,6 +49,17 @@ class DocumentationTest {
                 check(document, run);
             }
         }
+    }
+
+    @Test
+    void theDocumentsShowCommands() throws IOException {
+        int commands = 0;
+        for (String document : documents().toList()) {
+            for (DocumentedStep step : DocumentedStep.of(ROOT.resolve(document))) {
+                commands += step instanceof DocumentedStep.Run ? 1 : 0;
+            }
+        }
+        assertTrue(commands >= 20, "only " + commands + " commands were found: was the form of the blocks changed?");
     }
 
     private void check(String document, DocumentedStep.Run run) throws IOException, InterruptedException {

@@ -53,7 +53,7 @@ final class ShownOutput {
             boolean equal = true;
             for (int i = 0; equal && i < passage.size(); i++) {
                 equal = pattern(passage.get(i))
-                        .matcher(printed.get(start + i).stripTrailing())
+                        .matcher(plain(printed.get(start + i)))
                         .matches();
             }
             if (equal) {
@@ -63,9 +63,14 @@ final class ShownOutput {
         return -1;
     }
 
+    /** Documents are typed with ordinary spaces where the product prints spaces that do not break. */
+    private static String plain(String line) {
+        return line.replace('\u00a0', ' ').stripTrailing();
+    }
+
     private static Pattern pattern(String shown) {
         StringBuilder regex = new StringBuilder();
-        for (String piece : shown.stripTrailing().split(ANY_TEXT, -1)) {
+        for (String piece : plain(shown).split(ANY_TEXT, -1)) {
             regex.append(regex.isEmpty() ? "" : ".*").append(Pattern.quote(piece));
         }
         return Pattern.compile(regex.toString());

@@ -5,7 +5,9 @@ public enum ErrorModel {
     /** Constant relative error of unknown size: least squares on ln k, scale estimated from the scatter. */
     CONSTANT_RELATIVE("constant-relative"),
     /** Stated standard uncertainties of k: weights (k/u)^2 on ln k, never rescaled. */
-    STATED("stated");
+    STATED("stated"),
+    /** Constant absolute error of unknown size: least squares on k itself, scale estimated from the scatter. */
+    CONSTANT_ABSOLUTE("constant-absolute");
 
     private final String key;
 

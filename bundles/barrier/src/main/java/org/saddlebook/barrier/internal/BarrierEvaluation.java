@@ -55,9 +55,11 @@ final class BarrierEvaluation {
         }
         SharedErrors shared;
         double tolerance;
+        NextMeasurement.Allowed allowed;
         try {
             shared = SharedErrors.read(settings);
             tolerance = SharedErrors.tolerance(settings);
+            allowed = SharedErrors.allowed(settings);
         } catch (IllegalArgumentException unusable) {
             return Section.refused(SECTION, TITLE, String.valueOf(unusable.getMessage()));
         }
@@ -118,10 +120,22 @@ final class BarrierEvaluation {
         }
         if (!fitted.isEmpty()) {
             Set<String> left = candidates;
-            Contained<Node.Group> reach = task.contain(
-                    "the error budget",
-                    () -> new Reach(fitted, left, choices.level(), tolerance, shared.targetOnSameSensor())
-                            .node(choices.targetsKelvin()));
+            Reach limits = new Reach(fitted, left, choices.level(), tolerance, shared.targetOnSameSensor(), allowed);
+            Contained<Node.Group> reach = task.contain("the error budget", () -> limits.node(choices.targetsKelvin()));
+            if (limits.carrying().isPresent()) {
+                String id = limits.carrying().get().id();
+                Contained<Node.Table> errorModels = task.contain(
+                        "the comparison of error models",
+                        () -> new ErrorModelComparison(table, choices.level(), choices.targetsKelvin())
+                                .of(
+                                        installed.get(id).model(),
+                                        context(id, context),
+                                        table.rateUnit(),
+                                        new CancelCheck(task)));
+                if (errorModels instanceof Contained.Answer<Node.Table> compared) {
+                    body.put("errorModels", compared.value());
+                }
+            }
             if (reach instanceof Contained.Answer<Node.Group> answer) {
                 answer.value().members().forEach(body::put);
             } else if (reach instanceof Contained.Broke<Node.Group> broke) {

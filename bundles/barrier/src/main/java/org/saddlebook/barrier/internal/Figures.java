@@ -43,8 +43,10 @@ final class Figures {
         List<Layer> layers = new ArrayList<>();
         OptionalDouble scatter = shown.newRunScatter();
         if (scatter.isPresent()) {
-            layers.add(band(Layer.Kind.NEW_RUN_BAND, "new run", shown, grid, scatter.getAsDouble()));
-            layers.add(band(Layer.Kind.CONFIDENCE_BAND, "mean", shown, grid, 0));
+            layers.add(band(Layer.Kind.NEW_RUN_BAND, shown.title() + ", new run", shown, grid, scatter.getAsDouble()));
+        }
+        if (shown.scale().isPresent()) {
+            layers.add(band(Layer.Kind.CONFIDENCE_BAND, shown.title() + ", mean", shown, grid, 0));
         }
         for (FittedLaw law : laws) {
             double[] y = new double[grid.length];
@@ -55,7 +57,7 @@ final class Figures {
         }
         layers.add(points(Layer.Kind.EXCLUDED, true));
         layers.add(points(Layer.Kind.MEASURED, false));
-        if (!targets.isEmpty() && scatter.isPresent()) {
+        if (!targets.isEmpty() && shown.scale().isPresent()) {
             double[] x = new double[targets.size()];
             for (int i = 0; i < x.length; i++) {
                 x[i] = targets.get(i);

@@ -2,6 +2,7 @@ package org.saddlebook.barrier.internal;
 
 import java.util.List;
 import java.util.OptionalDouble;
+import org.saddlebook.api.campaign.ErrorModel;
 import org.saddlebook.api.model.Derived;
 import org.saddlebook.api.model.Parameter;
 import org.saddlebook.api.model.RateFunction;
@@ -129,8 +130,14 @@ record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurement
         return estimate(value, gradient);
     }
 
-    /** Standard deviation in ln k of one more run; absent when the scale of the errors is unknown. */
+    /**
+     * Standard deviation in ln k of one more run; absent when the scale of the errors is unknown, or when the error of k
+     * is an absolute one and has no fixed size in ln k.
+     */
     OptionalDouble newRunScatter() {
+        if (data.errorModel() == ErrorModel.CONSTANT_ABSOLUTE) {
+            return OptionalDouble.empty();
+        }
         if (data.stated()) {
             return OptionalDouble.of(data.typicalRelativeUncertainty());
         }

@@ -81,6 +81,10 @@ final class LawNode {
             new TreeMap<>(heldParameters).forEach(held::put);
             tree.put("held", held.group());
         }
+        Tree names = new Tree();
+        law.parameters().forEach(parameter -> names.put(parameter.symbol(), parameter.name()));
+        law.law().derived().forEach(each -> names.put(each.symbol(), each.name()));
+        tree.put("names", names.group());
         double[][] covariance = law.covariance();
         if (covariance.length > 0) {
             tree.put("covariance", covariance(law, basis, covariance));

@@ -45,7 +45,9 @@ final class Measurements {
         for (double u : relative) {
             largest = Math.max(largest, u);
         }
-        response = largest > LARGEST_RELATIVE_UNCERTAINTY ? Response.RATE : Response.LN_RATE;
+        response = largest > LARGEST_RELATIVE_UNCERTAINTY || errorModel == ErrorModel.CONSTANT_ABSOLUTE
+                ? Response.RATE
+                : Response.LN_RATE;
         weights = new double[relative.length];
         for (int i = 0; i < weights.length; i++) {
             // On k the weight is 1/u(k)^2; u(k) = relative * k, and the response is k in units of exp(lnRate[0]).
@@ -129,10 +131,10 @@ final class Measurements {
 
     /** Weights on ln k, whatever the response; null where all are 1. */
     double[] weightsOnLogarithm() {
-        if (relative.length == 0) {
+        if (errorModel == ErrorModel.CONSTANT_RELATIVE) {
             return null;
         }
-        double[] result = new double[relative.length];
+        double[] result = new double[kelvin.length];
         for (int i = 0; i < result.length; i++) {
             result[i] = weightOnLogarithm(i);
         }
@@ -208,6 +210,10 @@ final class Measurements {
     }
 
     private double weightOnLogarithm(int i) {
+        if (errorModel == ErrorModel.CONSTANT_ABSOLUTE) {
+            // u(ln k) = u/k: only ratios of weights matter.
+            return StrictMath.exp(2 * (lnRate[i] - lnRate[0]));
+        }
         return relative.length == 0 ? 1 : 1 / (relative[i] * relative[i]);
     }
 }

@@ -23,6 +23,7 @@ final class Reach {
     private final double level;
     private final double tolerance;
     private final boolean onSameSensor;
+    private final NextMeasurement.Allowed allowed;
 
     /**
      * A reach.
@@ -31,12 +32,19 @@ final class Reach {
      * @param candidates ids of those that the comparison left standing
      * @param tolerance largest relative half-width of the interval of k, as exp(half-width) - 1
      */
-    Reach(List<FittedLaw> laws, Set<String> candidates, double level, double tolerance, boolean onSameSensor) {
+    Reach(
+            List<FittedLaw> laws,
+            Set<String> candidates,
+            double level,
+            double tolerance,
+            boolean onSameSensor,
+            NextMeasurement.Allowed allowed) {
         this.laws = laws;
         this.candidates = candidates;
         this.level = level;
         this.tolerance = tolerance;
         this.onSameSensor = onSameSensor;
+        this.allowed = allowed;
     }
 
     /** Members {@code budgets} and {@code honestRange}; empty when no law has an uncertainty. */
@@ -52,11 +60,19 @@ final class Reach {
                 tree.put("budgets", new Node.Items(budgets));
             }
             tree.put("honestRange", honestRange(law.get()));
+            if (!targets.isEmpty()) {
+                NextMeasurement next = new NextMeasurement(law.get(), level, tolerance, onSameSensor, allowed);
+                List<Node> plans = new ArrayList<>();
+                for (double kelvin : targets) {
+                    plans.add(next.node(kelvin));
+                }
+                tree.put("nextMeasurements", new Node.Items(plans));
+            }
         }
         return tree.group();
     }
 
-    private Optional<FittedLaw> carrying() {
+    Optional<FittedLaw> carrying() {
         return laws.stream()
                 .filter(law -> law.scale().isPresent() && (candidates.isEmpty() || candidates.contains(law.id())))
                 .findFirst();

@@ -3,6 +3,7 @@ package org.saddlebook.barrier.internal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.quantity.Constants;
 import org.saddlebook.api.quantity.Dimension;
@@ -30,7 +31,15 @@ record SharedErrors(
     static final SharedErrors NONE = new SharedErrors(0, 0, Constants.ZERO_CELSIUS, 0, false);
 
     private static final List<String> KEYS = List.of(
-            "thermometerOffset", "thermometerGain", "gainFrom", "concentrationUncertainty", "targets", "tolerance");
+            "thermometerOffset",
+            "thermometerGain",
+            "gainFrom",
+            "concentrationUncertainty",
+            "targets",
+            "tolerance",
+            "measureFrom",
+            "measureTo",
+            "runCost");
 
     /**
      * One cause at one standard uncertainty.
@@ -133,6 +142,28 @@ record SharedErrors(
         return settings.isPresent() && settings.get() instanceof Node.Group group
                 ? fraction(group, "tolerance", Comparison.TOLERANCE)
                 : Comparison.TOLERANCE;
+    }
+
+    /** Where and at what cost the settings allow further runs. */
+    static NextMeasurement.Allowed allowed(Optional<Node> settings) {
+        if (settings.isEmpty() || !(settings.get() instanceof Node.Group group)) {
+            return new NextMeasurement.Allowed(OptionalDouble.empty(), OptionalDouble.empty(), false);
+        }
+        OptionalDouble from = limit(group, "measureFrom");
+        OptionalDouble to = limit(group, "measureTo");
+        if (from.isPresent() && to.isPresent() && !(from.getAsDouble() <= to.getAsDouble())) {
+            throw new IllegalArgumentException("The setting barrier.measureFrom must not lie above barrier.measureTo.");
+        }
+        String cost = group.get("runCost").isPresent() ? TreeReader.text(group, "runCost") : "half-life";
+        if (!cost.equals("half-life") && !cost.equals("equal")) {
+            throw new IllegalArgumentException(
+                    "The setting barrier.runCost must be half-life or equal; found " + cost + ".");
+        }
+        return new NextMeasurement.Allowed(from, to, cost.equals("equal"));
+    }
+
+    private static OptionalDouble limit(Node.Group group, String key) {
+        return group.get(key).isPresent() ? OptionalDouble.of(temperature(group, key)) : OptionalDouble.empty();
     }
 
     private static double fraction(Node.Group group, String key, double otherwise) {

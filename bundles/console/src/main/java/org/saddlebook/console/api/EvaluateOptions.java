@@ -20,7 +20,7 @@ import org.saddlebook.units.api.Units;
 public final class EvaluateOptions {
     /** The options, for the synopsis of a verb. */
     public static final String SYNOPSIS = "[--at T]... [--model ID]... [--standard STATE] [--seed N]"
-            + " [--errors constant-relative|stated] [--level P]";
+            + " [--errors constant-relative|stated|constant-absolute] [--level P]";
 
     /** What each means, for the help of a verb; lines of plain text. */
     public static final String HELP = """
@@ -30,6 +30,7 @@ public final class EvaluateOptions {
             --seed N          seed of random numbers, 0 to 9007199254740991
             --errors MODEL    constant-relative: one relative error, estimated from the scatter
                               stated: the uncertainties in the table
+                              constant-absolute: one error of k itself, estimated from the scatter
             --level P         coverage probability of intervals, above 0.5 and below 1""";
 
     private static final List<String> VALUED =

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.campaign.Choices;
+import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.api.reader.Imported.Directive;
 
@@ -25,7 +26,18 @@ enum Statement {
     ENTHALPY,
     ENTROPY,
     CORRELATION,
-    COVARIANCE;
+    COVARIANCE,
+    THERMOMETER_OFFSET,
+    THERMOMETER_GAIN,
+    CONCENTRATION_UNCERTAINTY,
+    TARGETS,
+    TOLERANCE,
+    MEASURE_FROM,
+    MEASURE_TO,
+    RUN_COST;
+
+    private static final String SPONTANEITY = "spontaneity";
+    private static final String BARRIER = "barrier";
 
     /** Words of their own that only look like one of ours. */
     private static final List<String> UNRELATED = List.of("dg", "\u03b4g", "\u2206g", "delta g", "ph");
@@ -49,6 +61,14 @@ enum Statement {
             case ENTROPY -> List.of("ds", "\u03b4s", "\u2206s", "delta s");
             case CORRELATION -> List.of("correlation(dh,ds)", "correlation(dh, ds)", "corr(dh,ds)", "corr(dh, ds)");
             case COVARIANCE -> List.of("cov(dh,ds)", "cov(dh, ds)", "covariance(dh,ds)", "covariance(dh, ds)");
+            case THERMOMETER_OFFSET -> List.of("thermometer offset");
+            case THERMOMETER_GAIN -> List.of("thermometer gain");
+            case CONCENTRATION_UNCERTAINTY -> List.of("concentration uncertainty");
+            case TARGETS -> List.of("target temperatures");
+            case TOLERANCE -> List.of("tolerance of k");
+            case MEASURE_FROM -> List.of("measure from");
+            case MEASURE_TO -> List.of("measure to");
+            case RUN_COST -> List.of("run cost");
         };
     }
 
@@ -114,10 +134,27 @@ enum Statement {
             case AT -> campaign.withChoices(choices.withTargetsKelvin(ValueReader.targets(directive, campaign)));
             case LEVEL -> campaign.withChoices(choices.withLevel(ValueReader.level(directive)));
             case SEED -> campaign.withChoices(choices.withSeed(ValueReader.seed(directive)));
-            case ENTHALPY -> Thermodynamics.put(campaign, "dH", ValueReader.energy(directive));
-            case ENTROPY -> Thermodynamics.put(campaign, "dS", ValueReader.entropy(directive));
-            case CORRELATION -> Thermodynamics.put(campaign, "correlation", ValueReader.correlation(directive));
-            case COVARIANCE -> Thermodynamics.put(campaign, "covariance", ValueReader.covariance(directive));
+            case ENTHALPY -> Settings.put(campaign, SPONTANEITY, "dH", ValueReader.energy(directive));
+            case ENTROPY -> Settings.put(campaign, SPONTANEITY, "dS", ValueReader.entropy(directive));
+            case CORRELATION -> Settings.put(campaign, SPONTANEITY, "correlation", ValueReader.correlation(directive));
+            case COVARIANCE -> Settings.put(campaign, SPONTANEITY, "covariance", ValueReader.covariance(directive));
+            case THERMOMETER_OFFSET ->
+                Settings.put(campaign, BARRIER, "thermometerOffset", ValueReader.difference(directive));
+            case THERMOMETER_GAIN ->
+                Settings.put(campaign, BARRIER, "thermometerGain", ValueReader.fraction(directive));
+            case CONCENTRATION_UNCERTAINTY ->
+                Settings.put(campaign, BARRIER, "concentrationUncertainty", ValueReader.fraction(directive));
+            case TARGETS ->
+                Settings.put(campaign, BARRIER, "targets", ValueReader.word(directive, List.of("true", "same-sensor")));
+            case TOLERANCE -> Settings.put(campaign, BARRIER, "tolerance", ValueReader.fraction(directive));
+            case MEASURE_FROM -> Settings.put(campaign, BARRIER, "measureFrom", kelvin(directive));
+            case MEASURE_TO -> Settings.put(campaign, BARRIER, "measureTo", kelvin(directive));
+            case RUN_COST ->
+                Settings.put(campaign, BARRIER, "runCost", ValueReader.word(directive, List.of("half-life", "equal")));
         };
+    }
+
+    private static Node kelvin(Directive directive) throws InputException {
+        return Node.Quantity.of(ValueReader.kelvin(directive, directive.value()), "K");
     }
 }

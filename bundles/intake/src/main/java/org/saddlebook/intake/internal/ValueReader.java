@@ -142,8 +142,38 @@ final class ValueReader {
         try {
             return ErrorModel.of(directive.value());
         } catch (IllegalArgumentException e) {
-            throw wrong(directive, "one of constant-relative, stated", "Choose one of these words.");
+            throw wrong(directive, "one of constant-relative, stated, constant-absolute", "Choose one of these words.");
         }
+    }
+
+    /** A difference of temperatures, as a quantity in K. */
+    static Node difference(Directive directive) throws InputException {
+        Measured measured = measured(directive, Dimension.TEMPERATURE, "a difference of temperatures", "0.3 K");
+        if (!(measured.value() > 0)) {
+            throw wrong(directive, "a difference above zero, for example 0.3 K", "Correct the number.");
+        }
+        return Node.Quantity.of(Converter.of(measured.unit()).differenceToSi(Numerals.shortest(measured.value())), "K");
+    }
+
+    /** A fraction between 0 and 1, as a number or in percent. */
+    static Node fraction(Directive directive) throws InputException {
+        String text = directive.value();
+        boolean percent = text.endsWith("%");
+        double value =
+                number(directive, percent ? text.substring(0, text.length() - 1).strip() : text);
+        double fraction = percent ? Numerals.shortest(value).movePointLeft(2).doubleValue() : value;
+        if (!(fraction > 0 && fraction < 1)) {
+            throw wrong(directive, "a fraction between 0 and 1, for example 0.02 or 2 %", "Correct the number.");
+        }
+        return new Node.Scalar(fraction);
+    }
+
+    /** One of a few words. */
+    static Node word(Directive directive, List<String> words) throws InputException {
+        if (!words.contains(directive.value())) {
+            throw wrong(directive, "one of " + String.join(", ", words), "Choose one of these words.");
+        }
+        return new Node.Text(directive.value());
     }
 
     static Node energy(Directive directive) throws InputException {

@@ -117,6 +117,46 @@ class TableImportTest {
     }
 
     @Test
+    void followsStatementsOnErrorsCommonToAllRunsAndOnFurtherRuns() throws Exception {
+        Campaign campaign = campaign("""
+                # thermometer offset: 0.9 degF
+                # thermometer gain: 0.2 %
+                # concentration uncertainty: 0.02
+                # target temperatures: same-sensor
+                # tolerance of k: 15 %
+                # measure from: 10 degC
+                # measure to: 90 degC
+                # run cost: equal
+                """);
+        assertEquals(
+                new Node.Group(Map.of(
+                        "thermometerOffset", Node.Quantity.of(0.5, "K"),
+                        "thermometerGain", new Node.Scalar(0.002),
+                        "concentrationUncertainty", new Node.Scalar(0.02),
+                        "targets", new Node.Text("same-sensor"),
+                        "tolerance", new Node.Scalar(0.15),
+                        "measureFrom", Node.Quantity.of(283.15, "K"),
+                        "measureTo", Node.Quantity.of(363.15, "K"),
+                        "runCost", new Node.Text("equal"))),
+                campaign.settings().get("barrier"));
+    }
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "thermometer offset: 0.3 kJ/mol | wrong-dimension",
+                "thermometer offset: -0.3 K | wrong-value",
+                "concentration uncertainty: 200 % | wrong-value",
+                "target temperatures: perhaps | wrong-value",
+                "tolerance of k: 0 | wrong-value",
+                "run cost: free | wrong-value",
+            })
+    void refusesUnusableStatementsOnErrors(String line, String code) throws IOException {
+        assertEquals(code, problemOf("# " + line + "\n").code());
+    }
+
+    @Test
     void takesACovarianceInItsUnit() throws Exception {
         Campaign campaign = campaign("# cov(dH, dS): 1.5 kJ.J/(mol2.K)\n# constant kind: elementary\n");
         assertEquals(

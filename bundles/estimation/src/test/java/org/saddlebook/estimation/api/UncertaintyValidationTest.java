@@ -79,7 +79,9 @@ class UncertaintyValidationTest {
         assertEquals(78.436784, -y[0] / y[1], 0.5e-6);
     }
 
-    private static NonlinearFit puromycin(String state) throws IOException {
+    private record PuromycinSet(ResponseFunction function, double[] rate) {}
+
+    private static PuromycinSet puromycinSet(String state) throws IOException {
         List<double[]> points = new ArrayList<>();
         for (String[] row : table("puromycin")) {
             if (row[2].equals(state)) {
@@ -93,14 +95,15 @@ class UncertaintyValidationTest {
             g[1] = -p[0] * c / ((p[1] + c) * (p[1] + c));
             return p[0] * g[0];
         };
+        return new PuromycinSet(ReferenceModels.over(x, 2, saturation), y);
+    }
+
+    private static NonlinearFit puromycin(String state) throws IOException {
+        PuromycinSet set = puromycinSet(state);
         return assertInstanceOf(
                 NonlinearFit.class,
                 NonlinearLeastSquares.fit(
-                        ReferenceModels.over(x, 2, saturation),
-                        y,
-                        null,
-                        List.of(new double[] {100, 1}),
-                        NonlinearOptions.defaults()));
+                        set.function(), set.rate(), null, List.of(new double[] {100, 1}), NonlinearOptions.defaults()));
     }
 
     @Test
@@ -122,6 +125,31 @@ class UncertaintyValidationTest {
         assertEquals(160.280046519282, untreated.parameters()[0], 1e-5);
         assertEquals(6.48024560467, ReferenceSet.standardDeviations(untreated)[0], 1e-5);
         assertEquals(859.604293779374, untreated.residualSumOfSquares(), 1e-8);
+    }
+
+    @Test
+    void profileLimitsOfTheSaturationFitAreThePublishedOnes() throws IOException {
+        // Venables & Ripley 2002 and R: Vm 197.30 to 229.29, K 0.04692 to 0.08616 (R interpolates). The further digits
+        // by
+        // root finding on the sum of squares with the other parameter eliminated, SciPy 1.17.1 (brentq,
+        // minimize_scalar).
+        double[][] limits = {{197.30, 229.29}, {0.04692, 0.08616}};
+        double[][] further = {{197.30193290028, 229.28905505505}, {0.04692034203517077, 0.08615691342713874}};
+        double[] half = {0.005, 0.5e-5};
+        PuromycinSet set = puromycinSet("treated");
+        NonlinearFit fit = puromycin("treated");
+        for (int j = 0; j < 2; j++) {
+            ProfileInterval interval = ProfileLikelihood.of(
+                    fit, set.function(), set.rate(), null, j, 0.95, Scale.ESTIMATED, NonlinearOptions.defaults());
+            double lower =
+                    assertInstanceOf(ProfileLimit.At.class, interval.lower()).value();
+            double upper =
+                    assertInstanceOf(ProfileLimit.At.class, interval.upper()).value();
+            assertEquals(limits[j][0], lower, half[j]);
+            assertEquals(limits[j][1], upper, half[j]);
+            assertEquals(further[j][0], lower, 1e-10 * lower);
+            assertEquals(further[j][1], upper, 1e-10 * upper);
+        }
     }
 
     @Test

@@ -72,7 +72,8 @@ public final class ProfileLikelihood {
             return new ProfileInterval(value, held, held, quantile);
         }
         double deviation = Math.sqrt(variance * own);
-        if (value + deviation == value && value - deviation == value || !(variance > 0)) {
+        boolean rounding = value + deviation == value && value - deviation == value;
+        if (rounding || !(variance > 0)) {
             ProfileLimit exact = new ProfileLimit.At(value);
             return new ProfileInterval(value, exact, exact, quantile);
         }

@@ -130,7 +130,7 @@ public final class ProfileSearch {
                 high = distance;
                 zHigh = z;
             }
-            double next = low + (distance - low) * (quantile - zLow) / (z - zLow);
+            double next;
             if (Double.isNaN(high)) {
                 double reach = z > 0 ? distance * quantile / z : Double.POSITIVE_INFINITY;
                 next = Math.max(1.05 * distance, Math.min(4 * distance, reach * 1.000001));

@@ -79,6 +79,7 @@ class UncertaintyValidationTest {
         assertEquals(78.436784, -y[0] / y[1], 0.5e-6);
     }
 
+    @SuppressWarnings("ArrayRecordComponent") // carries a fixture
     private record PuromycinSet(ResponseFunction function, double[] rate) {}
 
     private static PuromycinSet puromycinSet(String state) throws IOException {

@@ -65,6 +65,7 @@ exit /b 1
 mkdir "%folder%" >nul 2>&1
 >&2 echo saddlebook: preparing a quicker start for this Java (once, some seconds) ...
 set "fresh=%folder%\%RANDOM%%RANDOM%.tmp"
+"%java%" %options% -cp "%class_path%" %main% version >nul 2>&1 <nul
 "%java%" %options% -XX:ArchiveClassesAtExit="%fresh%" -Dsaddlebook.training=true -cp "%class_path%" %main% >nul 2>&1 <nul
 if exist "%fresh%" (
     move /y "%fresh%" "%folder%\%build%.jsa" >nul 2>&1

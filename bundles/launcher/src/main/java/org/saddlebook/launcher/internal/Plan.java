@@ -72,7 +72,7 @@ record Plan(
         Map<String, String> namedIn = new LinkedHashMap<>();
         List<String> names = new ArrayList<>();
         List<String> off = new ArrayList<>();
-        for (Path file : sorted(home.resolve("features"), "*.json")) {
+        for (Path file : sorted(home.resolve("features"), ".json")) {
             Feature feature;
             try {
                 feature = FeatureReader.read("features/" + file.getFileName(), Files.readAllBytes(file));
@@ -137,7 +137,7 @@ record Plan(
     private static List<Added> added(Path userBundles, Policy policy, Map<String, String> troubles, StringBuilder key)
             throws IOException {
         List<Added> added = new ArrayList<>();
-        for (Path file : sorted(userBundles, "*.jar")) {
+        for (Path file : sorted(userBundles, ".jar")) {
             String name = file.getFileName().toString();
             byte[] bytes;
             try {
@@ -157,11 +157,15 @@ record Plan(
         return added;
     }
 
-    private static List<Path> sorted(Path folder, String pattern) throws IOException {
+    private static List<Path> sorted(Path folder, String ending) throws IOException {
         List<Path> files = new ArrayList<>();
         if (Files.isDirectory(folder)) {
-            try (DirectoryStream<Path> stream = Files.newDirectoryStream(folder, pattern)) {
-                stream.forEach(files::add);
+            try (DirectoryStream<Path> stream = Files.newDirectoryStream(folder)) {
+                for (Path file : stream) { // not by a pattern: compiling it costs more than the whole reading
+                    if (file.toString().endsWith(ending)) {
+                        files.add(file);
+                    }
+                }
             }
             Collections.sort(files);
         }

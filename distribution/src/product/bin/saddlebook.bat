@@ -20,11 +20,11 @@ if not defined version set "version=17"
 for /f "tokens=1 delims=." %%F in ("%version%") do set "feature=%%F"
 if %feature% LSS 17 goto no_java
 
-set "options=-XX:TieredStopAtLevel=1 -XX:+UseSerialGC -XX:-UsePerfData -Xss1m -Xlog:disable -Xlog:all=off -Djava.awt.headless=true"
-if %feature% GEQ 24 set "options=%options% --enable-native-access=ALL-UNNAMED"
+set "options=-XX:TieredStopAtLevel=1 -XX:Tier3InvocationThreshold=1000 -XX:Tier3MinInvocationThreshold=500 -XX:Tier3CompileThreshold=5000 -XX:+UseSerialGC -XX:-UsePerfData -Xss1m -Xlog:disable -Xlog:all=off -Djava.awt.headless=true"
+if %feature% GEQ 24 set "options=%options% --enable-native-access=ALL-UNNAMED --sun-misc-unsafe-memory-access=allow"
 
 set "lib=%product%\lib"
-set "class_path=%lib%\org.saddlebook.launcher.jar;%lib%\org.apache.felix.framework.jar;%lib%\jackson-core.jar;%lib%\org.osgi.service.component.jar;%lib%\org.osgi.util.promise.jar;%lib%\org.osgi.util.function.jar"
+set "class_path=%lib%\org.saddlebook.launcher.jar;%lib%\org.apache.felix.framework.jar;%lib%\org.apache.felix.scr.jar;%lib%\jackson-core.jar;%lib%\org.osgi.service.component.jar;%lib%\org.osgi.util.promise.jar;%lib%\org.osgi.util.function.jar"
 set "main=org.saddlebook.launcher.internal.Main"
 
 rem The class archive belongs to one Java, one place and one build. Colons cannot stand in a folder name.

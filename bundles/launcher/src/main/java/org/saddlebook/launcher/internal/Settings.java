@@ -52,6 +52,11 @@ final class Settings {
             + "org.osgi.dto;version=1.1.1,"
             + "org.osgi.service.condition;version=1.0";
 
+    /** What the component runtime provides; it is part of the system bundle here, see {@link Launch}. */
+    private static final String COMPONENTS = "osgi.extender;osgi.extender=\"osgi.component\";version:Version=\"1.5\","
+            + "osgi.service;objectClass:List<String>="
+            + "\"org.osgi.service.component.runtime.ServiceComponentRuntime\"";
+
     private Settings() {}
 
     /**
@@ -79,6 +84,7 @@ final class Settings {
         settings.put("org.osgi.framework.storage", storage.toString());
         settings.put("org.osgi.framework.system.packages", systemPackages());
         settings.put("org.osgi.framework.system.packages.extra", SHARED);
+        settings.put("org.osgi.framework.system.capabilities.extra", COMPONENTS);
         settings.put("felix.resolver.parallelism", "1"); // two dozen bundles are resolved before threads have started
         settings.put("felix.cache.locking", "false"); // CacheSlot locks, and does so between processes of one user
         settings.put("felix.service.urlhandlers", "false"); // nobody needs them, and they cost start-up time

@@ -2,6 +2,7 @@ package org.saddlebook.barrier.internal;
 
 import java.util.OptionalDouble;
 import org.saddlebook.api.findings.Node;
+import org.saddlebook.api.quantity.Unit;
 import org.saddlebook.estimation.api.ChiSquared;
 import org.saddlebook.estimation.api.Fit;
 import org.saddlebook.estimation.api.InformationCriteria;
@@ -38,11 +39,21 @@ record FitStatistics(FittedLaw law) {
                         deviance.getAsDouble(), criterionParameters(), law.fit().observations()));
     }
 
-    /** The statistics as a group. */
-    Node.Group node() {
+    /**
+     * The statistics as a group.
+     *
+     * @param rateUnit unit that rss and s of a fit to k itself are given in
+     */
+    Node.Group node(Unit rateUnit) {
         Fit fit = law.fit();
+        double unit = law.data().stated() || law.data().response() == Measurements.Response.LN_RATE
+                ? 1
+                : law.data().responseUnit() / rateUnit.factor();
         int dof = fit.degreesOfFreedom();
-        Tree tree = new Tree().put("n", fit.observations()).put("dof", dof).put("rss", fit.residualSumOfSquares());
+        Tree tree = new Tree()
+                .put("n", fit.observations())
+                .put("dof", dof)
+                .put("rss", fit.residualSumOfSquares() * (unit * unit));
         if (law.data().stated()) {
             tree.put("chiSquared", fit.residualSumOfSquares());
             if (dof > 0) {
@@ -50,7 +61,7 @@ record FitStatistics(FittedLaw law) {
                 tree.put("birgeRatio", Math.sqrt(fit.residualSumOfSquares() / dof));
             }
         } else if (dof > 0) {
-            tree.put("s", Math.sqrt(fit.residualVariance()));
+            tree.put("s", Math.sqrt(fit.residualVariance()) * unit);
         }
         return tree.put("aicc", aicc())
                 .put("bic", bic())

@@ -95,7 +95,7 @@ final class LawNode {
                 tree.put("sharedErrors", new Node.Items(shared));
             }
         }
-        return tree.put("statistics", new FitStatistics(law).node()).group();
+        return tree.put("statistics", new FitStatistics(law).node(rateUnit)).group();
     }
 
     /**

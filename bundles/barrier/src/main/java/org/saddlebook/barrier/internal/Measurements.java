@@ -102,6 +102,14 @@ final class Measurements {
         return response;
     }
 
+    /**
+     * SI size of one unit of the fitted response: 1 for ln k; k is fitted in units of the first one, so that its size cannot
+     * matter.
+     */
+    double responseUnit() {
+        return response == Response.RATE ? StrictMath.exp(lnRate[0]) : 1;
+    }
+
     double kelvin(int i) {
         return kelvin[i];
     }

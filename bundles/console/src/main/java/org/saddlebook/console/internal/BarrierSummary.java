@@ -30,6 +30,7 @@ final class BarrierSummary {
         }
         body.get("comparison").ifPresent(this::comparison);
         predictions(Nodes.items(body, "predictions"));
+        new ReachSummary(out).print(body);
         List<Node> notes = Nodes.items(body, "notes");
         if (!notes.isEmpty()) {
             out.println();
@@ -46,9 +47,11 @@ final class BarrierSummary {
     }
 
     private void table(Node table, Node.Group body) {
-        String errors = Nodes.text(body, "errorModel").equals("stated")
-                ? "uncertainties as stated"
-                : "one relative error, estimated from the scatter";
+        String errors = switch (Nodes.text(body, "errorModel")) {
+            case "stated" -> "uncertainties as stated";
+            case "constant-absolute" -> "one absolute error, estimated from the scatter";
+            default -> "one relative error, estimated from the scatter";
+        };
         StringBuilder line = new StringBuilder("  ");
         line.append(count(table, "used")).append(" points at ").append(count(table, "temperatures"));
         line.append(" temperatures");
@@ -150,7 +153,7 @@ final class BarrierSummary {
             return;
         }
         List<String> texts = new ArrayList<>();
-        number(statistics, "s", 3).ifPresent(s -> texts.add("relative scatter " + s));
+        number(statistics, "s", 3).ifPresent(s -> texts.add("scatter s " + s));
         number(statistics, "chiSquared", 4).ifPresent(chi -> texts.add("χ² " + chi));
         double p = Nodes.number(statistics, "pValue");
         if (!Double.isNaN(p)) {

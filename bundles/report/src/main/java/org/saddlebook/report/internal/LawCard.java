@@ -59,7 +59,7 @@ final class LawCard {
                 continue;
             }
             html.append("<tr>").append(Html.rowHead(Symbols.activation(member.getKey())));
-            html.append(Html.element("td", Html.text(Symbols.name(member.getKey()))));
+            html.append(Html.element("td", Html.text(name(model, member.getKey()))));
             String value = QuantityText.isUndetermined(quantity) ? "not determined" : QuantityText.of(quantity);
             html.append(BarrierPart.cell(value, quantity.cautions(), tools));
             html.append(Html.element(
@@ -67,6 +67,13 @@ final class LawCard {
                     .append("</tr>\n");
         }
         return html.append("</tbody></table></div>\n").toString();
+    }
+
+    /** What a symbol stands for, as the law names it. */
+    private static String name(Node model, String symbol) {
+        Optional<Node> names = Trees.get(model, "names");
+        String name = names.isPresent() ? Trees.text(names.get(), symbol) : "";
+        return name.isEmpty() ? Symbols.name(symbol) : name;
     }
 
     /** The parameters with enough digits to calculate with; left out where the findings hold no full covariance. */

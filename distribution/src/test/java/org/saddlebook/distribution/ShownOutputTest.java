@@ -7,7 +7,8 @@ import java.util.Optional;
 import org.junit.jupiter.api.Test;
 
 class ShownOutputTest {
-    private static final List<String> PRINTED = List.of("title", "", "Ea  107.1 kJ/mol  ", "A   1.1e13\u00a01/s", "end");
+    private static final List<String> PRINTED =
+            List.of("title", "", "Ea  107.1 kJ/mol  ", "A   1.1e13\u00a01/s", "end");
 
     @Test
     void acceptsAPassageAnywhere() {

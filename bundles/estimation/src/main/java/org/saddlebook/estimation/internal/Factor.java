@@ -138,6 +138,15 @@ final class Factor {
         return result;
     }
 
+    /** {@code ln |X'WX|}. */
+    double logDeterminant() {
+        double sum = 0;
+        for (int k = 0; k < size; k++) {
+            sum += StrictMath.log(Math.abs(high[k * size + k])) - StrictMath.log(scale[k]);
+        }
+        return 2 * sum;
+    }
+
     /** An upper bound of the condition number, at most p times too large: product of Frobenius norms. */
     double conditionBound() {
         int p = size;

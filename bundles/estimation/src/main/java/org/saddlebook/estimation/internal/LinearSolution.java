@@ -147,6 +147,11 @@ public final class LinearSolution {
         return factor.conditionNumber();
     }
 
+    /** {@code ln |X'WX|}. */
+    double logDeterminant() {
+        return factor.logDeterminant();
+    }
+
     /** {@code g' (X'WX)^-1 g}. */
     public double predictionVariance(double[] row) {
         requireRow(row);

@@ -11,7 +11,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.SplittableRandom;
-import java.util.function.DoubleUnaryOperator;
 import java.util.function.ToDoubleFunction;
 import org.saddlebook.estimation.internal.Draws;
 
@@ -320,11 +319,58 @@ final class CoverageProgram {
         profile.count(end(interval.lower(), -1) <= SLOPE && end(interval.upper(), 1) >= SLOPE);
     }
 
+    /**
+     * Blocks: 5 % between them and 2 % inside; either each block measures three temperatures, or each temperature is a block
+     * of three runs.
+     */
+    List<Cell> blocks() {
+        for (int count : new int[] {3, 4, 6, 8}) {
+            Draws draws = draws("blocks " + count);
+            for (int k = 0; k < campaigns; k++) {
+                blocks(count, true, draws);
+                blocks(count, false, draws);
+            }
+        }
+        return new ArrayList<>(cells.values());
+    }
+
+    private void blocks(int count, boolean across, Draws draws) {
+        int n = 3 * count;
+        double[] kelvin = new double[n];
+        double[] y = new double[n];
+        int[] blocks = new int[n];
+        for (int b = 0; b < count; b++) {
+            double shared = 0.05 * draws.gaussian();
+            for (int r = 0; r < 3; r++) {
+                int i = 3 * b + r;
+                blocks[i] = b;
+                kelvin[i] = across ? 313.15 + 20.0 * r : 313.15 + 40.0 * b / (count - 1);
+                y[i] = lnRate(kelvin[i]) + shared + 0.02 * draws.gaussian();
+            }
+        }
+        Campaign c = new Campaign(kelvin, y);
+        LinearFit plain = fit(c);
+        BlockFit mixed = (BlockFit) BlockRegression.fit(c.design, c.y, null, blocks);
+        String where = across ? " (blocks across temperatures)" : " (each temperature a block)";
+        for (String quantity : new String[] {"Ea", "ln k(25 degC)"}) {
+            double[] row = c.row(quantity);
+            double truth = dot(row, c.truth);
+            double half =
+                    StudentT.quantile(0.975, mixed.degreesOfFreedom(row)) * Math.sqrt(mixed.predictionVariance(row));
+            cell("blocks, restricted likelihood, Satterthwaite" + where, quantity, n, 0.05)
+                    .count(Math.abs(dot(row, mixed.parameters()) - truth) <= half);
+            double naive = StudentT.quantile(0.975, n - 2)
+                    * Math.sqrt(plain.residualVariance() * plain.predictionVariance(row));
+            cell("blocks ignored, Student's t" + where, quantity, n, 0.05)
+                    .count(Math.abs(dot(row, plain.parameters()) - truth) <= naive);
+        }
+    }
+
     private static double end(ProfileLimit limit, int side) {
-        DoubleUnaryOperator open = sign -> sign * Double.POSITIVE_INFINITY;
-        return limit instanceof ProfileLimit.At at
-                ? at.value()
-                : limit instanceof ProfileLimit.Open ? open.applyAsDouble(side) : Double.NaN;
+        if (limit instanceof ProfileLimit.At at) {
+            return at.value();
+        }
+        return limit instanceof ProfileLimit.Open ? side * Double.POSITIVE_INFINITY : Double.NaN;
     }
 
     /** The table. */
@@ -373,6 +419,7 @@ final class CoverageProgram {
     public static void main(String[] arguments) throws IOException {
         CoverageProgram program = new CoverageProgram(Integer.parseInt(arguments[0]), Long.parseLong(arguments[1]));
         program.claims();
+        program.blocks();
         program.rest();
         program.write(Path.of(arguments[2]));
     }

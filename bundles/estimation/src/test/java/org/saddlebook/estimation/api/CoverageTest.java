@@ -55,6 +55,7 @@ class CoverageTest {
                 compare(cell, 80, 94, seed);
             }
         }
+        program.blocks();
         program.rest();
         program.write(TABLE);
     }

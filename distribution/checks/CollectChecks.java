@@ -28,13 +28,13 @@ public final class CollectChecks {
             System.err.println("Nothing to collect: run mvn verify -Peverything first, in the root of the source.");
             System.exit(1);
         }
-        StringBuilder text = new StringBuilder("# Long checks\n\nMeasured by `mvn verify -Peverything` at commit `");
+        StringBuilder text = new StringBuilder("# Long checks\n\nWritten by `mvn verify -Peverything`, collected at commit `");
         text.append(git("rev-parse", "HEAD"));
         text.append(git("status", "--porcelain", "--untracked-files=no").isEmpty() ? "`" : "` (with uncommitted changes)");
         text.append(" on ").append(LocalDate.now(ZoneOffset.UTC)).append(", Java ");
         text.append(System.getProperty("java.version")).append(", ").append(System.getProperty("os.name")).append(' ');
         text.append(System.getProperty("os.arch")).append(", ");
-        text.append(Runtime.getRuntime().availableProcessors()).append(" cores.\n");
+        text.append(Runtime.getRuntime().availableProcessors()).append(" cores. A table is as old as the last run that wrote it: run the checks first.\n");
         for (Path fragment : fragments) {
             text.append('\n').append(Files.readString(fragment).strip()).append('\n');
         }

@@ -4,10 +4,13 @@ import java.util.ArrayList;
 import java.util.List;
 import org.saddlebook.presentation.api.CautionText;
 
-/** The cautions of the section: shared ones by id, and three of its own. */
+/** The cautions of the section: shared ones by id, and some of its own. */
 final class SpontaneityCautions {
     static final String NO_UNCERTAINTY = "spontaneity-no-uncertainty";
     static final String NO_STANDARD_STATE = "spontaneity-no-standard-state";
+    static final String SPECIES_UNCERTAINTY = "spontaneity-species-uncertainty";
+    static final String SPECIES_INDEPENDENT = "spontaneity-species-independent";
+    static final String JUMP = "spontaneity-jump";
     static final String UNITS_DOUBTFUL = "spontaneity-units-doubtful";
 
     /** Beyond this size an entropy of reaction is more likely a slip of unit (common practice, no source), J/(mol K). */
@@ -29,6 +32,12 @@ final class SpontaneityCautions {
                 "No standard state was stated: ΔS, ΔG and the crossover hold for the one that the source of ΔS uses, and change with it when the number of molecules changes.";
             case UNITS_DOUBTFUL ->
                 "The size of ΔS, or of the crossover, is unusual for a reaction (common practice, no source): check whether J and kJ were mixed.";
+            case SPECIES_UNCERTAINTY ->
+                "The data of at least one species state no uncertainty: it is taken as exact, and every interval is too narrow.";
+            case SPECIES_INDEPENDENT ->
+                "The uncertainties of the species are taken as independent, and as the same at every temperature.";
+            case JUMP ->
+                "ΔG changes sign in a jump where two sets of data of one species meet: no temperature of equilibrium is found there, look at the data.";
             default -> CautionText.of(id);
         };
     }

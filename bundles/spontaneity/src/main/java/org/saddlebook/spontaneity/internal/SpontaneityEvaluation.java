@@ -15,6 +15,7 @@ import org.saddlebook.api.quantity.Unit;
 import org.saddlebook.estimation.api.Normal;
 import org.saddlebook.estimation.api.StudentT;
 import org.saddlebook.presentation.api.Rounding;
+import org.saddlebook.thermo.data.api.SpeciesSource;
 import org.saddlebook.units.api.Units;
 
 /**
@@ -53,18 +54,42 @@ final class SpontaneityEvaluation {
     }
 
     /** The section; refused with a reason when what was stated cannot be evaluated. */
-    static Section section(Campaign campaign) {
-        Stated stated;
+    static Section section(Campaign campaign, List<SpeciesSource> sources) {
+        Node.Group body;
         try {
-            stated = StatementReader.read(
-                    campaign.settings().get(SECTION), campaign.choices().standard());
+            Node settings = campaign.settings().get(SECTION);
+            body = settings instanceof Node.Group group && group.get("reaction").isPresent()
+                    ? ofReaction(campaign, ReactionRequest.read(settings, sources))
+                    : new SpontaneityEvaluation(
+                                    campaign,
+                                    StatementReader.read(
+                                            settings, campaign.choices().standard()))
+                            .body();
         } catch (Refusal refusal) {
             return Section.refused(SECTION, TITLE, refusal.getMessage());
         }
-        Node.Group body = new SpontaneityEvaluation(campaign, stated).body();
         Map<String, String> cautions = new LinkedHashMap<>();
         collect(body, cautions);
         return Section.done(SECTION, TITLE, body, cautions);
+    }
+
+    /** With heat capacities where all are known; else with ΔH and ΔS at 298.15 K, and the caution that says so. */
+    private static Node.Group ofReaction(Campaign campaign, ReactionRequest request) throws Refusal {
+        if (request.heatCapacitiesKnown()) {
+            return new ReactionEvaluation(campaign, request).body();
+        }
+        Map<String, Node> members = new LinkedHashMap<>();
+        members.put("reaction", new Node.Text(request.equation().text()));
+        Stated stated = ConstantReaction.of(request);
+        SpontaneityEvaluation evaluation = new SpontaneityEvaluation(campaign, stated);
+        members.putAll(evaluation.body().members());
+        if (request.lnQ().isPresent()) {
+            double lnQ = request.lnQ().getAsDouble();
+            members.put("lnQ", new Node.Scalar(lnQ));
+            Crossover there = Crossover.of(ConstantReaction.at(stated, lnQ), evaluation.quantile, evaluation.level);
+            members.put("crossoversAtComposition", new Node.Items(evaluation.crossovers(there)));
+        }
+        return new Node.Group(members);
     }
 
     private Node.Group body() {
@@ -98,7 +123,7 @@ final class SpontaneityEvaluation {
         }
         body.put("dG", new Node.Items(rows));
         body.put("crossoverOutcome", new Node.Text(crossover.outcome().word()));
-        body.put("crossovers", new Node.Items(crossovers()));
+        body.put("crossovers", new Node.Items(crossovers(crossover)));
         body.put("notes", new Node.Items(notes(cases)));
         body.put("figures", new Node.Items(List.of(figure())));
         return new Node.Group(body);
@@ -138,7 +163,7 @@ final class SpontaneityEvaluation {
         return sign < 0 ? "negative" : sign > 0 ? "positive" : "zero";
     }
 
-    private List<Node> crossovers() {
+    private List<Node> crossovers(Crossover crossover) {
         boolean none = crossover.outcome() == Crossover.Outcome.NONE
                 || (crossover.kelvin().isEmpty() && crossover.interval().isEmpty());
         if (none) {

@@ -11,6 +11,7 @@ import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.testkit.api.ImmediateTask;
+import org.saddlebook.thermo.data.api.CuratedSet;
 
 /** Settings of the section for tests, and the section they give. */
 final class Settings {
@@ -42,7 +43,7 @@ final class Settings {
     }
 
     static Section section(Campaign campaign) throws Cancelled {
-        SpontaneityComponent analysis = new SpontaneityComponent();
+        SpontaneityComponent analysis = new SpontaneityComponent(List.of(CuratedSet.source()));
         return analysis.analyse(campaign, new Findings("invented", "", List.of(), Map.of()), ImmediateTask.seeded(1));
     }
 

@@ -16,6 +16,7 @@ import org.saddlebook.api.findings.Layer;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.model.StandardState;
+import org.saddlebook.thermo.data.api.CuratedSet;
 
 class SpontaneityTest {
     private static Node.Quantity h(double value, double u) {
@@ -192,8 +193,8 @@ class SpontaneityTest {
 
     @Test
     void staysSilentWithoutSettings() {
-        assertFalse(new SpontaneityComponent().appliesTo(Campaign.titled("invented")));
-        assertTrue(new SpontaneityComponent()
+        assertFalse(new SpontaneityComponent(List.of(CuratedSet.source())).appliesTo(Campaign.titled("invented")));
+        assertTrue(new SpontaneityComponent(List.of(CuratedSet.source()))
                 .appliesTo(Settings.of(h(1, 1), s(1, 1)).campaign()));
     }
 

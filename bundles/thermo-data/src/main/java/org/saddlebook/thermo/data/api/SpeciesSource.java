@@ -6,7 +6,8 @@ import org.saddlebook.reaction.api.Species;
 
 /**
  * A collection of thermodynamic data. Register an implementation as an OSGi service; a laboratory adds its own data this
- * way. Sources are asked in order of service rank, then id. Implementations are thread-safe and give the same answer
+ * way. Sources are asked in order of id, the curated set of this
+ * bundle last. Implementations are thread-safe and give the same answer
  * every time.
  */
 @ConsumerType

@@ -19,7 +19,7 @@ import org.saddlebook.thermo.data.api.SpeciesData;
 import org.saddlebook.thermo.data.api.SpeciesSource;
 import org.saddlebook.thermo.data.api.TableSegment;
 
-/** The curated set of this bundle; files are read when a species is asked for. Preferred first: table, Shomate, NASA 7, constants. */
+/** The curated set of this bundle; files are read when a species is asked for. Preferred first: table, Shomate, NASA 7, NASA 9, constants. */
 @Component
 public final class CuratedSource implements SpeciesSource {
     private static final String JANAF =
@@ -27,6 +27,7 @@ public final class CuratedSource implements SpeciesSource {
                     + " Data Monograph 9, 1998)";
     private static final String SHOMATE = "NIST Chemistry WebBook, SRD 69, Shomate coefficients after NIST-JANAF 1998";
     private static final String GRI = "G. P. Smith et al., GRI-Mech 3.0, thermochemistry file";
+    private static final String MCBRIDE = "B. J. McBride, M. J. Zehe, S. Gordon, NASA TP-2002-211556";
     private static final String CODATA =
             "J. D. Cox, D. D. Wagman, V. A. Medvedev, CODATA Key Values for Thermodynamics" + " (1989)";
 
@@ -68,7 +69,7 @@ public final class CuratedSource implements SpeciesSource {
                 segments.clear();
             }
         }
-        for (SpeciesData one : nasa7()) {
+        for (SpeciesData one : nasa()) {
             if (matches(species, one.species())) {
                 found.add(stated(one, one.species()));
             }
@@ -77,11 +78,13 @@ public final class CuratedSource implements SpeciesSource {
         return found;
     }
 
-    private static List<SpeciesData> nasa7() {
+    private static List<SpeciesData> nasa() {
         try {
-            return NasaFiles.nasa7(text("nasa7.dat"), "nasa7.dat", GRI);
+            List<SpeciesData> all = new ArrayList<>(NasaFiles.nasa7(text("nasa7.dat"), "nasa7.dat", GRI));
+            all.addAll(NasaFiles.nasa9(text("nasa9.dat"), "nasa9.dat", MCBRIDE));
+            return all;
         } catch (InputException broken) {
-            throw new IllegalStateException("nasa7.dat of this bundle: " + broken.getMessage(), broken);
+            throw new IllegalStateException("a file of this bundle: " + broken.getMessage(), broken);
         }
     }
 

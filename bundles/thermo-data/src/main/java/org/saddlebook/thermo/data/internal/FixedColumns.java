@@ -3,6 +3,7 @@ package org.saddlebook.thermo.data.internal;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
@@ -93,8 +94,8 @@ final class FixedColumns {
             }
             double count = number(index, at + 2, at + width - 1);
             if (count != 0) {
-                String name = symbol.substring(0, 1).toUpperCase(java.util.Locale.ROOT)
-                        + symbol.substring(1).toLowerCase(java.util.Locale.ROOT);
+                String name = symbol.substring(0, 1).toUpperCase(Locale.ROOT)
+                        + symbol.substring(1).toLowerCase(Locale.ROOT);
                 elements.merge(name, Fraction.of(new BigDecimal(count)), Fraction::plus);
             }
         }

@@ -11,9 +11,9 @@ import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.saddlebook.reaction.api.Species;
 import org.saddlebook.thermo.data.api.Joint;
-import org.saddlebook.thermo.data.api.NasaFiles;
 import org.saddlebook.thermo.data.api.Segment;
 import org.saddlebook.thermo.data.api.SpeciesData;
 import org.saddlebook.thermo.data.api.TableSegment;
@@ -121,43 +121,28 @@ class CuratedSourceValidationTest {
         }
     }
 
-    @Test
-    void readsNasa9InPublishedColumns() throws Exception {
-        List<SpeciesData> read = NasaFiles.nasa9(text("nasa9.dat"), "nasa9.dat", "NASA TP-2002-211556");
-        assertEquals(
-                List.of("N2(g)", "O2(g)"),
-                read.stream().map(one -> one.species().text()).toList());
-        for (SpeciesData one : read) {
-            SpeciesData table = data(one.species().text(), "janaf");
-            assertEquals(Joint.Kind.SMOOTH, one.joints().get(0).kind());
-            for (double t : ((TableSegment) table.segments().get(0)).kelvins()) {
-                if (t >= 200 && t <= 3000) {
-                    Segment segment = one.segment(t).orElseThrow();
-                    Segment row = table.segments().get(0);
-                    // The two evaluations differ by this much up to 3000 K.
-                    assertEquals(
-                            row.heatCapacity(t),
-                            segment.heatCapacity(t),
-                            0.15,
-                            one.species().text() + " " + t);
-                    assertEquals(
-                            row.enthalpy(t),
-                            segment.enthalpy(t),
-                            130,
-                            one.species().text() + " " + t);
-                    assertEquals(
-                            row.entropy(t),
-                            segment.entropy(t),
-                            0.06,
-                            one.species().text() + " " + t);
-                }
+    @ParameterizedTest
+    @ValueSource(strings = {"N2(g)", "O2(g)", "H2(g)", "H2O(g)"})
+    void nasa9AgreesWithTheTables(String species) throws Exception {
+        SpeciesData one = data(species, "nasa-9");
+        SpeciesData table = data(species, "janaf");
+        assertEquals(Joint.Kind.SMOOTH, one.joints().get(0).kind());
+        // The evaluations differ by this much; that of H2O above 1000 K follows Woolley 1987, not NIST-JANAF.
+        boolean water = species.equals("H2O(g)");
+        for (double t : ((TableSegment) table.segments().get(0)).kelvins()) {
+            if (t >= 200) {
+                Segment segment = one.segment(t).orElseThrow();
+                Segment row = table.segments().get(0);
+                assertEquals(row.heatCapacity(t), segment.heatCapacity(t), water ? 1.2 : 0.15, species + " " + t);
+                assertEquals(row.enthalpy(t), segment.enthalpy(t), water ? 900 : 130, species + " " + t);
+                assertEquals(row.entropy(t), segment.entropy(t), water ? 0.4 : 0.06, species + " " + t);
             }
         }
     }
 
     /** Key values and tables: equal within the uncertainty of the key value, except where the evaluations differ. */
     @ParameterizedTest
-    @org.junit.jupiter.params.provider.ValueSource(
+    @ValueSource(
             strings = {"H2(g)", "O2(g)", "N2(g)", "H2O(l)", "H2O(g)", "NH3(g)", "CO(g)", "CO2(g)", "CaO(s)", "Hg(g)"})
     void keyValuesAgreeWithTheTables(String species) throws Exception {
         SpeciesData key = data(species, "codata");

@@ -91,7 +91,10 @@ public final class OrthogonalProblem implements ResponseFunction {
         NonlinearProblem problem = new NonlinearProblem(this, constant.clone(), null, lower, upper, check);
         NonlinearAttempt best = null;
         for (double[] start : starts) {
-            NonlinearAttempt attempt = NonlinearSearch.from(problem, start, limit, thorough);
+            NonlinearAttempt attempt = thorough ? null : QuickDescent.fromOrNull(problem, start);
+            if (attempt == null) {
+                attempt = NonlinearSearch.from(problem, start, limit, thorough);
+            }
             if (best == null || attempt.betterThan(best)) {
                 best = attempt;
             }
@@ -135,7 +138,11 @@ public final class OrthogonalProblem implements ResponseFunction {
             dx[i] = (covariance[i] - gradient[columns] * varianceX[i]) * (distance / variance);
             dy[i] = (varianceY[i] - gradient[columns] * covariance[i]) * (distance / variance);
             weights[i] = 1 / variance;
+            // The distance alone has a solution of zero, which the solver would compute in double-double for nothing.
             distances[i] = distance;
+            for (int j = 0; j < columns; j++) {
+                distances[i] += gradient[j] * p[j];
+            }
             System.arraycopy(gradient, 0, flat, i * columns, columns);
             double root = distance / Math.sqrt(variance);
             sum.addProduct(root, 0, root, 0);

@@ -209,10 +209,20 @@ final class CoverageProgram {
             double value = dot(row, fit.parameters());
             double sensitivity = (dot(shifted.row(quantity), other.parameters()) - value) / 1e-3;
             double t = Math.sqrt(fit.residualVariance() * fit.predictionVariance(row));
-            double half = StudentPlusNormal.quantile(0.975, t, n - 2, Math.abs(sensitivity) * OFFSET);
+            double error = Math.abs(value - dot(row, c.truth));
             cell("t plus normal, thermometer 0.5 K shared", quantity, n, scatter)
-                    .count(Math.abs(value - dot(row, c.truth)) <= half);
+                    .count(holds(error, t, n - 2, Math.abs(sensitivity) * OFFSET));
         }
+    }
+
+    /** Whether an error lies within the quantile, which is never below either part's nor above their sum. */
+    private static boolean holds(double error, double t, int dof, double shared) {
+        double own = t * StudentT.quantile(0.975, dof);
+        double common = shared * Normal.quantile(0.975);
+        if (error <= Math.max(own, common)) {
+            return true;
+        }
+        return error <= own + common && error <= StudentPlusNormal.quantile(0.975, t, dof, shared);
     }
 
     /** The slow part: reported as it is. */

@@ -58,13 +58,17 @@ final class SpontaneityEvaluation {
         Node.Group body;
         try {
             Node settings = campaign.settings().get(SECTION);
-            body = settings instanceof Node.Group group && group.get("reaction").isPresent()
-                    ? ofReaction(campaign, ReactionRequest.read(settings, sources))
-                    : new SpontaneityEvaluation(
-                                    campaign,
-                                    StatementReader.read(
-                                            settings, campaign.choices().standard()))
-                            .body();
+            body = settings instanceof Node.Group table
+                            && table.get("equilibriumTable").isPresent()
+                    ? ofTable(campaign, table)
+                    : settings instanceof Node.Group group
+                                    && group.get("reaction").isPresent()
+                            ? ofReaction(campaign, ReactionRequest.read(settings, sources))
+                            : new SpontaneityEvaluation(
+                                            campaign,
+                                            StatementReader.read(
+                                                    settings, campaign.choices().standard()))
+                                    .body();
         } catch (Refusal refusal) {
             return Section.refused(SECTION, TITLE, refusal.getMessage());
         }
@@ -89,6 +93,17 @@ final class SpontaneityEvaluation {
             Crossover there = Crossover.of(ConstantReaction.at(stated, lnQ), evaluation.quantile, evaluation.level);
             members.put("crossoversAtComposition", new Node.Items(evaluation.crossovers(there)));
         }
+        return new Node.Group(members);
+    }
+
+    /** The straight line of van 't Hoff in the usual keys, and both fits beside them. */
+    private static Node.Group ofTable(Campaign campaign, Node.Group settings) throws Refusal {
+        new SettingsReader(settings, "the settings of spontaneity with a table", List.of("equilibriumTable"));
+        TableEvaluation table = new TableEvaluation(
+                campaign, EquilibriumTable.read(settings.get("equilibriumTable").orElseThrow()));
+        Map<String, Node> members = new LinkedHashMap<>(
+                new SpontaneityEvaluation(campaign, table.stated()).body().members());
+        members.putAll(table.members());
         return new Node.Group(members);
     }
 

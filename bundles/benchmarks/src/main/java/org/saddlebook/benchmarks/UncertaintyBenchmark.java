@@ -28,6 +28,7 @@ import org.saddlebook.estimation.api.RandomStreams;
 import org.saddlebook.estimation.api.ResampleOptions;
 import org.saddlebook.estimation.api.Resamples;
 import org.saddlebook.estimation.api.ResponseFunction;
+import org.saddlebook.estimation.api.Scale;
 
 /** Intervals and fits beyond plain least squares, on eight points and one thread. Invented numbers. */
 @State(Scope.Thread)
@@ -100,8 +101,7 @@ public class UncertaintyBenchmark {
         NonlinearFit fit = (NonlinearFit)
                 NonlinearLeastSquares.fit(law, rates[r], weights[r], List.of(new double[] {0, 0, 9000}), options);
         for (int j = 0; j < 3; j++) {
-            sink.consume(ProfileLikelihood.of(
-                    fit, law, rates[r], weights[r], j, 0.95, org.saddlebook.estimation.api.Scale.ESTIMATED, options));
+            sink.consume(ProfileLikelihood.of(fit, law, rates[r], weights[r], j, 0.95, Scale.ESTIMATED, options));
         }
     }
 

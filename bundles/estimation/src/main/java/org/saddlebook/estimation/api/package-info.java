@@ -24,12 +24,23 @@
  * {@code residualVariance()} and take the quantiles of {@link org.saddlebook.estimation.api.StudentT}. The engine never
  * chooses between the two.
  *
+ * <p><b>Errors in both variables.</b> {@link org.saddlebook.estimation.api.OrthogonalRegression}. <b>Outliers.</b>
+ * {@link org.saddlebook.estimation.api.RobustRegression}, beside the ordinary fit. <b>Blocks.</b>
+ * {@link org.saddlebook.estimation.api.BlockRegression}. <b>Residuals.</b>
+ * {@link org.saddlebook.estimation.api.Diagnostics} and {@link org.saddlebook.estimation.api.LackOfFit}.
+ *
+ * <p><b>Intervals.</b> {@link org.saddlebook.estimation.api.StudentT} times a standard error;
+ * {@link org.saddlebook.estimation.api.ProfileLikelihood} where the response is curved;
+ * {@link org.saddlebook.estimation.api.MonteCarlo} and {@link org.saddlebook.estimation.api.Bootstrap} for anything computed
+ * from the parameters; {@link org.saddlebook.estimation.api.JointRegion} for two at once. How often each holds the truth is
+ * measured and printed in the bundle's README. {@link org.saddlebook.estimation.api.Scale} says which quantile belongs.
+ *
  * <p><b>Ratios.</b> {@link org.saddlebook.estimation.api.Fieller} gives the set of ratios the data allow, whatever its
  * kind. <b>Comparison.</b> {@link org.saddlebook.estimation.api.InformationCriteria} and
  * {@link org.saddlebook.estimation.api.FisherF}.
  *
  * <p><b>Same bits everywhere.</b> Elementary functions are those of {@link java.lang.StrictMath}, sums run in a fixed
- * order, nothing is random and nothing runs in another thread. Everything returned is immutable and thread-safe.
+ * order, random numbers come from named streams, and threads, used only when asked for, decide nothing. Everything returned is immutable and thread-safe.
  */
 @Export
 @Version("1.0.0")

@@ -9,8 +9,8 @@ import java.util.function.ToDoubleFunction;
  * Parameter sets drawn by {@link Bootstrap} or {@link MonteCarlo}, and intervals of anything computed from them. Immutable
  * and thread-safe.
  *
- * <p>Which interval to believe: at five points, intervals of 95 % from residuals with corrected leverages cover 86 %, from
- * whole observations 91 %, with BCa no more (measured; the table is in the bundle's README). Below about twelve points none of
+ * <p>Which interval to believe: at five points, intervals of 95 % from residuals with corrected leverages cover 85 %, from
+ * whole observations 90 %, with BCa no more (measured; the table is in the bundle's README). Below about twelve points none of
  * them belongs in a report as the interval. Multivariate-t draws of {@link MonteCarlo} cover what they say.
  */
 public final class Resamples implements ResampleOutcome {

@@ -77,6 +77,9 @@ final class ReactionEvaluation {
         if (request.lnQ().isPresent()) {
             composition(body);
         }
+        if (request.settings().node("equilibrium").isPresent()) {
+            body.put("equilibrium", new Node.Items(equilibrium()));
+        }
         body.put("notes", new Node.Items(notes(roots, open)));
         body.put(
                 "figures",
@@ -273,6 +276,18 @@ final class ReactionEvaluation {
         item.put("upper", Node.Quantity.of(to, "K"));
         item.put("sign", new Node.Text(sign < 0 ? "negative" : sign > 0 ? "positive" : "zero"));
         return new Node.Group(item);
+    }
+
+    private List<Node> equilibrium() throws Refusal {
+        EquilibriumReader reader =
+                new EquilibriumReader(request.settings().node("equilibrium").orElseThrow(), request.participants());
+        List<String> cautions = new ArrayList<>(List.of("allowed-is-not-fast", SpontaneityCautions.IDEAL));
+        cautions.addAll(common);
+        List<Node> items = new ArrayList<>();
+        for (double kelvin : rows()) {
+            items.add(reader.row(function, kelvin, uncertain, cautions));
+        }
+        return items;
     }
 
     /** Crossovers where the composition is held. */

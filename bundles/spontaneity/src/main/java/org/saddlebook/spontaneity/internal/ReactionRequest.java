@@ -28,8 +28,8 @@ record ReactionRequest(
         boolean extrapolated,
         OptionalDouble lnQ,
         SettingsReader settings) {
-    static final List<String> KEYS =
-            List.of("reaction", "source", "species", "range", "extrapolate", "composition", "standardState");
+    static final List<String> KEYS = List.of(
+            "reaction", "source", "species", "range", "extrapolate", "composition", "standardState", "equilibrium");
 
     /** Whether the species' heat capacities are all known. */
     boolean heatCapacitiesKnown() {

@@ -11,6 +11,7 @@ final class SpontaneityCautions {
     static final String SPECIES_UNCERTAINTY = "spontaneity-species-uncertainty";
     static final String SPECIES_INDEPENDENT = "spontaneity-species-independent";
     static final String JUMP = "spontaneity-jump";
+    static final String IDEAL = "spontaneity-ideal";
     static final String UNITS_DOUBTFUL = "spontaneity-units-doubtful";
 
     /** Beyond this size an entropy of reaction is more likely a slip of unit (common practice, no source), J/(mol K). */
@@ -36,6 +37,8 @@ final class SpontaneityCautions {
                 "The data of at least one species state no uncertainty: it is taken as exact, and every interval is too narrow.";
             case SPECIES_INDEPENDENT ->
                 "The uncertainties of the species are taken as independent, and as the same at every temperature.";
+            case IDEAL ->
+                "Gases and solutions are taken as ideal, pure phases as pure, and no other reaction as taking part; at high pressure or ionic strength the composition at equilibrium is another.";
             case JUMP ->
                 "ΔG changes sign in a jump where two sets of data of one species meet: no temperature of equilibrium is found there, look at the data.";
             default -> CautionText.of(id);

@@ -82,6 +82,11 @@ final class SpontaneityEvaluation {
         if (request.heatCapacitiesKnown()) {
             return new ReactionEvaluation(campaign, request).body();
         }
+        if (request.settings().node("equilibrium").isPresent()) {
+            throw new Refusal(
+                    "The composition at equilibrium needs the heat capacity of every species; choose another source,"
+                            + " or state Cp under species.");
+        }
         Map<String, Node> members = new LinkedHashMap<>();
         members.put("reaction", new Node.Text(request.equation().text()));
         Stated stated = ConstantReaction.of(request);

@@ -14,7 +14,7 @@ import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.quantity.Constants;
 
-/** Equilibrium tables against published values, and against fits of the same data by another program (R, lm). */
+/** Equilibrium tables against published values, and against fits of the same data made outside this project. */
 @Tag("validation")
 class TableValidationTest {
     private static Map<String, Node> table(String kind, String standard) {

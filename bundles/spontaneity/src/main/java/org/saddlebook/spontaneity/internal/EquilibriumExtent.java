@@ -1,0 +1,147 @@
+package org.saddlebook.spontaneity.internal;
+
+import java.util.List;
+
+/**
+ * The extent at which one reaction is at equilibrium: {@code Σ ν ln a(ξ) = ln K} with {@code n = n₀ + ν ξ}. Gases are ideal at
+ * a held pressure, {@code a = (n/n_gas) p/(1 bar)}, solutes ideal in a held volume, {@code a = n/(V · 1 mol/L)}, pure liquids
+ * and solids have {@code a = 1} until they are used up. {@code ln Q} never falls with ξ, so there is one answer; where a pure
+ * phase runs out before equilibrium, that is the answer and said so.
+ */
+final class EquilibriumExtent {
+    private static final int MOST_STEPS = 2000;
+
+    /** How a species enters Q. */
+    enum Kind {
+        GAS,
+        SOLUTE,
+        PURE
+    }
+
+    /**
+     * A species that takes part.
+     *
+     * @param coefficient products minus reactants
+     * @param amount at the start, mol, not negative
+     * @param kind how it enters Q
+     */
+    record Member(double coefficient, double amount, Kind kind) {}
+
+    /**
+     * The answer.
+     *
+     * @param extent ξ, mol
+     * @param usedUp whether a pure phase ran out before equilibrium, or nothing opposes the reaction
+     * @param perLnK dξ/d ln K, mol; 0 where used up
+     * @param perLnPressure dξ/d ln p, mol; 0 where used up
+     */
+    record Answer(double extent, boolean usedUp, double perLnK, double perLnPressure) {}
+
+    private final List<Member> members;
+    private final double inert;
+    private final double bar;
+    private final double litres;
+
+    /**
+     * A start.
+     *
+     * @param inert inert gas, mol
+     * @param bar pressure over 1 bar; of no effect without gases
+     * @param litres volume over 1 L; of no effect without solutes
+     */
+    EquilibriumExtent(List<Member> members, double inert, double bar, double litres) {
+        this.members = List.copyOf(members);
+        this.inert = inert;
+        this.bar = bar;
+        this.litres = litres;
+    }
+
+    /** The smallest extent: a product is used up. */
+    double lower() {
+        double bound = Double.NEGATIVE_INFINITY;
+        for (Member one : members) {
+            if (one.coefficient() > 0) {
+                bound = Math.max(bound, -one.amount() / one.coefficient());
+            }
+        }
+        return bound;
+    }
+
+    /** The largest extent: a reactant is used up. */
+    double upper() {
+        double bound = Double.POSITIVE_INFINITY;
+        for (Member one : members) {
+            if (one.coefficient() < 0) {
+                bound = Math.min(bound, -one.amount() / one.coefficient());
+            }
+        }
+        return bound;
+    }
+
+    double lnQ(double extent) {
+        double gas = gas(extent);
+        double sum = 0;
+        for (Member one : members) {
+            double amount = one.amount() + one.coefficient() * extent;
+            if (one.kind() == Kind.GAS) {
+                sum += one.coefficient() * StrictMath.log(amount / gas * bar);
+            } else if (one.kind() == Kind.SOLUTE) {
+                sum += one.coefficient() * StrictMath.log(amount / litres);
+            }
+        }
+        return sum;
+    }
+
+    private double gas(double extent) {
+        double gas = inert;
+        for (Member one : members) {
+            if (one.kind() == Kind.GAS) {
+                gas += one.amount() + one.coefficient() * extent;
+            }
+        }
+        return gas;
+    }
+
+    private double gasChange() {
+        double sum = 0;
+        for (Member one : members) {
+            sum += one.kind() == Kind.GAS ? one.coefficient() : 0;
+        }
+        return sum;
+    }
+
+    /** d ln Q/dξ, never negative (Cauchy and Schwarz). */
+    private double slope(double extent) {
+        double gas = gas(extent);
+        double sum = gas > 0 ? -gasChange() * gasChange() / gas : 0;
+        for (Member one : members) {
+            if (one.kind() != Kind.PURE) {
+                sum += one.coefficient() * one.coefficient() / (one.amount() + one.coefficient() * extent);
+            }
+        }
+        return Math.max(0, sum);
+    }
+
+    /** The equilibrium; both bounds must be finite and differ. */
+    Answer at(double lnK) {
+        double low = lower();
+        double high = upper();
+        for (int i = 0; i < MOST_STEPS; i++) {
+            double middle = low + (high - low) / 2;
+            if (!(middle > low && middle < high)) {
+                break;
+            }
+            if (lnQ(middle) < lnK) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        double extent = low + (high - low) / 2;
+        boolean usedUp = low == lower() || high == upper();
+        double slope = usedUp ? 0 : slope(extent);
+        return slope > 0
+                ? new Answer(extent, false, 1 / slope, -gasChange() / slope)
+                : new Answer(low == lower() ? lower() : high == upper() ? upper() : extent, true, 0, 0);
+    }
+}

@@ -132,7 +132,8 @@ final class CacheSlot implements AutoCloseable {
         }
     }
 
-    private static void delete(Path folder) throws IOException {
+    /** Deletes a folder with everything in it; nothing happens when it is not there. */
+    static void delete(Path folder) throws IOException {
         if (!Files.exists(folder)) {
             return;
         }

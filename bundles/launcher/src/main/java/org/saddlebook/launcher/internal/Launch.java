@@ -62,16 +62,22 @@ final class Launch {
      */
     int train() throws IOException, Refused, BundleException, InterruptedException {
         List<String[]> commands = new ArrayList<>();
+        Path scratch = Files.createTempDirectory("saddlebook-training-");
         for (String line : Files.readAllLines(home.resolve("lib").resolve("training"))) {
             if (!line.isBlank()) {
                 String[] arguments = line.strip().split(" ", -1);
                 for (int i = 0; i < arguments.length; i++) {
-                    arguments[i] = arguments[i].replace("{home}", home.toString());
+                    arguments[i] =
+                            arguments[i].replace("{home}", home.toString()).replace("{scratch}", scratch.toString());
                 }
                 commands.add(arguments);
             }
         }
-        return run(commands, null);
+        try {
+            return run(commands, null);
+        } finally {
+            CacheSlot.delete(scratch);
+        }
     }
 
     private int run(List<String[]> commands, Long shuffle)

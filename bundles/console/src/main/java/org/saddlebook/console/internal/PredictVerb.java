@@ -18,7 +18,7 @@ import org.saddlebook.api.problem.Place;
 import org.saddlebook.api.problem.Problem;
 import org.saddlebook.api.service.CampaignFormat;
 import org.saddlebook.api.service.Prediction;
-import org.saddlebook.api.service.StoredFindings;
+import org.saddlebook.console.api.EntryFindings;
 import org.saddlebook.console.api.ExitCode;
 import org.saddlebook.console.api.Invocation;
 import org.saddlebook.console.api.Options;
@@ -47,7 +47,7 @@ public final class PredictVerb implements Verb {
 
     @Override
     public String synopsis() {
-        return "FINDINGS.json|N --at T... [--model ID]... [--json]";
+        return "FINDINGS.json|N --at T... [--model ID]... [--json] [--register PATH]";
     }
 
     @Override
@@ -62,16 +62,18 @@ public final class PredictVerb implements Verb {
                 N              number of an entry of the register
                 --at T         temperature, such as 298.15K, 25degC or 77degF; may be repeated
                 --model ID     this fitted model only; may be repeated
-                --json         print the predictions as JSON and nothing else""";
+                --json         print the predictions as JSON and nothing else
+                --register PATH  the register's file, for N""";
     }
 
     @Override
     public int run(Invocation invocation) throws InputException, IOException {
-        Options options = Options.parse(invocation.arguments(), List.of("--json"), List.of("--at", "--model"));
+        Options options = Options.parse(
+                invocation.arguments(), List.of("--json"), List.of("--at", "--model", EntryFindings.OPTION));
         List<Double> kelvin = temperatures(options.values("--at"));
         CampaignFormat format = services.need(CampaignFormat.class, "base");
         String word = options.word("FINDINGS.json|N");
-        Findings findings = findings(word, invocation, format);
+        Findings findings = findings(word, invocation, options, format);
         List<String> models = options.values("--model");
         List<Node> rows = services.need(Prediction.class, "base").predict(findings, kelvin, models);
         if (options.has("--json")) {
@@ -104,10 +106,11 @@ public final class PredictVerb implements Verb {
         return kelvin;
     }
 
-    private Findings findings(String word, Invocation invocation, CampaignFormat format)
+    private Findings findings(String word, Invocation invocation, Options options, CampaignFormat format)
             throws InputException, IOException {
         if (isNumber(word)) {
-            byte[] stored = services.need(StoredFindings.class, "register").findings(Long.parseLong(word));
+            byte[] stored =
+                    services.need(EntryFindings.class, "register").findings(Long.parseLong(word), invocation, options);
             return format.readFindings("entry " + word, stored);
         }
         Path path = Paths.resolve(invocation, word, "FINDINGS.json");

@@ -1,5 +1,7 @@
 package org.saddlebook.evaluation.internal;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -35,7 +37,8 @@ final class Effective {
                         known.isEmpty()
                                 ? "an installed rate model; none is installed"
                                 : "one of " + String.join(", ", known),
-                        "Name an installed model, or install the feature model-" + asked + "."));
+                        "Name an installed model, or install the bundle that provides this one; `saddlebook models` lists"
+                                + " what is installed."));
             }
         }
         Choices resolved =
@@ -47,8 +50,8 @@ final class Effective {
                 problems.add(new Problem(
                         "molecularity-against-unit",
                         Place.of(campaign.title()),
-                        "molecularity " + choices.molecularity().getAsDouble(),
-                        "order " + table.order() + ", from the unit "
+                        "molecularity " + number(choices.molecularity().getAsDouble()),
+                        "order " + number(table.order()) + ", from the unit "
                                 + table.rateUnit().code(),
                         "Correct the stated molecularity or the unit of k."));
             }
@@ -76,5 +79,13 @@ final class Effective {
                             "State u(k) for every row, exclude the row with a reason, or choose the error model constant-relative."));
         }
         return choices.errorModel().get();
+    }
+
+    /** Digits that do not depend on the Java version. */
+    private static String number(double value) {
+        return new BigDecimal(value)
+                .round(new MathContext(12))
+                .stripTrailingZeros()
+                .toPlainString();
     }
 }

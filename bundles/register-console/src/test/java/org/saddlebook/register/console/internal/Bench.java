@@ -32,7 +32,9 @@ import org.saddlebook.api.service.Intake;
 import org.saddlebook.api.service.Progress;
 import org.saddlebook.api.service.ReportWriter;
 import org.saddlebook.campaign.json.internal.JsonCampaignFormat;
+import org.saddlebook.console.api.EntryFindings;
 import org.saddlebook.console.api.Invocation;
+import org.saddlebook.console.api.Options;
 import org.saddlebook.console.api.Verb;
 import org.saddlebook.register.api.Digest;
 import org.saddlebook.register.api.Registers;
@@ -89,6 +91,13 @@ final class Bench implements Services, Intake, Evaluation, ReportWriter {
             out = outBytes.toString(StandardCharsets.UTF_8);
             err = errBytes.toString(StandardCharsets.UTF_8);
         }
+    }
+
+    /** The findings of an entry, as other verbs get them. */
+    byte[] findings(long entry) throws Exception {
+        Invocation call = new Call(List.of(), System.out, System.err, folder);
+        return new EntryFindingsComponent(this)
+                .findings(entry, call, Options.parse(List.of(), List.of(), List.of(EntryFindings.OPTION)));
     }
 
     String out() {

@@ -61,6 +61,17 @@ class VerbsTest {
     }
 
     @Test
+    void handsTheFindingsOfAnEntryToOtherVerbs() throws Exception {
+        bench.run("enter", "rates.csv");
+        String json = new String(bench.findings(1), java.nio.charset.StandardCharsets.UTF_8);
+        assertTrue(json.startsWith("{"), json);
+        assertTrue(json.contains("saddlebook/findings/1"), json);
+        Exception absent = org.junit.jupiter.api.Assertions.assertThrows(
+                org.saddlebook.register.api.RegisterException.class, () -> bench.findings(7));
+        assertTrue(absent.getMessage().contains("7"), absent.getMessage());
+    }
+
+    @Test
     void givesJsonToScripts() throws Exception {
         bench.run("enter", "a.csv");
         bench.run("enter", "b.csv", "--supersedes", "1", "--as", "Jo Kern");

@@ -25,7 +25,20 @@ public final class Layer {
         /** A vertical mark at each x. */
         VERTICAL_MARK,
         /** A horizontal mark at each y. */
-        HORIZONTAL_MARK
+        HORIZONTAL_MARK,
+        /** A firm vertical line at each x that nothing may cross. */
+        WALL,
+        /** Everything below y(x), filled. */
+        FLOOR,
+        /**
+         * In a strip of its own under the figure: a body as thick as y(x), from 0 to 1, filled up to lower(x) and
+         * outlined beyond it.
+         */
+        SPINDLE,
+        /** In the strip under the figure: a name above each x. */
+        STRIP_MARK,
+        /** In the strip under the figure: a tick at each x. */
+        RUG
     }
 
     private final Kind kind;

@@ -33,7 +33,7 @@ record Extent(double low, double high) {
                     core.add(layer.lower());
                     core.add(layer.upper());
                 }
-                case LINE, HORIZONTAL_MARK -> core.add(layer.y());
+                case LINE, HORIZONTAL_MARK, FLOOR -> core.add(layer.y());
                 case PREDICTED -> {
                     core.add(layer.y());
                     wide.add(layer.lower());
@@ -43,8 +43,8 @@ record Extent(double low, double high) {
                     wide.add(layer.lower());
                     wide.add(layer.upper());
                 }
-                case VERTICAL_MARK -> {
-                    // Stands at every height.
+                case VERTICAL_MARK, WALL, SPINDLE, STRIP_MARK, RUG -> {
+                    // Stands at every height, or in the strip under the drawing area.
                 }
             }
         }

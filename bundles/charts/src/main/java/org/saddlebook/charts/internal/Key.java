@@ -80,7 +80,7 @@ final class Key {
                     g.draw(new Line2D.Double(x, y - 4.5, x + wide, y - 4.5));
                     g.draw(new Line2D.Double(x, y + 4.5, x + wide, y + 4.5));
                 }
-                case LINE, VERTICAL_MARK, HORIZONTAL_MARK -> wide = 0;
+                case LINE, VERTICAL_MARK, HORIZONTAL_MARK, WALL, FLOOR, SPINDLE, STRIP_MARK, RUG -> wide = 0;
             }
             Lettering.draw(g, entry.word(), x + wide + 5, baseline, Lettering.Anchor.START, size, false, Palette.INK);
             x += wide + 5 + Lettering.width(entry.word(), size, false) + 18;

@@ -121,6 +121,17 @@ final class LayerRenderer extends AbstractXYItemRenderer {
                     g.draw(new Line2D.Double(area.getMinX(), at, area.getMaxX(), at));
                 }
             }
+            case WALL -> {
+                g.setPaint(Palette.INK);
+                g.setStroke(Palette.WALL);
+                for (double at : x) {
+                    g.draw(new Line2D.Double(at, area.getMinY(), at, area.getMaxY()));
+                }
+            }
+            case FLOOR -> floor(g, x, y, area);
+            case SPINDLE, STRIP_MARK, RUG -> {
+                // Drawn in the strip under the drawing area.
+            }
         }
     }
 
@@ -131,6 +142,21 @@ final class LayerRenderer extends AbstractXYItemRenderer {
             return area.getMaxY();
         }
         return Math.max(at, area.getMinY());
+    }
+
+    private static void floor(Graphics2D g, double[] x, double[] y, Rectangle2D area) {
+        if (x.length == 0) {
+            return;
+        }
+        Path2D region = path(x, y);
+        region.lineTo(x[x.length - 1], area.getMaxY());
+        region.lineTo(x[0], area.getMaxY());
+        region.closePath();
+        g.setPaint(Palette.RAIL);
+        g.fill(region);
+        g.setPaint(Palette.INK);
+        g.setStroke(Palette.FINE);
+        g.draw(path(x, y));
     }
 
     private Path2D hatch(double[] x, double[] low, double[] high) {

@@ -29,7 +29,8 @@ final class MarkNames {
     static List<Name> of(List<Layer> layers, DoubleUnaryOperator horizontal, double right) {
         List<Wanted> wanted = new ArrayList<>();
         for (Layer layer : layers) {
-            if (layer.kind() == Layer.Kind.VERTICAL_MARK && !layer.label().isEmpty()) {
+            boolean vertical = layer.kind() == Layer.Kind.VERTICAL_MARK || layer.kind() == Layer.Kind.WALL;
+            if (vertical && !layer.label().isEmpty()) {
                 for (double value : layer.x()) {
                     wanted.add(new Wanted(layer.label(), horizontal.applyAsDouble(value)));
                 }

@@ -27,6 +27,7 @@ final class Palette {
     static final BasicStroke HAIR = stroke(0.6f);
     static final BasicStroke FINE = stroke(1f);
     static final BasicStroke FIRM = stroke(1.5f);
+    static final BasicStroke WALL = stroke(3f);
     static final BasicStroke OUTLINE = stroke(0.9f, 3, 2.5f);
 
     private Palette() {}

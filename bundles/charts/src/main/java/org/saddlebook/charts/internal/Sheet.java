@@ -42,6 +42,7 @@ final class Sheet {
     private final List<String> titleLines;
     private final List<MarkNames.Name> markNames;
     private final int rows;
+    private final Strip strip;
     private final Rectangle2D area;
     private final int bottom;
     private final int height;
@@ -60,7 +61,8 @@ final class Sheet {
 
         Extent y = Extent.vertical(layers, spacingY);
         List<Spacing.Tick> ticksY = spacingY.ticks(y.low(), y.high(), 7);
-        axisY = new StandAxis(spacingY, y.low(), y.high(), false, ticksY);
+        axisY = new StandAxis(spacingY, y.low(), y.high(), false, ticksY, 0);
+        strip = new Strip(layers);
         double widest = 0;
         for (Spacing.Tick tick : ticksY) {
             widest = Math.max(widest, Lettering.width(tick.label(), StandAxis.SIZE, false));
@@ -71,6 +73,7 @@ final class Sheet {
                 names.add(layer.label());
             }
         }
+        names.addAll(strip.sideNames());
         double right =
                 Math.max(EndLabels.room(names), temperature ? 8 + Lettering.width("°C, spaced as 1/T", 10, false) : 24);
         int left = MARGIN + (int) Math.ceil(widest + StandAxis.TICK + 6);
@@ -82,17 +85,20 @@ final class Sheet {
                 x.low(),
                 x.high(),
                 temperature,
-                temperature ? List.of() : spacingX.ticks(x.low(), x.high(), wide / 70));
+                temperature ? List.of() : spacingX.ticks(x.low(), x.high(), wide / 70),
+                strip.height());
 
         markNames = MarkNames.of(
                 layers,
                 value -> axisX.valueToJava2D(value, new Rectangle2D.Double(left, 0, wide, 1), RectangleEdge.BOTTOM),
                 WIDTH - MARGIN);
         rows = MarkNames.rows(markNames);
-        titleLines = Lettering.wrap(figure.title(), TITLE_SIZE, (WIDTH - 2 * MARGIN - FOLD - 40) / 1.1);
+        double numbers = Math.max(40, 10 + Lettering.width(noteNumbers(), NOTE_SIZE, true));
+        titleLines = Lettering.wrap(figure.title(), TITLE_SIZE, (WIDTH - 2 * MARGIN - FOLD - numbers) / 1.1);
         int top = 12 + titleLines.size() * 18 + (Key.of(layers).isEmpty() ? 0 : 22) + 34 + rows * 14;
         area = new Rectangle2D.Double(left, top, wide, HEIGHT_OF_AREA);
-        int foot = top + HEIGHT_OF_AREA + (temperature ? (int) StandAxis.RAIL + 28 : 50);
+        int foot =
+                top + HEIGHT_OF_AREA + (int) Math.ceil(strip.height()) + (temperature ? (int) StandAxis.RAIL + 28 : 50);
         bottom = foot;
         int lines = 0;
         for (Notes.Note note : notes) {
@@ -129,11 +135,12 @@ final class Sheet {
         chart().draw(g, new Rectangle2D.Double(0, 0, WIDTH, height));
         markNames(g);
         endNames(g);
+        strip.draw(g, area.getMaxY(), area.getMinX(), area.getMaxX(), this::horizontal);
         Lettering.draw(
                 g,
                 labelX,
                 area.getMaxX(),
-                area.getMaxY() + (temperature ? StandAxis.RAIL + 14 : 36),
+                area.getMaxY() + strip.height() + (temperature ? StandAxis.RAIL + 14 : 36),
                 Lettering.Anchor.END,
                 KEY_SIZE,
                 false,
@@ -242,13 +249,16 @@ final class Sheet {
             g.setPaint(Palette.INK);
             g.setStroke(Palette.FINE);
             g.draw(ear);
-            StringBuilder numbers = new StringBuilder();
-            for (Notes.Note note : notes) {
-                numbers.append(numbers.length() == 0 ? "" : " ").append(note.number());
-            }
-            Lettering.draw(
-                    g, numbers.toString(), WIDTH - fold - 6, 16, Lettering.Anchor.END, NOTE_SIZE, true, Palette.INK);
+            Lettering.draw(g, noteNumbers(), WIDTH - fold - 6, 16, Lettering.Anchor.END, NOTE_SIZE, true, Palette.INK);
         }
+    }
+
+    private String noteNumbers() {
+        StringBuilder numbers = new StringBuilder();
+        for (Notes.Note note : notes) {
+            numbers.append(numbers.length() == 0 ? "" : " ").append(note.number());
+        }
+        return numbers.toString();
     }
 
     private void notes(Graphics2D g) {

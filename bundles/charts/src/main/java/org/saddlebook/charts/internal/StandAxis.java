@@ -26,18 +26,21 @@ final class StandAxis extends ValueAxis {
     private final transient Spacing spacing;
     private final boolean temperature;
     private final transient List<Spacing.Tick> marks;
+    private final double drop;
 
     /**
      * An axis.
      *
      * @param temperature whether values are kelvin, to be labelled in kelvin and degrees Celsius
      * @param marks the marks of an axis that is not a temperature
+     * @param drop room between the drawing area and the axis at its foot
      */
-    StandAxis(Spacing spacing, double low, double high, boolean temperature, List<Spacing.Tick> marks) {
+    StandAxis(Spacing spacing, double low, double high, boolean temperature, List<Spacing.Tick> marks, double drop) {
         super(null, null);
         this.spacing = spacing;
         this.temperature = temperature;
         this.marks = List.copyOf(marks);
+        this.drop = drop;
         setAutoRange(false);
         setRange(new Range(low, high), false, false);
     }
@@ -89,7 +92,7 @@ final class StandAxis extends ValueAxis {
     }
 
     private void lying(Graphics2D g, Rectangle2D area, RectangleEdge edge) {
-        double y = area.getMaxY();
+        double y = area.getMaxY() + drop;
         double free = Double.NEGATIVE_INFINITY;
         for (Spacing.Tick tick : marks) {
             double x = valueToJava2D(tick.value(), area, edge);
@@ -101,7 +104,7 @@ final class StandAxis extends ValueAxis {
 
     /** The temperature rail: kelvin above the line, degrees Celsius below it. */
     private void rail(Graphics2D g, Rectangle2D area, RectangleEdge edge) {
-        double top = area.getMaxY();
+        double top = area.getMaxY() + drop;
         double y = top + RAIL / 2;
         g.setPaint(Palette.RAIL);
         g.fill(new Rectangle2D.Double(area.getMinX(), top, area.getWidth(), RAIL));

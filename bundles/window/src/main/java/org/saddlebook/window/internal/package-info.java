@@ -1,0 +1,2 @@
+/** The analysis {@code window}; exports nothing. */
+package org.saddlebook.window.internal;

@@ -4,7 +4,7 @@ import java.io.PrintStream;
 
 /** Lines that fit a terminal. */
 final class Lines {
-    private static final int WIDTH = 110;
+    static final int WIDTH = 110;
 
     private Lines() {}
 

@@ -23,6 +23,8 @@ final class NodeSummary {
     void print(Node node, int level) {
         if (node instanceof Node.Group group) {
             printMembers(group.members(), level);
+        } else if (node instanceof Node.Items items && printAsTable(items.items(), level)) {
+            return; // groups of the same few leaves read better as rows
         } else if (node instanceof Node.Items items) {
             for (Node item : items.items()) {
                 if (isLine(item)) {
@@ -76,7 +78,55 @@ final class NodeSummary {
             }
             lines.add(cells);
         }
-        int[] widths = new int[heads.size()];
+        printRows(lines, level);
+    }
+
+    /** Prints groups that hold the same leaves under one head, when they are more than one and fit; says whether it did. */
+    private boolean printAsTable(List<Node> items, int level) {
+        if (items.size() < 2 || !(items.get(0) instanceof Node.Group first)) {
+            return false;
+        }
+        List<String> keys = List.copyOf(first.members().keySet());
+        List<List<String>> lines = new ArrayList<>();
+        List<String> heads = new ArrayList<>();
+        for (String key : keys) {
+            heads.add(Symbols.key(key));
+        }
+        lines.add(heads);
+        int[] widths = new int[keys.size()];
+        for (Node item : items) {
+            if (!(item instanceof Node.Group group)
+                    || !List.copyOf(group.members().keySet()).equals(keys)) {
+                return false;
+            }
+            List<String> cells = new ArrayList<>();
+            for (String key : keys) {
+                Node member = group.members().get(key);
+                if (!isLine(member)) {
+                    return false;
+                }
+                cells.add(line(key, member));
+            }
+            lines.add(cells);
+        }
+        int total = 2 * level;
+        for (List<String> line : lines) {
+            for (int i = 0; i < widths.length; i++) {
+                widths[i] = Math.max(widths[i], line.get(i).length());
+            }
+        }
+        for (int width : widths) {
+            total += width + 2;
+        }
+        if (total > Lines.WIDTH) {
+            return false;
+        }
+        printRows(lines, level);
+        return true;
+    }
+
+    private void printRows(List<List<String>> lines, int level) {
+        int[] widths = new int[lines.get(0).size()];
         for (List<String> line : lines) {
             for (int i = 0; i < widths.length; i++) {
                 widths[i] = Math.max(widths[i], line.get(i).length());
@@ -94,8 +144,9 @@ final class NodeSummary {
     /** A leaf as one line; empty for a node that is no leaf. */
     private String line(String key, Node node) {
         if (node instanceof Node.Quantity quantity) {
-            boolean temperature = quantity.unit().equals("K")
-                    && !key.toLowerCase(java.util.Locale.ROOT).contains("extrapolation");
+            String lower = key.toLowerCase(java.util.Locale.ROOT);
+            boolean temperature =
+                    quantity.unit().equals("K") && !lower.contains("extrapolation") && !lower.contains("shift");
             String text = temperature && quantity.interval().isEmpty()
                     ? QuantityText.temperature(quantity)
                     : QuantityText.withInterval(quantity);

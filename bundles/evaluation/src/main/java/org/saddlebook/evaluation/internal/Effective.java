@@ -37,8 +37,8 @@ final class Effective {
                         known.isEmpty()
                                 ? "an installed rate model; none is installed"
                                 : "one of " + String.join(", ", known),
-                        "Name an installed model, or install the bundle that provides this one; `saddlebook models` lists"
-                                + " what is installed."));
+                        "Name an installed model, or install the bundle that provides this one; one of ours would be in the"
+                                + " feature model-" + asked + "."));
             }
         }
         Choices resolved =

@@ -170,6 +170,17 @@ class ConsoleContractTest {
     }
 
     @Test
+    void anEntryOfTheRegisterPredictsAsItsFindingsDo() throws Exception {
+        assertEquals(0, product.run("evaluate", "rates.csv", "--out", "result").exitCode());
+        assertEquals(0, product.run("enter", "result").exitCode());
+        InstalledProduct.Outcome entry = product.run("predict", "1", "--at", "25degC", "--json");
+        assertEquals(0, entry.exitCode(), entry.err());
+        assertEquals(
+                product.run("predict", "result", "--at", "25degC", "--json").out(), entry.out());
+        assertEquals(2, product.run("predict", "7", "--at", "25degC").exitCode());
+    }
+
+    @Test
     void aFileWithAnAccentInItsNameOpensInThePosixLocale() throws Exception {
         Files.copy(table, home.resolve("geschwindigkeit-größe.csv"));
         InstalledProduct.Outcome found = product.with("LC_ALL", "C").run("evaluate", "geschwindigkeit-größe.csv");

@@ -55,16 +55,21 @@ class NodeSummaryTest {
     }
 
     @Test
-    void groupsOfValuesInAListStandOnOneLineEach() {
-        Map<String, Node> row = new LinkedHashMap<>();
-        row.put("temperature", Node.Quantity.of(300, "K"));
-        row.put("sign", new Node.Text("positive"));
-        Section section = Section.done("x", "X", new Node.Items(List.of(new Node.Group(row))), Map.of());
+    void likeGroupsInAListAreRowsUnderOneHead() {
+        Map<String, Node> one = new LinkedHashMap<>();
+        one.put("temperature", Node.Quantity.of(300, "K"));
+        one.put("sign", new Node.Text("positive"));
+        Map<String, Node> two = new LinkedHashMap<>(one);
+        two.put("sign", new Node.Text("open"));
+        Section section =
+                Section.done("x", "X", new Node.Items(List.of(new Node.Group(one), new Node.Group(two))), Map.of());
         assertEquals("""
                 T
 
                 X
-                  - temperature 300.00 K (26.85 °C); sign positive
+                  temperature          sign
+                  300.00 K (26.85 °C)  positive
+                  300.00 K (26.85 °C)  open
 
                 """, printed(section));
     }

@@ -8,6 +8,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.NavigableSet;
 import java.util.Random;
 import java.util.TreeSet;
 import java.util.concurrent.TimeUnit;
@@ -102,14 +103,14 @@ class RegisterOfTheProductTest {
             InstalledProduct.Outcome verified = product.run("register", "verify");
             assertEquals(0, verified.exitCode(), "after kill " + i + " of seed " + seed + ": " + verified.all());
         }
-        TreeSet<Integer> entries = entries();
+        NavigableSet<Integer> entries = entries();
         assertTrue(entries.containsAll(acknowledged), acknowledged + " acknowledged, " + entries + " there");
         assertEquals(entries.size(), entries.last(), "numbers have no gap: " + entries);
         System.out.println(times + " entries started, " + killed + " killed, " + acknowledged.size() + " acknowledged, "
                 + entries.size() + " in the register");
     }
 
-    private TreeSet<Integer> entries() throws IOException, InterruptedException {
+    private NavigableSet<Integer> entries() throws IOException, InterruptedException {
         InstalledProduct.Outcome listed = product.run("register", "list", "--json");
         assertEquals(0, listed.exitCode(), listed.all());
         TreeSet<Integer> numbers = new TreeSet<>();

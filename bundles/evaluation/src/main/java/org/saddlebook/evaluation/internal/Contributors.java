@@ -9,6 +9,7 @@ import java.security.NoSuchAlgorithmException;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.TreeMap;
+import java.util.function.UnaryOperator;
 import org.osgi.framework.Bundle;
 import org.osgi.framework.wiring.BundleWire;
 import org.osgi.framework.wiring.BundleWiring;
@@ -17,6 +18,16 @@ import org.saddlebook.api.findings.Contributor;
 /** Collects the bundles that took part: those named and whatever they are wired to, the framework itself left out. */
 final class Contributors {
     private final TreeMap<String, Contributor> found = new TreeMap<>();
+    private final UnaryOperator<String> known;
+
+    /**
+     * Collects.
+     *
+     * @param known hash of a bundle by its location, where somebody keeps it; empty where nobody does
+     */
+    Contributors(UnaryOperator<String> known) {
+        this.known = known;
+    }
 
     /** Adds a bundle and what it is wired to. */
     void add(Bundle bundle) {
@@ -44,7 +55,11 @@ final class Contributors {
     }
 
     /** SHA-256 of the file behind a bundle location; empty when the location is not a file. */
-    private static String hash(String location) {
+    private String hash(String location) {
+        String kept = known.apply(location);
+        if (!kept.isEmpty()) {
+            return kept;
+        }
         String file = location.startsWith("reference:") ? location.substring("reference:".length()) : location;
         if (!file.startsWith("file:")) {
             return "";

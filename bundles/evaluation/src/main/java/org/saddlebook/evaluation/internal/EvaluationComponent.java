@@ -7,8 +7,10 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.concurrent.TimeUnit;
+import java.util.function.UnaryOperator;
 import org.osgi.framework.Bundle;
 import org.osgi.framework.BundleContext;
+import org.osgi.framework.InvalidSyntaxException;
 import org.osgi.framework.ServiceReference;
 import org.osgi.service.component.annotations.Activate;
 import org.osgi.service.component.annotations.Component;
@@ -55,7 +57,7 @@ public final class EvaluationComponent implements Evaluation {
                 owners.put(analysis.section(), reference.getBundle());
             }
         });
-        Contributors contributors = new Contributors();
+        Contributors contributors = new Contributors(knownHashes());
         contributors.add(context.getBundle());
         Optional<Bundle> formatBundle = Optional.ofNullable(context.getServiceReference(CampaignFormat.class))
                 .map(ServiceReference::getBundle);
@@ -80,11 +82,28 @@ public final class EvaluationComponent implements Evaluation {
                 findings.campaignTitle(), findings.campaignDigest(), contributors.list(), findings.sections());
     }
 
+    /** Hashes that the launcher keeps, valid for the files that this run was started from; hashing them anew takes long. */
+    @SuppressWarnings({"unchecked", "rawtypes"}) // what the launcher registers under this property
+    private UnaryOperator<String> knownHashes() {
+        try {
+            for (ServiceReference<UnaryOperator> reference :
+                    context.getServiceReferences(UnaryOperator.class, "(saddlebook.entry=hashes)")) {
+                UnaryOperator<String> hashes = (UnaryOperator<String>) context.getService(reference);
+                if (hashes != null) {
+                    return hashes;
+                }
+            }
+        } catch (InvalidSyntaxException impossible) {
+            throw new IllegalStateException("a constant filter", impossible);
+        }
+        return location -> "";
+    }
+
     private <S> Map<ServiceReference<S>, S> services(Class<S> type) {
         List<ServiceReference<S>> references = new ArrayList<>();
         try {
             references.addAll(context.getServiceReferences(type, null));
-        } catch (org.osgi.framework.InvalidSyntaxException impossible) {
+        } catch (InvalidSyntaxException impossible) {
             throw new IllegalStateException("no filter, no syntax", impossible);
         }
         references.sort(java.util.Comparator.reverseOrder());

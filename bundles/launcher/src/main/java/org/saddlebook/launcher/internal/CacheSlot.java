@@ -106,6 +106,11 @@ final class CacheSlot implements AutoCloseable {
         return folder.resolve("framework");
     }
 
+    /** A file of the launcher's own beside the storage. */
+    Path file(String name) {
+        return folder.resolve(name);
+    }
+
     /** Whether an earlier run filled it completely for this set of bundles. */
     boolean filled() {
         return filled;

@@ -44,7 +44,7 @@ final class House {
         BundleContext context = framework.getBundleContext();
         List<Bundle> product = new ArrayList<>();
         for (Path jar : plan.product()) {
-            String location = "reference:" + jar.toUri();
+            String location = KnownHashes.location(jar);
             Bundle bundle = context.getBundle(location);
             try {
                 product.add(bundle == null ? context.installBundle(location) : bundle);

@@ -13,6 +13,7 @@ import java.util.Map;
 import java.util.function.Function;
 import java.util.function.Supplier;
 import java.util.function.ToIntFunction;
+import java.util.function.UnaryOperator;
 import org.apache.felix.framework.FrameworkFactory;
 import org.apache.felix.scr.impl.Activator;
 import org.osgi.framework.BundleActivator;
@@ -125,8 +126,13 @@ final class Launch {
             context.registerService(Supplier.class, house::troubles, entry("troubles"));
             Function<byte[], String> check = policy::forbids;
             context.registerService(Function.class, check, entry("policy"));
+            KnownHashes hashes = new KnownHashes(slot.file("hashes"));
+            context.registerService(UnaryOperator.class, hashes, entry("hashes"));
             house.open();
-            slot.markFilled();
+            if (!slot.filled()) {
+                hashes.keep(plan.product());
+                slot.markFilled();
+            }
             for (String sentence : house.troubles().values()) {
                 err.println("saddlebook: " + sentence);
             }

@@ -11,9 +11,12 @@ import java.util.List;
 import java.util.TreeMap;
 import java.util.function.UnaryOperator;
 import org.osgi.framework.Bundle;
+import org.osgi.framework.Constants;
+import org.osgi.framework.ServiceReference;
 import org.osgi.framework.wiring.BundleWire;
 import org.osgi.framework.wiring.BundleWiring;
 import org.saddlebook.api.findings.Contributor;
+import org.saddlebook.api.model.RateModel;
 
 /** Collects the bundles that took part: those named and whatever they are wired to, the framework itself left out. */
 final class Contributors {
@@ -47,6 +50,36 @@ final class Contributors {
                 add(wire.getProvider().getBundle());
             }
         }
+    }
+
+    /**
+     * Adds an analysis' bundle and the owners of the services it holds, such as sources of data: what they say is in its
+     * section, although nothing but the service registry joins them. Rate models are left to the caller, because holding one
+     * does not mean that it was asked for.
+     */
+    void addWithServices(Bundle analysis) {
+        add(analysis);
+        ServiceReference<?>[] used = analysis.getServicesInUse();
+        if (used == null) {
+            return;
+        }
+        for (ServiceReference<?> reference : used) {
+            Bundle owner = reference.getBundle();
+            if (owner != null && !isRateModel(reference)) {
+                add(owner);
+            }
+        }
+    }
+
+    private static boolean isRateModel(ServiceReference<?> reference) {
+        if (reference.getProperty(Constants.OBJECTCLASS) instanceof String[] types) {
+            for (String type : types) {
+                if (type.equals(RateModel.class.getName())) {
+                    return true;
+                }
+            }
+        }
+        return false;
     }
 
     /** The bundles by symbolic name. */

@@ -70,7 +70,11 @@ public final class EvaluationComponent implements Evaluation {
         Map<String, String> names = new TreeMap<>();
         owners.forEach((section, bundle) -> names.put(section, bundle.getSymbolicName()));
         Findings findings = new Evaluator(analyses, names)
-                .evaluate(effective, format.digest(effective), task, section -> contributors.add(owners.get(section)));
+                .evaluate(
+                        effective,
+                        format.digest(effective),
+                        task,
+                        section -> contributors.addWithServices(owners.get(section)));
         if (findings.sections().containsKey("barrier")) {
             services(RateModel.class).forEach((reference, model) -> {
                 if (effective.choices().models().contains(model.id())) {

@@ -52,10 +52,9 @@ final class ReactionEvaluation {
     }
 
     Node.Group body() throws Refusal {
-        List<Root> roots = CrossoverSearch.roots(function);
-        CrossoverSet set = new CrossoverSet(function, quantile);
+        CrossoverFindings found = new CrossoverFindings(function, uncertain, quantile, level, common);
         Map<String, Node> body = new LinkedHashMap<>();
-        body.put("case", new Node.Text(word(roots)));
+        body.put("case", new Node.Text(found.word()));
         body.put("reaction", new Node.Text(request.equation().text()));
         body.put("standardState", new Node.Text("1 bar"));
         body.put("data", new Node.Items(data()));
@@ -69,56 +68,24 @@ final class ReactionEvaluation {
             rows.add(row(kelvin));
         }
         body.put("dG", new Node.Items(rows));
-        boolean open = uncertain && set.touchesZero();
-        body.put("crossoverOutcome", new Node.Text(outcome(roots, set, open)));
-        body.put("crossovers", new Node.Items(crossovers(function, roots, set)));
-        body.put("crossoverKinds", new Node.Items(kinds(roots)));
-        body.put("signs", new Node.Items(signs(roots)));
+        body.put("crossoverOutcome", new Node.Text(found.outcome()));
+        body.put("crossovers", new Node.Items(found.crossovers()));
+        body.put("crossoverKinds", new Node.Items(found.kinds()));
+        body.put("signs", new Node.Items(found.signs()));
         if (request.lnQ().isPresent()) {
             composition(body);
         }
         if (request.settings().node("equilibrium").isPresent()) {
             body.put("equilibrium", new Node.Items(equilibrium()));
         }
-        body.put("notes", new Node.Items(notes(roots, open)));
+        body.put("notes", new Node.Items(notes(found.roots(), found.open())));
+        ReactionFigure figure = new ReactionFigure(function, quantile, uncertain);
         body.put(
                 "figures",
                 new Node.Items(List.of(
-                        new ReactionFigure(function, quantile, uncertain).figure(level, roots, gibbsCautions(false)))));
+                        figure.gibbs(level, found.roots(), gibbsCautions(false)),
+                        figure.equilibrium(level, gibbsCautions(false)))));
         return new Node.Group(body);
-    }
-
-    /** What the signs over the range come to. */
-    private String word(List<Root> roots) {
-        int changes = 0;
-        for (Root root : roots) {
-            changes += root.kind() == Root.Kind.TANGENT ? 0 : 1;
-        }
-        double start = firstSign(roots);
-        if (changes == 0) {
-            return start < 0
-                    ? "exergonic over the whole range"
-                    : start > 0 ? "at no temperature of the range" : "zero over the whole range";
-        }
-        if (changes == 1) {
-            return start < 0 ? "below the crossover" : "above the crossover";
-        }
-        return "changes more than once";
-    }
-
-    /** Sign of ΔG between the lower end of the range and the first crossover that is not at it. */
-    private double firstSign(List<Root> roots) {
-        double to = function.upper();
-        for (Root root : roots) {
-            if (root.kelvin() > function.lower()) {
-                to = root.kelvin();
-                break;
-            }
-        }
-        double middle = function.lower() + (to - function.lower()) / 2;
-        double value = function.gibbs(middle);
-        double size = Math.abs(function.enthalpy(middle)) + middle * Math.abs(function.entropy(middle));
-        return Math.abs(value) <= 1e-11 * size ? 0 : value;
     }
 
     private List<Node> data() {
@@ -129,11 +96,28 @@ final class ReactionEvaluation {
             item.put("coefficient", new Node.Scalar(one.coefficient()));
             item.put("source", new Node.Text(one.origin() + ", " + one.data().source()));
             item.put("reference", new Node.Text(one.data().reference()));
+            item.put("uncertainty", new Node.Text(uncertainty(one)));
             item.put("lower", Node.Quantity.of(one.data().lowerKelvin(), "K"));
             item.put("upper", Node.Quantity.of(one.data().upperKelvin(), "K"));
             items.add(new Node.Group(item));
         }
         return items;
+    }
+
+    /** What is known of the uncertainty of one species, in words: an absent one must not look like a small one. */
+    private static String uncertainty(Participant one) {
+        String h = one.data().enthalpyUncertainty().isPresent()
+                ? "u(ΔfH) " + Words.number(one.data().enthalpyUncertainty().getAsDouble() / 1000) + " kJ/mol"
+                : "";
+        String s = one.data().entropyUncertainty().isPresent()
+                ? "u(S) " + Words.number(one.data().entropyUncertainty().getAsDouble()) + " J/(mol K)"
+                : "";
+        if (h.isEmpty() && s.isEmpty()) {
+            return "not stated, taken as exact";
+        }
+        String both = h.isEmpty() || s.isEmpty() ? h + s + ", the other not stated" : h + ", " + s;
+        String from = one.data().uncertaintyReference();
+        return from.isEmpty() ? both : both + " (" + from + ")";
     }
 
     private Iterable<Double> rows() {
@@ -206,78 +190,6 @@ final class ReactionEvaluation {
         return ids;
     }
 
-    private String outcome(List<Root> roots, CrossoverSet set, boolean open) {
-        if (roots.isEmpty()) {
-            return open ? "not determined" : "no crossover in the range";
-        }
-        boolean bounded = true;
-        for (Root root : roots) {
-            bounded &= !uncertain || set.around(root.kelvin(), level).kind() == Interval.Kind.BETWEEN;
-        }
-        return bounded ? "bounded" : "unbounded";
-    }
-
-    private List<Node> crossovers(ReactionFunction at, List<Root> roots, CrossoverSet set) {
-        List<Node> items = new ArrayList<>();
-        for (Root root : roots) {
-            List<String> cautions = new ArrayList<>();
-            Node.Quantity quantity = Node.Quantity.of(root.kelvin(), "K");
-            if (root.kind() == Root.Kind.JUMP) {
-                cautions.add(SpontaneityCautions.JUMP);
-            }
-            if (uncertain) {
-                Interval interval = set.around(root.kelvin(), level);
-                boolean bounded = interval.kind() == Interval.Kind.BETWEEN;
-                double slope = Math.abs(at.entropy(root.kelvin()));
-                if (bounded && slope > 0 && root.kind() == Root.Kind.CROSSING) {
-                    quantity = Node.Quantity.of(root.kelvin(), "K", function.uncertaintyOfGibbs(root.kelvin()) / slope);
-                }
-                if (!bounded) {
-                    cautions.add("undetermined");
-                }
-                quantity = quantity.withInterval(interval);
-            }
-            cautions.add("at-stated-composition");
-            cautions.addAll(common);
-            items.add(quantity.withCautions(cautions));
-        }
-        return items;
-    }
-
-    private static List<Node> kinds(List<Root> roots) {
-        List<Node> items = new ArrayList<>();
-        for (Root root : roots) {
-            items.add(new Node.Text(root.kind().word()));
-        }
-        return items;
-    }
-
-    /** Sign of ΔG between crossovers, over the whole range. */
-    private List<Node> signs(List<Root> roots) {
-        List<Node> items = new ArrayList<>();
-        double from = function.lower();
-        double sign = firstSign(roots);
-        for (Root root : roots) {
-            if (root.kind() != Root.Kind.TANGENT && root.kelvin() > function.lower()) {
-                items.add(stretch(from, root.kelvin(), sign));
-                from = root.kelvin();
-                sign = root.signAbove();
-            }
-        }
-        if (from < function.upper()) {
-            items.add(stretch(from, function.upper(), sign));
-        }
-        return items;
-    }
-
-    private static Node stretch(double from, double to, double sign) {
-        Map<String, Node> item = new LinkedHashMap<>();
-        item.put("lower", Node.Quantity.of(from, "K"));
-        item.put("upper", Node.Quantity.of(to, "K"));
-        item.put("sign", new Node.Text(sign < 0 ? "negative" : sign > 0 ? "positive" : "zero"));
-        return new Node.Group(item);
-    }
-
     private List<Node> equilibrium() throws Refusal {
         EquilibriumReader reader =
                 new EquilibriumReader(request.settings().node("equilibrium").orElseThrow(), request.participants());
@@ -293,11 +205,9 @@ final class ReactionEvaluation {
     /** Crossovers where the composition is held. */
     private void composition(Map<String, Node> body) {
         double lnQ = request.lnQ().getAsDouble();
-        ReactionFunction there = function.at(lnQ);
-        List<Root> roots = CrossoverSearch.roots(there);
         body.put("lnQ", new Node.Scalar(lnQ));
-        body.put(
-                "crossoversAtComposition", new Node.Items(crossovers(there, roots, new CrossoverSet(there, quantile))));
+        CrossoverFindings there = new CrossoverFindings(function.at(lnQ), uncertain, quantile, level, common);
+        body.put("crossoversAtComposition", new Node.Items(there.crossovers()));
     }
 
     private List<Node> notes(List<Root> roots, boolean open) {

@@ -113,6 +113,32 @@ final class ReactionFunction {
         return pieces[low];
     }
 
+    /**
+     * ΔH in J/mol, ΔS in J/(mol K) and ΔG in J/mol at many temperatures. Pieces are found by walking along, which for rising
+     * temperatures costs nothing.
+     *
+     * @param kelvin temperatures, K, best in rising order
+     * @return {@code [enthalpy, entropy, gibbs][temperature]}
+     */
+    double[][] at(double[] kelvin) {
+        double[][] values = new double[3][kelvin.length];
+        int p = 0;
+        for (int i = 0; i < kelvin.length; i++) {
+            while (p + 1 < pieces.length && pieces[p + 1].lower() <= kelvin[i]) {
+                p++;
+            }
+            while (p > 0 && pieces[p].lower() > kelvin[i]) {
+                p--;
+            }
+            double h = pieces[p].enthalpy(kelvin[i]);
+            double s = pieces[p].entropy(kelvin[i]) - entropyShift;
+            values[0][i] = h;
+            values[1][i] = s;
+            values[2][i] = h - kelvin[i] * s;
+        }
+        return values;
+    }
+
     double gibbs(Piece piece, double kelvin) {
         return piece.enthalpy(kelvin) - kelvin * (piece.entropy(kelvin) - entropyShift);
     }

@@ -130,11 +130,14 @@ final class SpontaneityEvaluation {
                 statedQuantity(
                         stated.entropy(), stated.entropyUncertainty(), Unit.JOULE_PER_MOLE_KELVIN, entropySigns));
         if (stated.varianceOfEnthalpy() > 0 && stated.varianceOfEntropy() > 0) {
+            // A zero that nobody stated must not look like one that somebody did.
             body.put(
                     "correlation",
-                    new Node.Scalar(stated.covarianceOrZero()
-                            / (stated.enthalpyUncertainty().getAsDouble()
-                                    * stated.entropyUncertainty().getAsDouble())));
+                    stated.assumedIndependent()
+                            ? new Node.Text("assumed 0")
+                            : new Node.Scalar(stated.covarianceOrZero()
+                                    / (stated.enthalpyUncertainty().getAsDouble()
+                                            * stated.entropyUncertainty().getAsDouble())));
         }
         stated.degreesOfFreedom().ifPresent(dof -> body.put("degreesOfFreedom", new Node.Scalar(dof)));
         List<Node> rows = new ArrayList<>();

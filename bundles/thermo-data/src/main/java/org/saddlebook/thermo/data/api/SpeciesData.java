@@ -17,6 +17,7 @@ public final class SpeciesData {
     private final boolean heatCapacityKnown;
     private final OptionalDouble enthalpyUncertainty;
     private final OptionalDouble entropyUncertainty;
+    private final String uncertaintyReference;
 
     private SpeciesData(
             Species species,
@@ -25,7 +26,8 @@ public final class SpeciesData {
             List<Segment> segments,
             boolean heatCapacityKnown,
             OptionalDouble enthalpyUncertainty,
-            OptionalDouble entropyUncertainty) {
+            OptionalDouble entropyUncertainty,
+            String uncertaintyReference) {
         this.species = Objects.requireNonNull(species, "species");
         this.source = Objects.requireNonNull(source, "source");
         this.reference = Objects.requireNonNull(reference, "reference");
@@ -33,6 +35,7 @@ public final class SpeciesData {
         this.heatCapacityKnown = heatCapacityKnown;
         this.enthalpyUncertainty = checked(enthalpyUncertainty);
         this.entropyUncertainty = checked(entropyUncertainty);
+        this.uncertaintyReference = Objects.requireNonNull(uncertaintyReference, "uncertaintyReference");
         if (this.segments.isEmpty()) {
             throw new IllegalArgumentException("a species needs at least one segment: " + species.text());
         }
@@ -60,7 +63,7 @@ public final class SpeciesData {
      */
     public static SpeciesData of(Species species, String source, String reference, List<Segment> segments) {
         return new SpeciesData(
-                species, source, reference, segments, true, OptionalDouble.empty(), OptionalDouble.empty());
+                species, source, reference, segments, true, OptionalDouble.empty(), OptionalDouble.empty(), "");
     }
 
     /**
@@ -79,12 +82,35 @@ public final class SpeciesData {
                 List.of(new PowerSegment(t, t, new double[PowerSegment.POWERS], enthalpy, entropy)),
                 false,
                 OptionalDouble.empty(),
-                OptionalDouble.empty());
+                OptionalDouble.empty(),
+                "");
     }
 
     /** The same with standard uncertainties of ΔfH°, J/mol, and S°, J/(mol K), taken to hold at every temperature. */
     public SpeciesData withUncertainties(OptionalDouble enthalpy, OptionalDouble entropy) {
-        return new SpeciesData(species, source, reference, segments, heatCapacityKnown, enthalpy, entropy);
+        return withUncertainties(enthalpy, entropy, "");
+    }
+
+    /**
+     * The same with uncertainties that another publication states.
+     *
+     * @param from where they are from, for people; empty for the same publication as the values
+     */
+    public SpeciesData withUncertainties(OptionalDouble enthalpy, OptionalDouble entropy, String from) {
+        return new SpeciesData(species, source, reference, segments, heatCapacityKnown, enthalpy, entropy, from);
+    }
+
+    /** The same with other words about its origin, for example the file it was read from. */
+    public SpeciesData withReference(String newReference) {
+        return new SpeciesData(
+                species,
+                source,
+                newReference,
+                segments,
+                heatCapacityKnown,
+                enthalpyUncertainty,
+                entropyUncertainty,
+                uncertaintyReference);
     }
 
     /** The species with its phase. */
@@ -120,6 +146,11 @@ public final class SpeciesData {
     /** Standard uncertainty of the entropy, J/(mol K). */
     public OptionalDouble entropyUncertainty() {
         return entropyUncertainty;
+    }
+
+    /** Where the uncertainties are from; empty for the publication of the values. */
+    public String uncertaintyReference() {
+        return uncertaintyReference;
     }
 
     /** Lower end of validity, K. */

@@ -47,6 +47,26 @@ public final class TableSegment implements Segment {
         return t.clone();
     }
 
+    /**
+     * The same functions between two neighbouring rows as sums of powers, so that reactions can add them:
+     * {@code Cp = a + b T}, {@code H = h + (a + p) T + b T²/2}, {@code S = s + a ln T + (b + q) T}. {@code p} and {@code q} are
+     * the straight lines that make both meet the upper row.
+     *
+     * @param kelvin a temperature between the rows meant; below the table the first two, above it the last two
+     * @return a in J/(mol K), b in J/(mol K²), h in J/mol, p in J/(mol K), s in J/(mol K), q in J/(mol K²)
+     */
+    public double[] between(double kelvin) {
+        int i = row(kelvin);
+        double width = t[i + 1] - t[i];
+        double b = slope(i);
+        double a = cp[i] - b * t[i];
+        double p = (h[i + 1] - h[i] - heat(i, t[i + 1])) / width;
+        double q = (s[i + 1] - s[i] - heatOverT(i, t[i + 1])) / width;
+        return new double[] {
+            a, b, h[i] - t[i] * (a + p + b * t[i] / 2), p, s[i] - a * StrictMath.log(t[i]) - (b + q) * t[i], q
+        };
+    }
+
     @Override
     public double lowerKelvin() {
         return t[0];

@@ -88,10 +88,19 @@ public final class CuratedSource implements SpeciesSource {
         }
     }
 
-    /** With the uncertainties of the key values, where those list the species. */
+    /** With the uncertainties of the key values, where those list the species, else of the tables' own pages. */
     private static SpeciesData stated(SpeciesData data, Species species) {
         for (SpeciesData key : constants(species)) {
-            return data.withUncertainties(key.enthalpyUncertainty(), key.entropyUncertainty());
+            return data.withUncertainties(
+                    key.enthalpyUncertainty(), key.entropyUncertainty(), "CODATA Key Values 1989");
+        }
+        for (List<String> row : rows("uncertainties.csv")) {
+            if (matches(species, parse(row.get(0)))) {
+                return data.withUncertainties(
+                        OptionalDouble.of(number(row.get(1)) * 1000),
+                        OptionalDouble.empty(),
+                        "NIST-JANAF 1998, from memory");
+            }
         }
         return data;
     }

@@ -4,6 +4,7 @@ import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
+import org.saddlebook.api.model.Conditions;
 
 /**
  * One measured rate constant at one temperature.
@@ -15,6 +16,7 @@ import java.util.OptionalInt;
  * @param label the run's own name; empty when it has none
  * @param excluded reason why a person excluded it; absent when it is used
  * @param asRead what stood in the source
+ * @param conditions what else it was measured at; none for most tables
  */
 public record RatePoint(
         double kelvin,
@@ -23,7 +25,8 @@ public record RatePoint(
         OptionalDouble rateUncertainty,
         String label,
         Optional<String> excluded,
-        AsRead asRead) {
+        AsRead asRead,
+        Conditions conditions) {
     /**
      * What stood in the source, so that the reading can be checked.
      *
@@ -71,6 +74,19 @@ public record RatePoint(
         Objects.requireNonNull(label, "label");
         Objects.requireNonNull(excluded, "excluded");
         Objects.requireNonNull(asRead, "asRead");
+        Objects.requireNonNull(conditions, "conditions");
+    }
+
+    /** A point of which no condition but the temperature is stated. */
+    public RatePoint(
+            double kelvin,
+            double rate,
+            OptionalDouble kelvinUncertainty,
+            OptionalDouble rateUncertainty,
+            String label,
+            Optional<String> excluded,
+            AsRead asRead) {
+        this(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, Conditions.NONE);
     }
 
     /** A used point without uncertainties. */
@@ -81,17 +97,25 @@ public record RatePoint(
 
     /** The same with a stated standard uncertainty of the rate constant, SI. */
     public RatePoint withRateUncertainty(double uncertainty) {
-        return new RatePoint(kelvin, rate, kelvinUncertainty, OptionalDouble.of(uncertainty), label, excluded, asRead);
+        return new RatePoint(
+                kelvin, rate, kelvinUncertainty, OptionalDouble.of(uncertainty), label, excluded, asRead, conditions);
+    }
+
+    /** The same, measured under these conditions. */
+    public RatePoint withConditions(Conditions stated) {
+        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, stated);
     }
 
     /** The same, excluded for this reason. */
     public RatePoint exclude(String reason) {
-        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.of(reason), asRead);
+        return new RatePoint(
+                kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.of(reason), asRead, conditions);
     }
 
     /** The same, used again. */
     public RatePoint include() {
-        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.empty(), asRead);
+        return new RatePoint(
+                kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.empty(), asRead, conditions);
     }
 
     private static void positive(String what, double value) {

@@ -2,6 +2,7 @@ package org.saddlebook.api.campaign;
 
 import java.util.List;
 import java.util.Objects;
+import org.saddlebook.api.model.Conditions;
 import org.saddlebook.api.quantity.Dimension;
 import org.saddlebook.api.quantity.Unit;
 
@@ -28,6 +29,25 @@ public record RateTable(Unit rateUnit, double order, List<RatePoint> points) {
     /** The points that are used. */
     public List<RatePoint> used() {
         return points.stream().filter(point -> point.excluded().isEmpty()).toList();
+    }
+
+    /** Whether every used point states a condition, or one it follows from, and it is not the same at all of them. */
+    public boolean varies(String condition) {
+        double lowest = Double.POSITIVE_INFINITY;
+        double highest = 0;
+        for (RatePoint point : points) {
+            if (point.excluded().isEmpty()) {
+                if (!point.conditions().has(condition)) {
+                    return false;
+                }
+                double value = condition.equals(Conditions.THIRD_BODY)
+                        ? point.conditions().thirdBody(point.kelvin()).orElseThrow()
+                        : point.conditions().get(condition).orElseThrow();
+                lowest = Math.min(lowest, value);
+                highest = Math.max(highest, value);
+            }
+        }
+        return highest > lowest;
     }
 
     /** The same with other points. */

@@ -122,14 +122,42 @@ public final class HeldParameters implements RateFunction {
     }
 
     @Override
+    public double lnRate(double kelvin, Conditions at, double[] p, double[] gradient) {
+        double[] whole = new double[template.length];
+        double value = law.lnRate(kelvin, at, expand(p), whole);
+        reduce(whole, gradient);
+        return value;
+    }
+
+    @Override
     public boolean defined(double kelvin, double[] p) {
         return law.defined(kelvin, expand(p));
     }
 
     @Override
     public List<double[]> starts(double[] kelvin, double[] lnRate) {
+        return kept(law.starts(kelvin, lnRate));
+    }
+
+    @Override
+    public List<double[]> starts(double[] kelvin, List<Conditions> at, double[] lnRate) {
+        return kept(law.starts(kelvin, at, lnRate));
+    }
+
+    @Override
+    public double[] ordered(double[] p) {
+        // With one of them held, the parameters can no longer change places.
+        return p;
+    }
+
+    @Override
+    public List<String> remarks(double[] p) {
+        return law.remarks(expand(p));
+    }
+
+    private List<double[]> kept(List<double[]> starts) {
         List<double[]> kept = new ArrayList<>();
-        for (double[] start : law.starts(kelvin, lnRate)) {
+        for (double[] start : starts) {
             double[] rest = new double[free.length];
             reduce(start, rest);
             kept.add(rest);

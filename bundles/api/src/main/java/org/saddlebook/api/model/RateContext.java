@@ -3,6 +3,7 @@ package org.saddlebook.api.model;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Objects;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
 import org.saddlebook.api.quantity.Constants;
@@ -16,6 +17,9 @@ public final class RateContext {
     private final double transmission;
     private final double referenceKelvin;
     private final Map<String, Double> fixed;
+    private final Conditions conditions;
+    private final Optional<Tunnelling> tunnelling;
+    private final Optional<Transmission> transmissionLaw;
 
     private RateContext(
             Unit rateUnit,
@@ -23,7 +27,10 @@ public final class RateContext {
             StandardState standard,
             double transmission,
             double referenceKelvin,
-            Map<String, Double> fixed) {
+            Map<String, Double> fixed,
+            Conditions conditions,
+            Optional<Tunnelling> tunnelling,
+            Optional<Transmission> transmissionLaw) {
         this.rateUnit = Objects.requireNonNull(rateUnit, "rateUnit");
         this.standard = Objects.requireNonNull(standard, "standard");
         if (!(order >= 0) || Double.isInfinite(order)) {
@@ -39,33 +46,107 @@ public final class RateContext {
         this.transmission = transmission;
         this.referenceKelvin = referenceKelvin;
         this.fixed = new TreeMap<>(fixed);
+        this.conditions = Objects.requireNonNull(conditions, "conditions");
+        this.tunnelling = Objects.requireNonNull(tunnelling, "tunnelling");
+        this.transmissionLaw = Objects.requireNonNull(transmissionLaw, "transmissionLaw");
     }
 
     /** A rate constant of this unit and overall order; 1 mol/L, transmission 1, reference 298.15 K, nothing fixed. */
     public static RateContext of(Unit rateUnit, double order) {
-        return new RateContext(rateUnit, order, StandardState.ONE_MOLAR, 1, Constants.REFERENCE_KELVIN, Map.of());
+        return new RateContext(
+                rateUnit,
+                order,
+                StandardState.ONE_MOLAR,
+                1,
+                Constants.REFERENCE_KELVIN,
+                Map.of(),
+                Conditions.NONE,
+                Optional.empty(),
+                Optional.empty());
     }
 
     /** The same with this standard state. */
     public RateContext withStandard(StandardState newStandard) {
-        return new RateContext(rateUnit, order, newStandard, transmission, referenceKelvin, fixed);
+        return new RateContext(
+                rateUnit,
+                order,
+                newStandard,
+                transmission,
+                referenceKelvin,
+                fixed,
+                conditions,
+                tunnelling,
+                transmissionLaw);
     }
 
     /** The same with this transmission coefficient. */
     public RateContext withTransmission(double newTransmission) {
-        return new RateContext(rateUnit, order, standard, newTransmission, referenceKelvin, fixed);
+        return new RateContext(
+                rateUnit,
+                order,
+                standard,
+                newTransmission,
+                referenceKelvin,
+                fixed,
+                conditions,
+                tunnelling,
+                transmissionLaw);
     }
 
     /** The same with this reference temperature, K. */
     public RateContext withReferenceKelvin(double kelvin) {
-        return new RateContext(rateUnit, order, standard, transmission, kelvin, fixed);
+        return new RateContext(
+                rateUnit, order, standard, transmission, kelvin, fixed, conditions, tunnelling, transmissionLaw);
     }
 
     /** The same with the parameter {@code symbol} held at {@code value}, in the form handed to the model. */
     public RateContext withFixed(String symbol, double value) {
         Map<String, Double> more = new LinkedHashMap<>(fixed);
         more.put(symbol, value);
-        return new RateContext(rateUnit, order, standard, transmission, referenceKelvin, more);
+        return new RateContext(
+                rateUnit,
+                order,
+                standard,
+                transmission,
+                referenceKelvin,
+                more,
+                conditions,
+                tunnelling,
+                transmissionLaw);
+    }
+
+    /** The same with the conditions at which the law is read when none are handed over with the temperature. */
+    public RateContext withConditions(Conditions stated) {
+        return new RateContext(
+                rateUnit, order, standard, transmission, referenceKelvin, fixed, stated, tunnelling, transmissionLaw);
+    }
+
+    /** The same with this statement about tunnelling; it has to be resolved before a law can be bound. */
+    public RateContext withTunnelling(Tunnelling stated) {
+        return new RateContext(
+                rateUnit,
+                order,
+                standard,
+                transmission,
+                referenceKelvin,
+                fixed,
+                conditions,
+                Optional.of(stated),
+                Optional.empty());
+    }
+
+    /** The same with a coefficient that varies with temperature, as a factor on {@link #transmission()}. */
+    public RateContext withTransmission(Transmission law) {
+        return new RateContext(
+                rateUnit,
+                order,
+                standard,
+                transmission,
+                referenceKelvin,
+                fixed,
+                conditions,
+                Optional.of(law.stated()),
+                Optional.of(law));
     }
 
     /** Unit the rate constants are stated in; its factor leads to (m3/mol)^(order-1)/s. */
@@ -83,7 +164,7 @@ public final class RateContext {
         return standard;
     }
 
-    /** Transmission coefficient; 1 unless stated. */
+    /** Transmission coefficient, the factor that does not vary with temperature; 1 unless stated. */
     public double transmission() {
         return transmission;
     }
@@ -104,6 +185,21 @@ public final class RateContext {
         return Map.copyOf(fixed);
     }
 
+    /** Conditions at which the law is read when none are handed over with the temperature; none unless stated. */
+    public Conditions conditions() {
+        return conditions;
+    }
+
+    /** What is stated about tunnelling; empty when its effect is left inside the entropy of activation. */
+    public Optional<Tunnelling> tunnelling() {
+        return tunnelling;
+    }
+
+    /** The part of the transmission coefficient that varies with temperature; empty when there is none, or it is unresolved. */
+    public Optional<Transmission> transmissionLaw() {
+        return transmissionLaw;
+    }
+
     @Override
     public boolean equals(Object other) {
         return other instanceof RateContext context
@@ -112,11 +208,14 @@ public final class RateContext {
                 && standard.equals(context.standard)
                 && transmission == context.transmission
                 && referenceKelvin == context.referenceKelvin
-                && fixed.equals(context.fixed);
+                && fixed.equals(context.fixed)
+                && conditions.equals(context.conditions)
+                && tunnelling.equals(context.tunnelling)
+                && transmissionLaw.isPresent() == context.transmissionLaw.isPresent();
     }
 
     @Override
     public int hashCode() {
-        return Objects.hash(rateUnit, order, standard, transmission, referenceKelvin, fixed);
+        return Objects.hash(rateUnit, order, standard, transmission, referenceKelvin, fixed, conditions, tunnelling);
     }
 }

@@ -25,6 +25,19 @@ public interface RateFunction {
      */
     double lnRate(double kelvin, double[] p, double[] gradient);
 
+    /**
+     * ln of the SI value of k under stated conditions. A law of temperature alone need not override it.
+     *
+     * @param kelvin temperature, K; positive
+     * @param at the conditions of this value of k
+     * @param p parameters: SI values, or natural logarithms of them for LOG parameters
+     * @param gradient receives d ln k / d p; same length as p
+     * @return ln k; NaN where the law is not defined
+     */
+    default double lnRate(double kelvin, Conditions at, double[] p, double[] gradient) {
+        return lnRate(kelvin, p, gradient);
+    }
+
     /** Whether the law has a value at this temperature with these parameters. */
     default boolean defined(double kelvin, double[] p) {
         return true;
@@ -37,6 +50,37 @@ public interface RateFunction {
      * @param lnRate ln of the SI rate constants, same length
      */
     default List<double[]> starts(double[] kelvin, double[] lnRate) {
+        return List.of();
+    }
+
+    /**
+     * Starting values for a non-linear law that depends on conditions, best first. A law of temperature alone need not
+     * override it.
+     *
+     * @param kelvin temperatures, K
+     * @param at conditions of each value, same length
+     * @param lnRate ln of the SI rate constants, same length
+     */
+    default List<double[]> starts(double[] kelvin, List<Conditions> at, double[] lnRate) {
+        return starts(kelvin, lnRate);
+    }
+
+    /**
+     * The same point of a law that is unchanged when some of its parameters change places, in the order in which the law
+     * promises them; p itself, or a copy, when it is in order.
+     *
+     * @param p parameters in the form handed to the law
+     */
+    default double[] ordered(double[] p) {
+        return p;
+    }
+
+    /**
+     * What a reader of these estimates must know about the law itself, as sentences; none for most laws.
+     *
+     * @param p estimates in the form handed to the law
+     */
+    default List<String> remarks(double[] p) {
         return List.of();
     }
 

@@ -1,5 +1,6 @@
 package org.saddlebook.api.model;
 
+import java.util.Set;
 import org.osgi.annotation.versioning.ConsumerType;
 
 /**
@@ -22,4 +23,21 @@ public interface RateModel {
      * @throws Inapplicable when the law has no meaning in this context
      */
     RateFunction bind(RateContext context) throws Inapplicable;
+
+    /**
+     * Names of the conditions that the law depends on beside the temperature, such as {@link Conditions#THIRD_BODY}. A
+     * table that does not state them makes the engine refuse the law; its function takes them through {@link
+     * RateFunction#lnRate(double, Conditions, double[], double[])}.
+     */
+    default Set<String> conditions() {
+        return Set.of();
+    }
+
+    /**
+     * Whether the law is fitted only when somebody asks for it by name. A law for special cases says so: every further law
+     * that is fitted unasked makes it more likely that one of them fits by chance, and lengthens what everyone reads.
+     */
+    default boolean onRequest() {
+        return false;
+    }
 }

@@ -18,7 +18,11 @@ import org.saddlebook.api.quantity.Unit;
  *
  * the law is {@code k = F(T) exp(ΔS/R) exp(−ΔH/(RT))}, and its tangent in {@code ln k} against 1/T at T gives
  * {@code Ea = ΔH + s R T} and {@code A(T) = e^s F(T) exp(ΔS/R)}; {@code ΔG = ΔH − T ΔS = R T ln(F(T)/k)}. These are local
- * relations: the converted parameters belong to the temperature they were converted at. κ does not vary with temperature.
+ * relations: the converted parameters belong to the temperature they were converted at.
+ *
+ * <p>κ is the factor {@link RateContext#transmission()}, times {@code κ(T)} where tunnelling is stated. With it {@code Ea =
+ * ΔH + s R T + R T² d ln κ/dT} and {@code ln A = s + T d ln κ/dT + ln F + ΔS/R}. Without a stated κ its effect is absorbed
+ * in ΔS, and that of its slope in ΔH.
  *
  * <p>Everything is in SI: m is the overall order, k and F in (m3/mol)^(m−1)/s, energies in J/mol, entropies in J/(mol K),
  * temperatures in K and positive. Symbols with a double dagger in print are written without one.
@@ -33,8 +37,11 @@ public final class TransitionState {
     private final double lnTransmission;
     private final double lnStandard;
     private final double thermalSteps;
+    /** Null where κ does not vary with temperature: this lies on the way of every value of a law. */
+    private final Transmission varying;
 
     private TransitionState(RateContext context) {
+        varying = context.transmissionLaw().orElse(null);
         standard = context.standard();
         order = context.order();
         lnTransmission = StrictMath.log(context.transmission());
@@ -55,23 +62,50 @@ public final class TransitionState {
                             + " an order below 1 belongs to no such step, so enthalpy and entropy of activation have no meaning"
                             + " for it.");
         }
+        if (context.tunnelling().isPresent() && context.transmissionLaw().isEmpty()) {
+            throw new Inapplicable("The stated tunnelling correction "
+                    + context.tunnelling().get().modelId() + " could not be applied.");
+        }
         return new TransitionState(context);
     }
 
-    /** Whether a rate constant of this context can belong to an elementary step: its order is at least 1. */
+    /**
+     * Whether a rate constant of this context can belong to an elementary step: its order is at least 1, and a stated
+     * tunnelling correction is at hand.
+     */
     public static boolean applies(RateContext context) {
-        return context.order() >= 1;
+        return context.order() >= 1
+                && (context.tunnelling().isEmpty() || context.transmissionLaw().isPresent());
     }
 
-    /** ln F(T): the logarithm of the frequency factor in SI; its derivative with respect to T is s/T. */
+    /** Whether κ has a value at this temperature, K; it always has where it does not vary. */
+    public boolean defined(double kelvin) {
+        return varying == null || varying.defined(kelvin);
+    }
+
+    /** κ at a temperature, K; NaN where it has no value. */
+    public double transmission(double kelvin) {
+        return StrictMath.exp(lnTransmission(kelvin));
+    }
+
+    private double lnTransmission(double kelvin) {
+        return varying == null ? lnTransmission : lnTransmission + varying.lnCoefficient(kelvin);
+    }
+
+    /** T d ln F/dT: s, and with a varying κ its slope. */
+    private double steps(double kelvin) {
+        return varying == null ? thermalSteps : thermalSteps + kelvin * varying.slope(kelvin);
+    }
+
+    /** ln F(T): the logarithm of the frequency factor in SI; its derivative is s/T, and that of ln κ where κ varies. */
     public double lnFrequency(double kelvin) {
-        double lnThermal = lnTransmission + Constants.LN_BOLTZMANN_OVER_PLANCK + StrictMath.log(kelvin);
+        double lnThermal = lnTransmission(kelvin) + Constants.LN_BOLTZMANN_OVER_PLANCK + StrictMath.log(kelvin);
         return standard.kind() == StandardState.Kind.PRESSURE
                 ? lnThermal + (order - 1) * (StrictMath.log(Constants.GAS * kelvin) - lnStandard)
                 : lnThermal + (1 - order) * lnStandard;
     }
 
-    /** s: how many times RT the activation energy lies above the enthalpy of activation. */
+    /** s: how many times RT the activation energy lies above the enthalpy of activation, tunnelling apart. */
     public double thermalSteps() {
         return thermalSteps;
     }
@@ -86,24 +120,24 @@ public final class TransitionState {
         return Constants.GAS * kelvin * (lnFrequency(kelvin) - lnRate);
     }
 
-    /** ΔH from the activation energy at T: {@code Ea − s R T}; d/dEa = 1. */
+    /** ΔH from the activation energy at T: {@code Ea − s R T − R T² d ln κ/dT}; d/dEa = 1. */
     public double enthalpy(double kelvin, double activationEnergy) {
-        return activationEnergy - thermalSteps * Constants.GAS * kelvin;
+        return activationEnergy - steps(kelvin) * Constants.GAS * kelvin;
     }
 
-    /** ΔS from ln A at T: {@code R (ln A − ln F(T) − s)}; d/d ln A = R. */
+    /** ΔS from ln A at T: {@code R (ln A − ln F(T) − s − T d ln κ/dT)}; d/d ln A = R. */
     public double entropy(double kelvin, double lnPreExponential) {
-        return Constants.GAS * (lnPreExponential - lnFrequency(kelvin) - thermalSteps);
+        return Constants.GAS * (lnPreExponential - lnFrequency(kelvin) - steps(kelvin));
     }
 
-    /** The activation energy at T from ΔH: {@code ΔH + s R T}; d/dΔH = 1. */
+    /** The activation energy at T from ΔH: {@code ΔH + s R T + R T² d ln κ/dT}; d/dΔH = 1. */
     public double activationEnergy(double kelvin, double enthalpy) {
-        return enthalpy + thermalSteps * Constants.GAS * kelvin;
+        return enthalpy + steps(kelvin) * Constants.GAS * kelvin;
     }
 
-    /** ln A at T from ΔS: {@code s + ln F(T) + ΔS/R}; d/dΔS = 1/R. */
+    /** ln A at T from ΔS: {@code s + T d ln κ/dT + ln F(T) + ΔS/R}; d/dΔS = 1/R. */
     public double lnPreExponential(double kelvin, double entropy) {
-        return thermalSteps + lnFrequency(kelvin) + entropy / Constants.GAS;
+        return steps(kelvin) + lnFrequency(kelvin) + entropy / Constants.GAS;
     }
 
     /**

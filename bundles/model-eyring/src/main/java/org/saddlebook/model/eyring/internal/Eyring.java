@@ -98,6 +98,11 @@ public final class Eyring implements RateModel {
         }
 
         @Override
+        public boolean defined(double kelvin, double[] p) {
+            return state.defined(kelvin);
+        }
+
+        @Override
         public List<Derived> derived() {
             return derived;
         }

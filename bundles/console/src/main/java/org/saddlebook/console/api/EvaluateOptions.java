@@ -2,7 +2,9 @@ package org.saddlebook.console.api;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.campaign.Choices;
 import org.saddlebook.api.campaign.ErrorModel;
@@ -10,6 +12,7 @@ import org.saddlebook.api.model.StandardState;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.api.problem.Place;
 import org.saddlebook.api.problem.Problem;
+import org.saddlebook.api.reader.ReadingRule;
 import org.saddlebook.units.api.UnitException;
 import org.saddlebook.units.api.Units;
 
@@ -20,7 +23,8 @@ import org.saddlebook.units.api.Units;
 public final class EvaluateOptions {
     /** The options, for the synopsis of a verb. */
     public static final String SYNOPSIS = "[--at T]... [--model ID]... [--standard STATE] [--seed N]"
-            + " [--errors constant-relative|stated|constant-absolute] [--level P]";
+            + " [--errors constant-relative|stated|constant-absolute] [--level P]"
+            + " [--read KEY=VALUE]...";
 
     /** What each means, for the help of a verb; lines of plain text. */
     public static final String HELP = """
@@ -31,10 +35,12 @@ public final class EvaluateOptions {
             --errors MODEL    constant-relative: one relative error, estimated from the scatter
                               stated: the uncertainties in the table
                               constant-absolute: one error of k itself, estimated from the scatter
-            --level P         coverage probability of intervals, above 0.5 and below 1""";
+            --level P         coverage probability of intervals, above 0.5 and below 1
+            --read KEY=VALUE  settle how a table is read, such as decimal=comma, unit.T=degC or sheet=Rates;
+                              may be repeated""";
 
     private static final List<String> VALUED =
-            List.of("--at", "--model", "--standard", "--seed", "--errors", "--level");
+            List.of("--at", "--model", "--standard", "--seed", "--errors", "--level", "--read");
 
     private final Options options;
     private final List<Double> targetsKelvin;
@@ -43,6 +49,7 @@ public final class EvaluateOptions {
     private final Optional<Long> seed;
     private final Optional<ErrorModel> errors;
     private final Optional<Double> level;
+    private final ReadingRule readingRule;
 
     private EvaluateOptions(Options options) throws InputException {
         this.options = options;
@@ -63,6 +70,7 @@ public final class EvaluateOptions {
         seed = seed(options.value("--seed"));
         errors = errors(options.value("--errors"));
         level = level(options.value("--level"));
+        readingRule = readingRule(options.values("--read"));
     }
 
     /** Options of evaluation alone. */
@@ -94,6 +102,11 @@ public final class EvaluateOptions {
         return models;
     }
 
+    /** How a table is to be read, where the reader is not to find out by itself. */
+    public ReadingRule readingRule() {
+        return readingRule;
+    }
+
     /** The campaign with what was given put in place. */
     public Campaign foldInto(Campaign campaign) {
         Choices choices = campaign.choices();
@@ -116,6 +129,21 @@ public final class EvaluateOptions {
             choices = choices.withLevel(level.get());
         }
         return choices.equals(campaign.choices()) ? campaign : campaign.withChoices(choices);
+    }
+
+    private static ReadingRule readingRule(List<String> texts) throws InputException {
+        if (texts.isEmpty()) {
+            return ReadingRule.AUTOMATIC;
+        }
+        Map<String, String> rule = new TreeMap<>();
+        for (String text : texts) {
+            int sign = text.indexOf('=');
+            if (sign <= 0 || sign == text.length() - 1) {
+                throw wrong("--read", text, "a key and a value, such as decimal=comma");
+            }
+            rule.put(text.substring(0, sign).strip(), text.substring(sign + 1).strip());
+        }
+        return new ReadingRule(rule);
     }
 
     private static Optional<StandardState> standard(Optional<String> text) throws InputException {

@@ -11,7 +11,6 @@ import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.findings.Findings;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.api.problem.Problem;
-import org.saddlebook.api.reader.ReadingRule;
 import org.saddlebook.api.service.CampaignFormat;
 import org.saddlebook.api.service.Evaluation;
 import org.saddlebook.api.service.Intake;
@@ -70,7 +69,7 @@ public final class EvaluateVerb implements Verb {
         Intake intake = services.need(Intake.class, "base");
         Evaluation evaluation = services.need(Evaluation.class, "base");
         CampaignFormat format = services.need(CampaignFormat.class, "base");
-        Intake.Opened opened = intake.open(input, ReadingRule.AUTOMATIC, invocation.user(), invocation.progress());
+        Intake.Opened opened = intake.open(input, options.readingRule(), invocation.user(), invocation.progress());
         Campaign effective;
         try {
             effective = evaluation.effective(options.foldInto(opened.campaign()));

@@ -8,7 +8,6 @@ import org.osgi.framework.BundleContext;
 import org.osgi.service.component.annotations.Activate;
 import org.osgi.service.component.annotations.Component;
 import org.saddlebook.api.problem.InputException;
-import org.saddlebook.api.reader.ReadingRule;
 import org.saddlebook.api.service.CampaignFormat;
 import org.saddlebook.api.service.Intake;
 import org.saddlebook.api.task.Cancelled;
@@ -62,7 +61,7 @@ public final class ImportVerb implements Verb {
         }
         OutputFolder folder = OutputFolder.at(Paths.resolve(invocation, out.get(), "--out"));
         Intake.Opened opened = services.need(Intake.class, "base")
-                .open(input, ReadingRule.AUTOMATIC, invocation.user(), invocation.progress());
+                .open(input, options.readingRule(), invocation.user(), invocation.progress());
         CampaignFormat format = services.need(CampaignFormat.class, "base");
         OutputFolder.Content content = new OutputFolder.Content();
         content.add("campaign.json", format.campaign(options.foldInto(opened.campaign())));

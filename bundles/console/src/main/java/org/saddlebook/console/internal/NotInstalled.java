@@ -9,6 +9,7 @@ final class NotInstalled {
     /** Features of the product beside the base, as the distribution ships them. */
     private static final List<String> FEATURES = List.of(
             "reader-text",
+            "reader-sheet",
             "model-arrhenius",
             "model-eyring",
             "model-modified-arrhenius",

@@ -67,7 +67,7 @@ final class TableImport {
                     name,
                     "a table, and no reader is installed",
                     "a reader for this kind of file",
-                    "Install the feature with the reader: reader-text reads delimited text.");
+                    "Install the feature with the reader: reader-text reads delimited text, reader-sheet spreadsheets.");
         }
         SourceHead head =
                 new SourceHead(fileName, bytes.length <= HEAD ? bytes : Arrays.copyOf(bytes, HEAD), bytes.length);

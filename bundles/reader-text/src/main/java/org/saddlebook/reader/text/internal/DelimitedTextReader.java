@@ -16,7 +16,7 @@ import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Task;
 
 /** Rate tables in delimited text. Stateless. */
-@Component
+@Component(property = "saddlebook.reader=delimited-text")
 public final class DelimitedTextReader implements DataReader {
     private static final String[] EXTENSIONS = {".csv", ".tsv", ".txt", ".dat", ".tab"};
 

@@ -13,7 +13,6 @@ import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.findings.Findings;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.problem.InputException;
-import org.saddlebook.api.reader.ReadingRule;
 import org.saddlebook.api.service.CampaignFormat;
 import org.saddlebook.api.service.Evaluation;
 import org.saddlebook.api.service.Intake;
@@ -88,7 +87,7 @@ public final class EnterVerb implements Verb {
         long target = supersedes.isPresent() ? Locations.number(supersedes.get()) : 0;
 
         Intake.Opened opened =
-                services.need(Intake.class, "base").open(input, ReadingRule.AUTOMATIC, actor, invocation.progress());
+                services.need(Intake.class, "base").open(input, evaluate.readingRule(), actor, invocation.progress());
         Evaluation evaluation = services.need(Evaluation.class, "base");
         Campaign effective;
         try {

@@ -70,7 +70,7 @@ public final class SheetReader implements DataReader {
         Map<String, String> options = new TreeMap<>(rule.options());
         options.remove(SHEET);
         options.put("separator", "tab");
-        options.put("encoding", "utf-8");
+        options.remove("encoding");
         byte[] text = grid.text().getBytes(StandardCharsets.UTF_8);
         Imported imported = rows.read(new Source(source.name(), text), new ReadingRule(options), task);
         return new Imported(imported.rateTable(), imported.directives(), understood(grid, imported.understood()));

@@ -74,7 +74,10 @@ class SheetReaderTest extends DataReaderContract {
             assertEquals(expected, imported.rateTable().orElseThrow().points(), source.name());
             assertEquals("sheet “Rates” read", imported.understood().get(0));
             for (String sentence : imported.understood()) {
-                assertFalse(sentence.contains("tab") || sentence.toLowerCase(java.util.Locale.ROOT).contains("utf"), sentence);
+                assertFalse(
+                        sentence.contains("tab")
+                                || sentence.toLowerCase(java.util.Locale.ROOT).contains("utf"),
+                        sentence);
             }
         }
     }

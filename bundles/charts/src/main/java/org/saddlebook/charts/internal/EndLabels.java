@@ -3,6 +3,7 @@ package org.saddlebook.charts.internal;
 import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.geom.Line2D;
+import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -20,13 +21,15 @@ final class EndLabels {
         private final List<String> lines;
         private final double endX;
         private final double endY;
+        private final double before;
         private final Color ink;
         private double top;
 
-        Label(List<String> lines, double endX, double endY, Color ink) {
+        Label(List<String> lines, double endX, double endY, double before, Color ink) {
             this.lines = lines;
             this.endX = endX;
             this.endY = endY;
+            this.before = before;
             this.ink = ink;
             this.top = endY - height() / 2;
         }
@@ -38,9 +41,14 @@ final class EndLabels {
 
     private final List<Label> labels = new ArrayList<>();
 
-    void add(String text, double endX, double endY, Color ink) {
+    /**
+     * Adds a name.
+     *
+     * @param before vertical coordinate of the line some way to the left of its end
+     */
+    void add(String text, double endX, double endY, double before, Color ink) {
         if (!text.isEmpty()) {
-            labels.add(new Label(Lettering.wrap(text, SIZE, WIDEST), endX, endY, ink));
+            labels.add(new Label(Lettering.wrap(text, SIZE, WIDEST), endX, endY, before, ink));
         }
     }
 
@@ -55,7 +63,7 @@ final class EndLabels {
         return most == 0 ? 0 : GAP + most;
     }
 
-    void draw(Graphics2D g, double right, double top, double bottom) {
+    void draw(Graphics2D g, Palette palette, double right, double top, double bottom) {
         labels.sort(Comparator.comparingDouble((Label label) -> label.endY));
         spread(top, bottom);
         for (Label label : labels) {
@@ -66,7 +74,38 @@ final class EndLabels {
             g.draw(new Line2D.Double(right + 5, label.endY, right + GAP - 4, middle));
             double y = label.top + LINE_HEIGHT - 3;
             for (String line : label.lines) {
-                Lettering.draw(g, line, right + GAP, y, Lettering.Anchor.START, SIZE, false, Palette.INK);
+                Lettering.draw(g, line, right + GAP, y, Lettering.Anchor.START, SIZE, false, palette.ink());
+                y += LINE_HEIGHT;
+            }
+        }
+    }
+
+    /**
+     * Names within the drawing area, for a figure without room beside it: ending left of the line's end, above a line that
+     * rises to it and below one that falls, each on a patch of paper with a leader to its line.
+     */
+    void drawInside(Graphics2D g, Palette palette, Rectangle2D area) {
+        for (Label label : labels) {
+            boolean above = label.before >= label.endY;
+            label.top = above ? label.endY - label.height() - 8 : label.endY + 8;
+        }
+        labels.sort(Comparator.comparingDouble((Label label) -> label.top));
+        spread(area.getMinY() + 2, area.getMaxY() - 2);
+        for (Label label : labels) {
+            double right = Math.min(label.endX, area.getMaxX()) - 14;
+            double wide = 0;
+            for (String line : label.lines) {
+                wide = Math.max(wide, Lettering.width(line, SIZE, false));
+            }
+            g.setPaint(palette.paper());
+            g.fill(new Rectangle2D.Double(right - wide - 2, label.top, wide + 4, label.height()));
+            g.setPaint(label.ink);
+            g.setStroke(Palette.HAIR);
+            double middle = label.top + label.height() / 2;
+            g.draw(new Line2D.Double(right + 3, middle, label.endX - 2, label.endY));
+            double y = label.top + LINE_HEIGHT - 3;
+            for (String line : label.lines) {
+                Lettering.draw(g, line, right, y, Lettering.Anchor.END, SIZE, false, palette.ink());
                 y += LINE_HEIGHT;
             }
         }

@@ -19,6 +19,8 @@ final class Key {
             Layer.Kind.CONFIDENCE_BAND, "interval of the mean",
             Layer.Kind.NEW_RUN_BAND, "interval of a new run"));
 
+    private static final double GAP = 18;
+
     private record Entry(Layer.Kind kind, String word) {}
 
     private final List<Entry> entries;
@@ -57,33 +59,67 @@ final class Key {
         return entries.isEmpty();
     }
 
-    void draw(Graphics2D g, double left, double baseline, int size) {
-        double x = left;
-        double y = baseline - 4;
+    /** How many lines the key takes in this room. */
+    int rows(double room, int size) {
+        double x = 0;
+        int rows = entries.isEmpty() ? 0 : 1;
         for (Entry entry : entries) {
-            double wide = 16;
+            double wide = wide(entry, size);
+            if (x > 0 && x + wide > room) {
+                rows++;
+                x = 0;
+            }
+            x += wide + GAP;
+        }
+        return rows;
+    }
+
+    private static double mark(Entry entry) {
+        return switch (entry.kind()) {
+            case CONFIDENCE_BAND, NEW_RUN_BAND -> 24;
+            case MEASURED, EXCLUDED, PREDICTED -> 16;
+            case LINE, VERTICAL_MARK, HORIZONTAL_MARK, WALL, FLOOR, SPINDLE, STRIP_MARK, RUG -> 0;
+        };
+    }
+
+    private static double wide(Entry entry, int size) {
+        return mark(entry) + 5 + Lettering.width(entry.word(), size, false);
+    }
+
+    /** Draws the key, its first line on the baseline. */
+    void draw(Graphics2D g, Palette palette, double left, double baseline, double room, int size) {
+        double x = left;
+        double base = baseline;
+        for (Entry entry : entries) {
+            double wide = wide(entry, size);
+            if (x > left && x + wide > left + room) {
+                x = left;
+                base += 16;
+            }
+            double y = base - 4;
             switch (entry.kind()) {
-                case MEASURED -> Marks.measured(g, x + 6, y, y + 8, y - 8);
-                case EXCLUDED -> Marks.excluded(g, x + 8, y, y, y);
-                case PREDICTED -> Marks.predicted(g, x + 8, y, y, y, Palette.INK);
+                case MEASURED -> Marks.measured(g, palette, x + 6, y, y + 8, y - 8);
+                case EXCLUDED -> Marks.excluded(g, palette, x + 8, y, y, y);
+                case PREDICTED -> Marks.predicted(g, palette, x + 8, y, y, y);
                 case CONFIDENCE_BAND -> {
-                    wide = 24;
-                    g.setPaint(Palette.INK);
+                    g.setPaint(palette.ink());
                     g.setStroke(Palette.HAIR);
                     g.draw(Hatch.of(
-                            new double[] {x, x + wide, x + wide, x}, new double[] {y - 5, y - 5, y + 5, y + 5}, -1, 5));
+                            new double[] {x, x + 24, x + 24, x}, new double[] {y - 5, y - 5, y + 5, y + 5}, -1, 5));
                 }
                 case NEW_RUN_BAND -> {
-                    wide = 24;
-                    g.setPaint(Palette.INK);
+                    g.setPaint(palette.ink());
                     g.setStroke(Palette.OUTLINE);
-                    g.draw(new Line2D.Double(x, y - 4.5, x + wide, y - 4.5));
-                    g.draw(new Line2D.Double(x, y + 4.5, x + wide, y + 4.5));
+                    g.draw(new Line2D.Double(x, y - 4.5, x + 24, y - 4.5));
+                    g.draw(new Line2D.Double(x, y + 4.5, x + 24, y + 4.5));
                 }
-                case LINE, VERTICAL_MARK, HORIZONTAL_MARK, WALL, FLOOR, SPINDLE, STRIP_MARK, RUG -> wide = 0;
+                case LINE, VERTICAL_MARK, HORIZONTAL_MARK, WALL, FLOOR, SPINDLE, STRIP_MARK, RUG -> {
+                    // Named where it stands.
+                }
             }
-            Lettering.draw(g, entry.word(), x + wide + 5, baseline, Lettering.Anchor.START, size, false, Palette.INK);
-            x += wide + 5 + Lettering.width(entry.word(), size, false) + 18;
+            double text = x + mark(entry) + 5;
+            Lettering.draw(g, entry.word(), text, base, Lettering.Anchor.START, size, false, palette.ink());
+            x += wide + GAP;
         }
     }
 }

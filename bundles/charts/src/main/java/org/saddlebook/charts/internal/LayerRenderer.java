@@ -26,18 +26,23 @@ final class LayerRenderer extends AbstractXYItemRenderer {
     private final Color ink;
     private final transient BasicStroke pattern;
     private final int band;
+    private final transient Palette palette;
+    private final boolean part;
 
     /**
      * A renderer.
      *
      * @param order of a line among the lines, of a band the order of its line: decides ink and pattern
      * @param band order of a band among the bands: decides the direction of its hatch
+     * @param part whether only a part of the axes is shown, so that layers can reach beyond it
      */
-    LayerRenderer(Layer layer, int order, int band) {
+    LayerRenderer(Layer layer, int order, int band, Palette palette, boolean part) {
         this.layer = layer;
-        this.ink = Palette.line(order);
+        this.ink = palette.line(order);
         this.pattern = Palette.pattern(order);
         this.band = band;
+        this.palette = palette;
+        this.part = part;
     }
 
     @Override
@@ -78,54 +83,67 @@ final class LayerRenderer extends AbstractXYItemRenderer {
         switch (layer.kind()) {
             case MEASURED -> {
                 for (int i = 0; i < x.length; i++) {
-                    Marks.measured(g, x[i], y[i], low[i], high[i]);
+                    if (hidden(x[i], layer.y()[i], yAxis, area)) {
+                        continue;
+                    }
+                    Marks.measured(g, palette, x[i], y[i], low[i], high[i]);
                 }
             }
             case EXCLUDED -> {
                 for (int i = 0; i < x.length; i++) {
-                    Marks.excluded(g, x[i], y[i], low[i], high[i]);
+                    if (hidden(x[i], layer.y()[i], yAxis, area)) {
+                        continue;
+                    }
+                    Marks.excluded(g, palette, x[i], y[i], low[i], high[i]);
                 }
             }
             case PREDICTED -> {
                 for (int i = 0; i < x.length; i++) {
-                    Marks.predicted(g, x[i], y[i], low[i], high[i], Palette.INK);
+                    if (hidden(x[i], layer.y()[i], yAxis, area)) {
+                        continue;
+                    }
+                    Marks.predicted(g, palette, x[i], y[i], low[i], high[i]);
                 }
             }
             case LINE -> {
                 g.setPaint(ink);
                 g.setStroke(pattern);
-                g.draw(path(x, y));
+                g.draw(part ? Cut.lines(path(x, free(yAxis, area)), area) : path(x, y));
             }
             case CONFIDENCE_BAND -> {
                 g.setPaint(ink);
                 g.setStroke(Palette.HAIR);
-                g.draw(hatch(x, low, high));
+                g.draw(part ? Cut.lines(hatch(x, low, high), area) : hatch(x, low, high));
             }
             case NEW_RUN_BAND -> {
                 g.setPaint(ink);
                 g.setStroke(Palette.OUTLINE);
-                g.draw(path(x, low));
-                g.draw(path(x, high));
+                g.draw(part ? Cut.lines(path(x, low), area) : path(x, low));
+                g.draw(part ? Cut.lines(path(x, high), area) : path(x, high));
             }
             case VERTICAL_MARK -> {
-                g.setPaint(Palette.INK);
+                g.setPaint(palette.ink());
                 g.setStroke(Palette.FINE);
                 for (double at : x) {
-                    g.draw(new Line2D.Double(at, area.getMinY(), at, area.getMaxY()));
+                    if (at >= area.getMinX() - 1 && at <= area.getMaxX() + 1) {
+                        g.draw(new Line2D.Double(at, area.getMinY(), at, area.getMaxY()));
+                    }
                 }
             }
             case HORIZONTAL_MARK -> {
-                g.setPaint(Palette.INK);
+                g.setPaint(palette.ink());
                 g.setStroke(Palette.FINE);
                 for (double at : y) {
                     g.draw(new Line2D.Double(area.getMinX(), at, area.getMaxX(), at));
                 }
             }
             case WALL -> {
-                g.setPaint(Palette.INK);
+                g.setPaint(palette.ink());
                 g.setStroke(Palette.WALL);
                 for (double at : x) {
-                    g.draw(new Line2D.Double(at, area.getMinY(), at, area.getMaxY()));
+                    if (at >= area.getMinX() - 1 && at <= area.getMaxX() + 1) {
+                        g.draw(new Line2D.Double(at, area.getMinY(), at, area.getMaxY()));
+                    }
                 }
             }
             case FLOOR -> floor(g, x, y, area);
@@ -144,17 +162,41 @@ final class LayerRenderer extends AbstractXYItemRenderer {
         return Math.max(at, area.getMinY());
     }
 
-    private static void floor(Graphics2D g, double[] x, double[] y, Rectangle2D area) {
-        if (x.length == 0) {
+    /** Whether a point lies outside the part that is shown; otherwise it stands on the edge, never out of sight. */
+    private boolean hidden(double px, double y, ValueAxis axis, Rectangle2D area) {
+        double py = axis.valueToJava2D(y, area, RectangleEdge.LEFT);
+        return part
+                && !(px >= area.getMinX() - 1
+                        && px <= area.getMaxX() + 1
+                        && py >= area.getMinY() - 1
+                        && py <= area.getMaxY() + 1);
+    }
+
+    /** Vertical coordinates of the line, also beyond the drawing area, but not so far that drawing loses its digits. */
+    private double[] free(ValueAxis axis, Rectangle2D area) {
+        double[] y = layer.y();
+        for (int i = 0; i < y.length; i++) {
+            double at = axis.valueToJava2D(y[i], area, RectangleEdge.LEFT);
+            y[i] = at >= -1e6 ? Math.min(at, 1e6) : at < -1e6 ? -1e6 : 1e6;
+        }
+        return y;
+    }
+
+    private void floor(Graphics2D g, double[] wholeX, double[] y, Rectangle2D area) {
+        if (wholeX.length == 0) {
             return;
+        }
+        double[] x = wholeX.clone();
+        for (int i = 0; i < x.length; i++) {
+            x[i] = Math.max(area.getMinX(), Math.min(x[i], area.getMaxX()));
         }
         Path2D region = path(x, y);
         region.lineTo(x[x.length - 1], area.getMaxY());
         region.lineTo(x[0], area.getMaxY());
         region.closePath();
-        g.setPaint(Palette.RAIL);
+        g.setPaint(palette.rail());
         g.fill(region);
-        g.setPaint(Palette.INK);
+        g.setPaint(palette.ink());
         g.setStroke(Palette.FINE);
         g.draw(path(x, y));
     }

@@ -26,13 +26,23 @@ final class MarkNames {
 
     private MarkNames() {}
 
-    static List<Name> of(List<Layer> layers, DoubleUnaryOperator horizontal, double right) {
+    /**
+     * Names of the marks in view.
+     *
+     * @param first left edge of the drawing area, px
+     * @param last right edge of the drawing area, px
+     * @param right where text must end, px
+     */
+    static List<Name> of(List<Layer> layers, DoubleUnaryOperator horizontal, double first, double last, double right) {
         List<Wanted> wanted = new ArrayList<>();
         for (Layer layer : layers) {
             boolean vertical = layer.kind() == Layer.Kind.VERTICAL_MARK || layer.kind() == Layer.Kind.WALL;
             if (vertical && !layer.label().isEmpty()) {
                 for (double value : layer.x()) {
-                    wanted.add(new Wanted(layer.label(), horizontal.applyAsDouble(value)));
+                    double stem = horizontal.applyAsDouble(value);
+                    if (stem >= first - 1 && stem <= last + 1) {
+                        wanted.add(new Wanted(layer.label(), stem));
+                    }
                 }
             }
         }

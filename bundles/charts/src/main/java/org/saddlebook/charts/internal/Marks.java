@@ -1,6 +1,5 @@
 package org.saddlebook.charts.internal;
 
-import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
@@ -14,40 +13,40 @@ final class Marks {
     private Marks() {}
 
     /** A measured point: a filled hourglass on its whisker. */
-    static void measured(Graphics2D g, double x, double y, double low, double high) {
-        whisker(g, x, low, high);
-        g.setPaint(Palette.INK);
+    static void measured(Graphics2D g, Palette palette, double x, double y, double low, double high) {
+        whisker(g, palette, x, low, high);
+        g.setPaint(palette.ink());
         g.fill(hourglass(x, y));
     }
 
     /** A point that a person excluded: a hollow hourglass with a slash. */
-    static void excluded(Graphics2D g, double x, double y, double low, double high) {
-        whisker(g, x, low, high);
-        g.setPaint(Palette.PAPER);
+    static void excluded(Graphics2D g, Palette palette, double x, double y, double low, double high) {
+        whisker(g, palette, x, low, high);
+        g.setPaint(palette.paper());
         g.fill(hourglass(x, y));
-        g.setPaint(Palette.INK);
+        g.setPaint(palette.ink());
         g.setStroke(Palette.FINE);
         g.draw(hourglass(x, y));
         g.draw(new Line2D.Double(x - WIDE - 3, y + HIGH - 1, x + WIDE + 3, y - HIGH + 1));
     }
 
     /** A prediction: an open flat bar; its whisker ends in feet. */
-    static void predicted(Graphics2D g, double x, double y, double low, double high, Color ink) {
-        whisker(g, x, low, high);
+    static void predicted(Graphics2D g, Palette palette, double x, double y, double low, double high) {
+        whisker(g, palette, x, low, high);
         if (low > high) {
             g.draw(new Line2D.Double(x - 3, low, x + 3, low));
             g.draw(new Line2D.Double(x - 3, high, x + 3, high));
         }
         Rectangle2D bar = new Rectangle2D.Double(x - 7.5, y - 2.5, 15, 5);
-        g.setPaint(Palette.PAPER);
+        g.setPaint(palette.paper());
         g.fill(bar);
-        g.setPaint(ink);
+        g.setPaint(palette.ink());
         g.setStroke(Palette.FIRM);
         g.draw(bar);
     }
 
-    private static void whisker(Graphics2D g, double x, double low, double high) {
-        g.setPaint(Palette.INK);
+    private static void whisker(Graphics2D g, Palette palette, double x, double low, double high) {
+        g.setPaint(palette.ink());
         g.setStroke(Palette.FINE);
         if (low > high) {
             g.draw(new Line2D.Double(x, low, x, high));

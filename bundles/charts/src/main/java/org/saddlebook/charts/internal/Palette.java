@@ -6,15 +6,11 @@ import java.util.List;
 
 /** Inks, fills and line patterns. Everything is told apart by shape or pattern; colour only helps. */
 final class Palette {
-    static final Color INK = new Color(0x1F2A30);
-    static final Color PLUM = new Color(0x6B2D5C);
-    static final Color PETROL = new Color(0x1F7A80);
-    static final Color OCHRE = new Color(0xC98A1B);
-    static final Color LICHEN = new Color(0xC9CFA8);
-    static final Color RAIL = new Color(0xE8EBD9);
-    static final Color PAPER = new Color(0xFBF8F1);
+    /** For paper and the light desk. */
+    static final Palette LIGHT = new Palette(0x1F2A30, 0x6B2D5C, 0x1F7A80, 0xC98A1B, 0xC9CFA8, 0xE8EBD9, 0xFBF8F1);
 
-    private static final List<Color> LINES = List.of(PLUM, PETROL, INK, OCHRE);
+    /** For the dark desk: lifted until each ink has the contrast it has on paper. */
+    static final Palette DARK = new Palette(0xE9E4D8, 0xD08FBE, 0x5FBCC2, 0xDDA94A, 0x464E37, 0x262C25, 0x181D20);
 
     private static final List<BasicStroke> PATTERNS = List.of(
             stroke(2f),
@@ -30,10 +26,43 @@ final class Palette {
     static final BasicStroke WALL = stroke(3f);
     static final BasicStroke OUTLINE = stroke(0.9f, 3, 2.5f);
 
-    private Palette() {}
+    private final Color ink;
+    private final Color lichen;
+    private final Color rail;
+    private final Color paper;
+    private final List<Color> lines;
 
-    static Color line(int index) {
-        return LINES.get(index % LINES.size());
+    private Palette(int ink, int plum, int petrol, int ochre, int lichen, int rail, int paper) {
+        this.ink = new Color(ink);
+        this.lichen = new Color(lichen);
+        this.rail = new Color(rail);
+        this.paper = new Color(paper);
+        this.lines = List.of(new Color(plum), new Color(petrol), this.ink, new Color(ochre));
+    }
+
+    /** Text, axes, measured points. */
+    Color ink() {
+        return ink;
+    }
+
+    /** The folded corner of cautions. */
+    Color lichen() {
+        return lichen;
+    }
+
+    /** The ground of rail, floor and notes. */
+    Color rail() {
+        return rail;
+    }
+
+    /** The sheet. */
+    Color paper() {
+        return paper;
+    }
+
+    /** Ink of a line by its order among the lines. */
+    Color line(int index) {
+        return lines.get(index % lines.size());
     }
 
     static BasicStroke pattern(int index) {

@@ -2,39 +2,40 @@ package org.saddlebook.charts.internal;
 
 import java.awt.Graphics2D;
 import java.awt.geom.Line2D;
-import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.jfree.chart.JFreeChart;
 import org.jfree.chart.plot.DatasetRenderingOrder;
 import org.jfree.chart.plot.XYPlot;
 import org.jfree.chart.ui.RectangleEdge;
 import org.jfree.chart.ui.RectangleInsets;
-import org.saddlebook.api.findings.Axis;
 import org.saddlebook.api.findings.Layer;
 import org.saddlebook.api.findings.Node;
+import org.saddlebook.charts.api.FigureLook;
 import org.saddlebook.presentation.api.DisplayUnit;
-import org.saddlebook.presentation.api.UnitText;
 
 /** A figure laid out on its sheet of paper: title, key, drawing area, names, rail and the notes of its cautions. */
 final class Sheet {
+    /** Width on paper. */
     static final int WIDTH = 720;
 
-    private static final int MARGIN = 16;
+    private static final int MARGIN = Leaf.MARGIN;
     private static final int HEIGHT_OF_AREA = 300;
+    private static final int LEAST_HEIGHT_OF_AREA = 90;
     private static final int TITLE_SIZE = 14;
     private static final int KEY_SIZE = 11;
-    private static final int NOTE_SIZE = 11;
-    private static final int NOTE_LINE = 15;
-    private static final int FOLD = 22;
 
     private final Node.Figure figure;
+    private final FigureLook look;
+    private final Palette palette;
     private final List<Layer> layers;
     private final List<Notes.Note> notes;
-    private final Spacing spacingX;
+    private final Leaf leaf;
     private final boolean temperature;
+    private final Optional<FigureLook.Rail> rail;
     private final String labelX;
     private final String labelY;
     private final StandAxis axisX;
@@ -42,31 +43,120 @@ final class Sheet {
     private final List<String> titleLines;
     private final List<MarkNames.Name> markNames;
     private final int rows;
+    private final boolean namesInside;
     private final Strip strip;
     private final Rectangle2D area;
     private final int bottom;
     private final int height;
 
     Sheet(Node.Figure figure, Map<String, String> cautions) {
+        this(figure, cautions, FigureLook.PAPER);
+    }
+
+    Sheet(Node.Figure figure, Map<String, String> cautions, FigureLook look) {
         this.figure = figure;
-        this.notes = Notes.of(figure.cautions(), cautions);
+        this.look = look;
+        palette = look.theme() == FigureLook.Theme.DARK ? Palette.DARK : Palette.LIGHT;
+        notes = Notes.of(figure.cautions(), cautions);
+        leaf = new Leaf(look.width(), palette, notes);
         DisplayUnit unitX = DisplayUnit.of(figure.x().unit());
         DisplayUnit unitY = DisplayUnit.of(figure.y().unit());
-        spacingX = Spacing.of(figure.x().scale());
-        Spacing spacingY = Spacing.of(figure.y().scale());
-        layers = shown(figure.layers(), unitX, unitY, spacingX, spacingY);
         temperature = figure.x().unit().equals("K");
-        labelX = label(figure.x(), unitX);
-        labelY = label(figure.y(), unitY);
+        // A rail is spaced as 1/T; zoomed, a figure leaves it and stands on an axis of its own.
+        rail = temperature && look.zoom().isEmpty() ? look.rail() : Optional.empty();
+        Spacing spacingX = temperature && look.rail().isPresent()
+                ? Spacing.RECIPROCAL
+                : Spacing.of(figure.x().scale());
+        Spacing spacingY = Spacing.of(figure.y().scale());
+        layers = Shown.layers(figure.layers(), unitX, unitY, spacingX, spacingY);
+        labelX = Shown.label(figure.x(), unitX);
+        labelY = Shown.label(figure.y(), unitY);
 
-        Extent y = Extent.vertical(layers, spacingY);
-        List<Spacing.Tick> ticksY = spacingY.ticks(y.low(), y.high(), 7);
-        axisY = new StandAxis(spacingY, y.low(), y.high(), false, ticksY, 0);
-        strip = new Strip(layers);
+        Extent y = look.zoom().isPresent()
+                ? new Extent(look.zoom().get().lowY(), look.zoom().get().highY())
+                : Extent.vertical(layers, spacingY);
+        strip = new Strip(layers, palette);
+        Key key = Key.of(layers);
+        double right = roomAtTheRight();
+        double railRight = rail.isPresent() ? look.width() - MARGIN - rail.get().right() : right;
+        namesInside = railRight < right;
+        titleLines = Lettering.wrap(figure.title(), TITLE_SIZE, (look.width() - 2 * MARGIN - leaf.cornerRoom()) / 1.1);
+
+        // Rows of names above the area hang on the abscissas, which need no height.
+        Extent x = extentX(spacingX);
         double widest = 0;
-        for (Spacing.Tick tick : ticksY) {
+        for (Spacing.Tick tick : spacingY.ticks(y.low(), y.high(), 7)) {
             widest = Math.max(widest, Lettering.width(tick.label(), StandAxis.SIZE, false));
         }
+        int left = rail.isPresent() ? (int) rail.get().left() : MARGIN + (int) Math.ceil(widest + StandAxis.TICK + 6);
+        int wide = rail.isPresent()
+                ? (int) (rail.get().right() - rail.get().left())
+                : look.width() - MARGIN - (int) Math.ceil(right) - left;
+        axisX = new StandAxis(
+                spacingX,
+                x.low(),
+                x.high(),
+                temperature ? rail.isPresent() ? StandAxis.Foot.BARE : StandAxis.Foot.RAIL : StandAxis.Foot.PLAIN,
+                temperature ? List.of() : spacingX.ticks(x.low(), x.high(), Math.max(2, wide / 70)),
+                strip.height(),
+                palette);
+        Rectangle2D level = new Rectangle2D.Double(left, 0, wide, 1);
+        markNames = MarkNames.of(
+                layers,
+                value -> axisX.valueToJava2D(value, level, RectangleEdge.BOTTOM),
+                left,
+                left + wide,
+                look.width() - MARGIN);
+        rows = MarkNames.rows(markNames);
+        int top = 12
+                + titleLines.size() * 18
+                + (key.isEmpty() ? 0 : key.rows(keyRoom(), KEY_SIZE) * 16 + 6)
+                + 34
+                + rows * 14;
+        int below = (int) Math.ceil(strip.height()) + belowStrip();
+        int noteHeight = written() ? leaf.notesHeight() + (notes.isEmpty() ? 4 : 10) : 4;
+        int high = look.height().isPresent()
+                ? Math.max(LEAST_HEIGHT_OF_AREA, look.height().getAsInt() - top - below - noteHeight)
+                : HEIGHT_OF_AREA;
+        area = new Rectangle2D.Double(left, top, wide, high);
+        bottom = top + high + below;
+        height = bottom + noteHeight;
+        int marks = Math.max(2, Math.min(7, high / 28));
+        axisY = new StandAxis(
+                spacingY,
+                y.low(),
+                y.high(),
+                StandAxis.Foot.PLAIN,
+                spacingY.ticks(y.low(), y.high(), marks),
+                0,
+                palette);
+    }
+
+    private Extent extentX(Spacing spacing) {
+        if (rail.isPresent()) {
+            return new Extent(rail.get().lowKelvin(), rail.get().highKelvin());
+        }
+        return look.zoom().isPresent()
+                ? new Extent(look.zoom().get().lowX(), look.zoom().get().highX())
+                : Extent.horizontal(layers, spacing);
+    }
+
+    private boolean written() {
+        return look.notes() == FigureLook.Notes.WRITTEN;
+    }
+
+    private double keyRoom() {
+        return look.width() - 2 * MARGIN;
+    }
+
+    private int belowStrip() {
+        if (rail.isPresent()) {
+            return 10;
+        }
+        return temperature ? (int) StandAxis.RAIL + 28 : 50;
+    }
+
+    private double roomAtTheRight() {
         List<String> names = new ArrayList<>();
         for (Layer layer : layers) {
             if (layer.kind() == Layer.Kind.LINE || layer.kind() == Layer.Kind.HORIZONTAL_MARK) {
@@ -74,54 +164,40 @@ final class Sheet {
             }
         }
         names.addAll(strip.sideNames());
-        double right =
-                Math.max(EndLabels.room(names), temperature ? 8 + Lettering.width("°C, spaced as 1/T", 10, false) : 24);
-        int left = MARGIN + (int) Math.ceil(widest + StandAxis.TICK + 6);
-        int wide = WIDTH - MARGIN - (int) Math.ceil(right) - left;
+        double axisName = temperature && rail.isEmpty() ? 8 + Lettering.width("°C, spaced as 1/T", 10, false) : 24;
+        return Math.max(EndLabels.room(names), axisName);
+    }
 
-        Extent x = Extent.horizontal(layers, spacingX);
-        axisX = new StandAxis(
-                spacingX,
-                x.low(),
-                x.high(),
-                temperature,
-                temperature ? List.of() : spacingX.ticks(x.low(), x.high(), wide / 70),
-                strip.height());
-
-        markNames = MarkNames.of(
-                layers,
-                value -> axisX.valueToJava2D(value, new Rectangle2D.Double(left, 0, wide, 1), RectangleEdge.BOTTOM),
-                WIDTH - MARGIN);
-        rows = MarkNames.rows(markNames);
-        double numbers = Math.max(40, 10 + Lettering.width(noteNumbers(), NOTE_SIZE, true));
-        titleLines = Lettering.wrap(figure.title(), TITLE_SIZE, (WIDTH - 2 * MARGIN - FOLD - numbers) / 1.1);
-        int top = 12 + titleLines.size() * 18 + (Key.of(layers).isEmpty() ? 0 : 22) + 34 + rows * 14;
-        area = new Rectangle2D.Double(left, top, wide, HEIGHT_OF_AREA);
-        int foot =
-                top + HEIGHT_OF_AREA + (int) Math.ceil(strip.height()) + (temperature ? (int) StandAxis.RAIL + 28 : 50);
-        bottom = foot;
-        int lines = 0;
-        for (Notes.Note note : notes) {
-            lines += Lettering.wrap(note.text(), NOTE_SIZE, noteRoom()).size() * NOTE_LINE + 12;
-        }
-        height = foot + lines + (notes.isEmpty() ? 4 : 10);
+    int width() {
+        return look.width();
     }
 
     int height() {
         return height;
     }
 
+    Rectangle2D area() {
+        return new Rectangle2D.Double(area.getX(), area.getY(), area.getWidth(), area.getHeight());
+    }
+
+    List<Layer> layers() {
+        return layers;
+    }
+
+    Palette palette() {
+        return palette;
+    }
+
     void draw(Graphics2D g) {
-        paper(g);
+        leaf.paper(g, height);
         double y = 12;
         for (String line : titleLines) {
             y += 18;
-            Lettering.draw(g, line, MARGIN, y - 2, Lettering.Anchor.START, TITLE_SIZE, true, Palette.INK);
+            Lettering.draw(g, line, MARGIN, y - 2, Lettering.Anchor.START, TITLE_SIZE, true, palette.ink());
         }
         Key key = Key.of(layers);
         if (!key.isEmpty()) {
-            y += 22;
-            key.draw(g, MARGIN, y - 2, KEY_SIZE);
+            key.draw(g, palette, MARGIN, y + 20, keyRoom(), KEY_SIZE);
         }
         Lettering.draw(
                 g,
@@ -131,21 +207,25 @@ final class Sheet {
                 Lettering.Anchor.START,
                 KEY_SIZE,
                 false,
-                Palette.INK);
-        chart().draw(g, new Rectangle2D.Double(0, 0, WIDTH, height));
+                palette.ink());
+        chart().draw(g, new Rectangle2D.Double(0, 0, look.width(), height));
         markNames(g);
         endNames(g);
-        strip.draw(g, area.getMaxY(), area.getMinX(), area.getMaxX(), this::horizontal);
-        Lettering.draw(
-                g,
-                labelX,
-                area.getMaxX(),
-                area.getMaxY() + strip.height() + (temperature ? StandAxis.RAIL + 14 : 36),
-                Lettering.Anchor.END,
-                KEY_SIZE,
-                false,
-                Palette.INK);
-        notes(g);
+        strip.draw(g, area.getMaxY(), area.getMinX(), area.getMaxX(), !namesInside, this::horizontal);
+        if (rail.isEmpty()) {
+            Lettering.draw(
+                    g,
+                    labelX,
+                    area.getMaxX(),
+                    area.getMaxY() + strip.height() + (temperature ? StandAxis.RAIL + 14 : 36),
+                    Lettering.Anchor.END,
+                    KEY_SIZE,
+                    false,
+                    palette.ink());
+        }
+        if (written()) {
+            leaf.notes(g, bottom);
+        }
     }
 
     /** The figure as a chart on its sheet; everything around the drawing area is left to the sheet. */
@@ -154,7 +234,8 @@ final class Sheet {
         plot.setDomainAxis(axisX);
         plot.setRangeAxis(axisY);
         plot.setInsets(
-                new RectangleInsets(area.getMinY(), area.getMinX(), height - area.getMaxY(), WIDTH - area.getMaxX()),
+                new RectangleInsets(
+                        area.getMinY(), area.getMinX(), height - area.getMaxY(), look.width() - area.getMaxX()),
                 false);
         plot.setAxisOffset(RectangleInsets.ZERO_INSETS);
         plot.setBackgroundPaint(null);
@@ -162,11 +243,12 @@ final class Sheet {
         plot.setDomainGridlinesVisible(false);
         plot.setRangeGridlinesVisible(false);
         plot.setDatasetRenderingOrder(DatasetRenderingOrder.FORWARD);
+        boolean part = look.zoom().isPresent() || rail.isPresent();
         int bands = 0;
         for (int i = 0; i < layers.size(); i++) {
             Layer layer = layers.get(i);
             plot.setDataset(i, new LayerData(layer));
-            plot.setRenderer(i, new LayerRenderer(layer, order(i), bands), false);
+            plot.setRenderer(i, new LayerRenderer(layer, LayerOrder.of(layers, i), bands, palette, part), false);
             if (layer.kind() == Layer.Kind.CONFIDENCE_BAND) {
                 bands++;
             }
@@ -177,173 +259,58 @@ final class Sheet {
         return chart;
     }
 
-    /** Order of a line among the lines; a band goes with the line of its name, or with the line of its own order. */
-    private int order(int index) {
-        Layer wanted = layers.get(index);
-        int lines = 0;
-        int sameKindBefore = 0;
-        int named = -1;
-        for (int i = 0; i < layers.size(); i++) {
-            Layer layer = layers.get(i);
-            if (i < index && layer.kind() == wanted.kind()) {
-                sameKindBefore++;
-            }
-            if (layer.kind() == Layer.Kind.LINE) {
-                if (named < 0 && layer.label().equals(wanted.label())) {
-                    named = lines;
-                }
-                lines++;
-            }
-        }
-        return wanted.kind() == Layer.Kind.LINE || named < 0 ? sameKindBefore : named;
-    }
-
     private void endNames(Graphics2D g) {
         EndLabels labels = new EndLabels();
         for (int index = 0; index < layers.size(); index++) {
             Layer layer = layers.get(index);
             if (layer.kind() == Layer.Kind.LINE && layer.size() > 0) {
-                double[] x = layer.x();
-                int last = 0;
-                for (int i = 1; i < x.length; i++) {
-                    last = x[i] > x[last] ? i : last;
-                }
-                labels.add(layer.label(), horizontal(x[last]), vertical(layer.y()[last]), Palette.line(order(index)));
+                LineEnd end = LineEnd.of(layer, this::horizontal, this::anyVertical, area);
+                labels.add(layer.label(), end.x(), end.y(), end.before(), palette.line(LayerOrder.of(layers, index)));
             } else if (layer.kind() == Layer.Kind.HORIZONTAL_MARK && layer.size() > 0) {
-                labels.add(layer.label(), area.getMaxX(), vertical(layer.y()[0]), Palette.INK);
+                double at = vertical(layer.y()[0]);
+                labels.add(layer.label(), area.getMaxX(), at, at, palette.ink());
             }
         }
-        labels.draw(g, area.getMaxX(), area.getMinY(), area.getMaxY());
+        if (namesInside) {
+            labels.drawInside(g, palette, area);
+        } else {
+            labels.draw(g, palette, area.getMaxX(), area.getMinY(), area.getMaxY());
+        }
     }
 
     /** Names of vertical marks, above the drawing area; each stem runs down from its own name. */
     private void markNames(Graphics2D g) {
         for (MarkNames.Name name : markNames) {
             double y = area.getMinY() - 5 - name.row() * 14;
-            g.setPaint(Palette.INK);
+            g.setPaint(palette.ink());
             g.setStroke(Palette.FINE);
             g.draw(new Line2D.Double(name.stem(), y - 8, name.stem(), area.getMinY()));
-            Lettering.draw(g, name.text(), name.start(), y, Lettering.Anchor.START, KEY_SIZE, false, Palette.INK);
+            Lettering.draw(g, name.text(), name.start(), y, Lettering.Anchor.START, KEY_SIZE, false, palette.ink());
         }
     }
 
-    private void paper(Graphics2D g) {
-        double fold = notes.isEmpty() ? 0 : FOLD;
-        Path2D page = new Path2D.Double();
-        page.moveTo(0, 0);
-        page.lineTo(WIDTH - fold, 0);
-        page.lineTo(WIDTH, fold);
-        page.lineTo(WIDTH, height);
-        page.lineTo(0, height);
-        page.closePath();
-        g.setPaint(Palette.PAPER);
-        g.fill(page);
-        if (!notes.isEmpty()) {
-            Path2D ear = new Path2D.Double();
-            ear.moveTo(WIDTH - fold, 0);
-            ear.lineTo(WIDTH - fold, fold);
-            ear.lineTo(WIDTH, fold);
-            ear.closePath();
-            g.setPaint(Palette.LICHEN);
-            g.fill(ear);
-            g.setPaint(Palette.INK);
-            g.setStroke(Palette.FINE);
-            g.draw(ear);
-            Lettering.draw(g, noteNumbers(), WIDTH - fold - 6, 16, Lettering.Anchor.END, NOTE_SIZE, true, Palette.INK);
-        }
-    }
-
-    private String noteNumbers() {
-        StringBuilder numbers = new StringBuilder();
-        for (Notes.Note note : notes) {
-            numbers.append(numbers.length() == 0 ? "" : " ").append(note.number());
-        }
-        return numbers.toString();
-    }
-
-    private void notes(Graphics2D g) {
-        double y = bottom;
-        for (Notes.Note note : notes) {
-            List<String> lines = Lettering.wrap(note.text(), NOTE_SIZE, noteRoom());
-            double high = lines.size() * NOTE_LINE + 6;
-            Path2D strip = new Path2D.Double();
-            strip.moveTo(MARGIN, y);
-            strip.lineTo(WIDTH - MARGIN - 9, y);
-            strip.lineTo(WIDTH - MARGIN, y + 9);
-            strip.lineTo(WIDTH - MARGIN, y + high);
-            strip.lineTo(MARGIN, y + high);
-            strip.closePath();
-            g.setPaint(Palette.RAIL);
-            g.fill(strip);
-            String number = Integer.toString(note.number());
-            Lettering.draw(g, number, MARGIN + 24, y + NOTE_LINE, Lettering.Anchor.END, NOTE_SIZE, true, Palette.INK);
-            for (String line : lines) {
-                y += NOTE_LINE;
-                Lettering.draw(g, line, MARGIN + 34, y, Lettering.Anchor.START, NOTE_SIZE, false, Palette.INK);
-            }
-            y += 12;
-        }
-    }
-
-    private static double noteRoom() {
-        return WIDTH - 2 * MARGIN - 34 - 14;
-    }
-
-    private double horizontal(double value) {
+    /** Horizontal coordinate of an abscissa in the unit shown. */
+    double horizontal(double value) {
         return axisX.valueToJava2D(value, area, RectangleEdge.BOTTOM);
     }
 
+    /** Abscissa in the unit shown at a horizontal coordinate. */
+    double abscissa(double px) {
+        return axisX.java2DToValue(px, area, RectangleEdge.BOTTOM);
+    }
+
+    /** Ordinate in the unit shown at a vertical coordinate. */
+    double ordinate(double py) {
+        return axisY.java2DToValue(py, area, RectangleEdge.LEFT);
+    }
+
+    /** Vertical coordinate of an ordinate in the unit shown, also outside the drawing area. */
+    double anyVertical(double value) {
+        return axisY.valueToJava2D(value, area, RectangleEdge.LEFT);
+    }
+
     private double vertical(double value) {
-        double at = axisY.valueToJava2D(value, area, RectangleEdge.LEFT);
-        return Math.max(area.getMinY(), Math.min(at, area.getMaxY()));
-    }
-
-    private static String label(Axis axis, DisplayUnit unit) {
-        if (axis.scale() == Axis.Scale.RECIPROCAL_TEMPERATURE || axis.unit().equals("K")) {
-            return axis.label();
-        }
-        String text = UnitText.forPeople(unit.ucum());
-        if (text.isEmpty() || axis.label().contains(" / ")) {
-            return axis.label();
-        }
-        boolean compound = text.indexOf('/') >= 0 || text.indexOf('\u00a0') >= 0;
-        return axis.label() + " / " + (compound ? "(" + text + ")" : text);
-    }
-
-    private static List<Layer> shown(
-            List<Layer> layers, DisplayUnit unitX, DisplayUnit unitY, Spacing spacingX, Spacing spacingY) {
-        List<Layer> result = new ArrayList<>();
-        for (Layer layer : layers) {
-            boolean fits = true;
-            for (double x : layer.x()) {
-                fits &= layer.kind() == Layer.Kind.HORIZONTAL_MARK || spacingX.admits(x);
-            }
-            for (double y : layer.y()) {
-                fits &= layer.kind() == Layer.Kind.VERTICAL_MARK
-                        || layer.kind() == Layer.Kind.CONFIDENCE_BAND
-                        || layer.kind() == Layer.Kind.NEW_RUN_BAND
-                        || spacingY.admits(y);
-            }
-            if (!fits) {
-                throw new IllegalArgumentException(
-                        "layer \"" + layer.label() + "\" has a value that its axis cannot show: not above zero");
-            }
-            result.add(new Layer(
-                    layer.kind(),
-                    layer.label(),
-                    in(unitX, layer.x()),
-                    in(unitY, layer.y()),
-                    in(unitY, layer.lower()),
-                    in(unitY, layer.upper())));
-        }
-        return result;
-    }
-
-    private static double[] in(DisplayUnit unit, double[] values) {
-        for (int i = 0; i < values.length; i++) {
-            values[i] = unit.value(values[i]);
-        }
-        return values;
+        return Math.max(area.getMinY(), Math.min(anyVertical(value), area.getMaxY()));
     }
 
     /** What a screen reader says beyond the title. */

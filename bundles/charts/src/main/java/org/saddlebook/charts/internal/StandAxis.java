@@ -16,6 +16,16 @@ import org.jfree.data.Range;
 final class StandAxis extends ValueAxis {
     private static final long serialVersionUID = 1L;
 
+    /** How an axis looks at the foot of a figure. */
+    enum Foot {
+        /** A line with marks. */
+        PLAIN,
+        /** Kelvin and degrees Celsius on either side of a line. */
+        RAIL,
+        /** A line alone: the marks stand elsewhere. */
+        BARE
+    }
+
     static final int SIZE = 11;
 
     static final double TICK = 5;
@@ -24,23 +34,32 @@ final class StandAxis extends ValueAxis {
     static final double RAIL = 44;
 
     private final transient Spacing spacing;
-    private final boolean temperature;
+    private final Foot foot;
     private final transient List<Spacing.Tick> marks;
     private final double drop;
+    private final transient Palette palette;
 
     /**
      * An axis.
      *
-     * @param temperature whether values are kelvin, to be labelled in kelvin and degrees Celsius
+     * @param foot how it looks when it lies at the foot
      * @param marks the marks of an axis that is not a temperature
      * @param drop room between the drawing area and the axis at its foot
      */
-    StandAxis(Spacing spacing, double low, double high, boolean temperature, List<Spacing.Tick> marks, double drop) {
+    StandAxis(
+            Spacing spacing,
+            double low,
+            double high,
+            Foot foot,
+            List<Spacing.Tick> marks,
+            double drop,
+            Palette palette) {
         super(null, null);
         this.spacing = spacing;
-        this.temperature = temperature;
+        this.foot = foot;
         this.marks = List.copyOf(marks);
         this.drop = drop;
+        this.palette = palette;
         setAutoRange(false);
         setRange(new Range(low, high), false, false);
     }
@@ -73,8 +92,10 @@ final class StandAxis extends ValueAxis {
             PlotRenderingInfo info) {
         if (!RectangleEdge.isTopOrBottom(edge)) {
             upright(g, area, edge);
-        } else if (temperature) {
+        } else if (foot == Foot.RAIL) {
             rail(g, area, edge);
+        } else if (foot == Foot.BARE) {
+            line(g, area.getMinX(), area.getMaxY() + drop, area.getMaxX(), area.getMaxY() + drop);
         } else {
             lying(g, area, edge);
         }
@@ -86,7 +107,7 @@ final class StandAxis extends ValueAxis {
         for (Spacing.Tick tick : marks) {
             double y = valueToJava2D(tick.value(), area, edge);
             line(g, x - (tick.label().isEmpty() ? TICK / 2 : TICK), y, x, y);
-            Lettering.draw(g, tick.label(), x - TICK - 4, y + 4, Lettering.Anchor.END, SIZE, false, Palette.INK);
+            Lettering.draw(g, tick.label(), x - TICK - 4, y + 4, Lettering.Anchor.END, SIZE, false, palette.ink());
         }
         line(g, x, area.getMinY(), x, area.getMaxY());
     }
@@ -106,9 +127,9 @@ final class StandAxis extends ValueAxis {
     private void rail(Graphics2D g, Rectangle2D area, RectangleEdge edge) {
         double top = area.getMaxY() + drop;
         double y = top + RAIL / 2;
-        g.setPaint(Palette.RAIL);
+        g.setPaint(palette.rail());
         g.fill(new Rectangle2D.Double(area.getMinX(), top, area.getWidth(), RAIL));
-        int most = (int) (area.getWidth() / 52);
+        int most = Math.max(2, (int) (area.getWidth() / 52));
         double free = Double.NEGATIVE_INFINITY;
         for (Spacing.Tick tick : Spacing.even(getLowerBound(), getUpperBound(), most, 0)) {
             double x = valueToJava2D(tick.value(), area, edge);
@@ -123,7 +144,8 @@ final class StandAxis extends ValueAxis {
         }
         g.setStroke(Palette.FIRM);
         g.draw(new Line2D.Double(area.getMinX(), y, area.getMaxX(), y));
-        Lettering.draw(g, "K", area.getMaxX() + 8, y - TICK - 4, Lettering.Anchor.START, SIZE - 1, false, Palette.INK);
+        Lettering.draw(
+                g, "K", area.getMaxX() + 8, y - TICK - 4, Lettering.Anchor.START, SIZE - 1, false, palette.ink());
         Lettering.draw(
                 g,
                 spacing == Spacing.RECIPROCAL ? "°C, spaced as 1/T" : "°C",
@@ -132,21 +154,21 @@ final class StandAxis extends ValueAxis {
                 Lettering.Anchor.START,
                 SIZE - 1,
                 false,
-                Palette.INK);
+                palette.ink());
     }
 
     /** Writes a label unless it would touch the one before; returns where the next may begin. */
-    private static double label(Graphics2D g, String text, double x, double y, int size, double free) {
+    private double label(Graphics2D g, String text, double x, double y, int size, double free) {
         double half = Lettering.width(text, size, false) / 2;
         if (text.isEmpty() || x - half < free) {
             return free;
         }
-        Lettering.draw(g, text, x, y, Lettering.Anchor.MIDDLE, size, false, Palette.INK);
+        Lettering.draw(g, text, x, y, Lettering.Anchor.MIDDLE, size, false, palette.ink());
         return x + half + 8;
     }
 
-    private static void line(Graphics2D g, double x1, double y1, double x2, double y2) {
-        g.setPaint(Palette.INK);
+    private void line(Graphics2D g, double x1, double y1, double x2, double y2) {
+        g.setPaint(palette.ink());
         g.setStroke(Palette.FINE);
         g.draw(new Line2D.Double(x1, y1, x2, y2));
     }

@@ -26,8 +26,10 @@ final class Strip {
     private record Name(String text, double at, double start, int row) {}
 
     private final List<Layer> layers;
+    private final Palette palette;
 
-    Strip(List<Layer> layers) {
+    Strip(List<Layer> layers, Palette palette) {
+        this.palette = palette;
         List<Layer> own = new ArrayList<>();
         for (Layer layer : layers) {
             boolean inStrip = layer.kind() == Layer.Kind.SPINDLE
@@ -75,43 +77,52 @@ final class Strip {
      * @param top where it begins
      * @param left left edge of the drawing area
      * @param right right edge of the drawing area
+     * @param sideNames whether there is room for names at the right
      * @param horizontal horizontal coordinate of a value
      */
-    void draw(Graphics2D g, double top, double left, double right, DoubleUnaryOperator horizontal) {
+    void draw(Graphics2D g, double top, double left, double right, boolean sideNames, DoubleUnaryOperator horizontal) {
         List<Name> names = names(left, right, horizontal);
         int rows = Math.min(2, names.size());
         double y = top + 4 + rows * LINE;
         double foot = y + 4;
         for (Layer layer : layers) {
             if (layer.kind() == Layer.Kind.SPINDLE) {
-                spindle(g, layer, y + BODY / 2, horizontal);
-                side(g, layer.label(), right, y + BODY / 2 + 4);
+                spindle(g, layer, y + BODY / 2, left, right, horizontal);
+                side(g, layer.label(), left, right, sideNames, y + BODY / 2 + 4);
                 foot = y + BODY;
             }
         }
         for (Name name : names) {
             double base = y - 4 - name.row() * LINE;
-            g.setPaint(Palette.INK);
+            g.setPaint(palette.ink());
             g.setStroke(Palette.FINE);
             g.draw(new Line2D.Double(name.at(), base + 2, name.at(), foot - 2));
-            Lettering.draw(g, name.text(), name.start(), base, Lettering.Anchor.START, SIZE, false, Palette.INK);
+            Lettering.draw(g, name.text(), name.start(), base, Lettering.Anchor.START, SIZE, false, palette.ink());
         }
         for (Layer layer : layers) {
             if (layer.kind() == Layer.Kind.RUG) {
                 double middle = foot + TICKS / 2;
                 for (double x : layer.x()) {
-                    Marks.measured(g, horizontal.applyAsDouble(x), middle, middle, middle);
+                    double at = horizontal.applyAsDouble(x);
+                    if (at >= left && at <= right) {
+                        Marks.measured(g, palette, at, middle, middle, middle);
+                    }
                 }
-                side(g, layer.label(), right, middle + 4);
+                side(g, layer.label(), left, right, sideNames, middle + 4);
             }
         }
     }
 
-    private static void side(Graphics2D g, String text, double right, double y) {
-        Lettering.draw(g, text, right + EndLabels.GAP, y, Lettering.Anchor.START, SIZE, false, Palette.INK);
+    private void side(Graphics2D g, String text, double left, double right, boolean sideNames, double y) {
+        double x = sideNames ? right + EndLabels.GAP : left - 8;
+        Lettering.Anchor anchor = sideNames ? Lettering.Anchor.START : Lettering.Anchor.END;
+        Lettering.draw(g, text, x, y, anchor, SIZE, false, palette.ink());
     }
 
-    private static void spindle(Graphics2D g, Layer layer, double middle, DoubleUnaryOperator horizontal) {
+    private void spindle(
+            Graphics2D g, Layer layer, double middle, double left, double right, DoubleUnaryOperator unbounded) {
+        // What lies beyond the ends is drawn on the edge, where it has no width.
+        DoubleUnaryOperator horizontal = value -> Math.max(left, Math.min(unbounded.applyAsDouble(value), right));
         double[] x = layer.x();
         double[] whole = layer.y();
         double[] filled = layer.lower();
@@ -125,16 +136,16 @@ final class Strip {
             while (to + 1 < x.length && whole[to + 1] > NOTHING) {
                 to++;
             }
-            g.setPaint(Palette.PAPER);
+            g.setPaint(palette.paper());
             Path2D outline = body(x, whole, from, to, middle, horizontal);
             g.fill(outline);
-            g.setPaint(Palette.INK);
+            g.setPaint(palette.ink());
             g.setStroke(Palette.FINE);
             g.draw(outline);
             from = to + 1;
         }
         from = 0;
-        g.setPaint(Palette.INK);
+        g.setPaint(palette.ink());
         while (from < x.length) {
             int to = from;
             while (filled[from] > NOTHING && to + 1 < x.length && filled[to + 1] > NOTHING) {
@@ -175,7 +186,10 @@ final class Strip {
         for (Layer layer : layers) {
             if (layer.kind() == Layer.Kind.STRIP_MARK) {
                 for (double x : layer.x()) {
-                    wanted.add(new Name(layer.label(), horizontal.applyAsDouble(x), 0, 0));
+                    double at = horizontal.applyAsDouble(x);
+                    if (at >= left - 1 && at <= right + 1) {
+                        wanted.add(new Name(layer.label(), at, 0, 0));
+                    }
                 }
             }
         }

@@ -15,6 +15,7 @@ import org.saddlebook.api.service.CampaignFormat;
 import org.saddlebook.api.service.Evaluation;
 import org.saddlebook.api.service.Intake;
 import org.saddlebook.api.service.ReportWriter;
+import org.saddlebook.api.service.TableWriter;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.console.api.EvaluateOptions;
 import org.saddlebook.console.api.ExitCode;
@@ -51,7 +52,7 @@ public final class EvaluateVerb implements Verb {
     @Override
     public String help() {
         return "INPUT             a campaign folder, a campaign.json, or a table of T and k\n"
-                + "--out DIR         write report, campaign and findings into this folder\n"
+                + "--out DIR         write report, campaign, findings and tables (CSV) into this folder\n"
                 + "--json            print the findings as JSON and nothing else\n"
                 + EvaluateOptions.HELP
                 + "\n\nExit codes: 0 done; 1 a model named by --model was refused, or nothing could be fitted; 2 input or"
@@ -127,6 +128,12 @@ public final class EvaluateVerb implements Verb {
                     .err()
                     .println("saddlebook: no report was written, because the feature report is not installed; campaign"
                             + " and findings are in the folder.");
+        }
+        Optional<TableWriter> tables = services.find(TableWriter.class);
+        if (tables.isPresent()) {
+            for (Intake.Part part : tables.get().tables(findings)) {
+                content.add(part.name(), part.bytes());
+            }
         }
         for (Intake.Part source : opened.parts()) {
             content.addSource(source.name(), source.bytes());

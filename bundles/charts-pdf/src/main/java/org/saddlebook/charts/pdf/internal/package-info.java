@@ -1,0 +1,2 @@
+/** Figures as PDF. */
+package org.saddlebook.charts.pdf.internal;

@@ -17,6 +17,7 @@ import org.saddlebook.api.model.Conditions;
  * @param excluded reason why a person excluded it; absent when it is used
  * @param asRead what stood in the source
  * @param conditions what else it was measured at; none for most tables
+ * @param block stock, batch or day it shares an error with other runs through; empty when not stated
  */
 public record RatePoint(
         double kelvin,
@@ -26,7 +27,8 @@ public record RatePoint(
         String label,
         Optional<String> excluded,
         AsRead asRead,
-        Conditions conditions) {
+        Conditions conditions,
+        String block) {
     /**
      * What stood in the source, so that the reading can be checked.
      *
@@ -75,9 +77,10 @@ public record RatePoint(
         Objects.requireNonNull(excluded, "excluded");
         Objects.requireNonNull(asRead, "asRead");
         Objects.requireNonNull(conditions, "conditions");
+        Objects.requireNonNull(block, "block");
     }
 
-    /** A point of which no condition but the temperature is stated. */
+    /** A point of which no condition but the temperature is stated, and no block. */
     public RatePoint(
             double kelvin,
             double rate,
@@ -86,7 +89,20 @@ public record RatePoint(
             String label,
             Optional<String> excluded,
             AsRead asRead) {
-        this(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, Conditions.NONE);
+        this(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, Conditions.NONE, "");
+    }
+
+    /** A point that belongs to no block. */
+    public RatePoint(
+            double kelvin,
+            double rate,
+            OptionalDouble kelvinUncertainty,
+            OptionalDouble rateUncertainty,
+            String label,
+            Optional<String> excluded,
+            AsRead asRead,
+            Conditions conditions) {
+        this(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, conditions, "");
     }
 
     /** A used point without uncertainties. */
@@ -98,24 +114,35 @@ public record RatePoint(
     /** The same with a stated standard uncertainty of the rate constant, SI. */
     public RatePoint withRateUncertainty(double uncertainty) {
         return new RatePoint(
-                kelvin, rate, kelvinUncertainty, OptionalDouble.of(uncertainty), label, excluded, asRead, conditions);
+                kelvin, rate, kelvinUncertainty, OptionalDouble.of(uncertainty), label, excluded, asRead, conditions, block);
     }
 
     /** The same, measured under these conditions. */
     public RatePoint withConditions(Conditions stated) {
-        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, stated);
+        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, stated, block);
+    }
+
+    /** The same with a stated standard uncertainty of the temperature, K. */
+    public RatePoint withKelvinUncertainty(double uncertainty) {
+        return new RatePoint(
+                kelvin, rate, OptionalDouble.of(uncertainty), rateUncertainty, label, excluded, asRead, conditions, block);
+    }
+
+    /** The same in this block. */
+    public RatePoint withBlock(String name) {
+        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, conditions, name);
     }
 
     /** The same, excluded for this reason. */
     public RatePoint exclude(String reason) {
         return new RatePoint(
-                kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.of(reason), asRead, conditions);
+                kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.of(reason), asRead, conditions, block);
     }
 
     /** The same, used again. */
     public RatePoint include() {
         return new RatePoint(
-                kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.empty(), asRead, conditions);
+                kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.empty(), asRead, conditions, block);
     }
 
     private static void positive(String what, double value) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.saddlebook.api.campaign.ErrorModel;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.model.FittedModel;
@@ -38,11 +39,10 @@ public final class FittedLaws {
      * @param id id of the rate model
      * @param title name of the law
      * @param fitted estimates, covariance, degrees of freedom
-     * @param newRunScatter standard deviation in ln k of one more run; absent when the scale of the errors is unknown
+     * @param newRun how one more run would scatter
      * @param sharedErrors errors common to all runs, as the findings state them; the covariance includes them
      */
-    public record FittedLawView(
-            String id, String title, FittedModel fitted, OptionalDouble newRunScatter, List<Node> sharedErrors) {
+    public record FittedLawView(String id, String title, FittedModel fitted, NewRun newRun, List<Node> sharedErrors) {
         /** Copies the list. */
         public FittedLawView {
             sharedErrors = List.copyOf(sharedErrors);
@@ -74,7 +74,7 @@ public final class FittedLaws {
         highestKelvin = kelvin(table, "highest");
         centreKelvin = kelvin(table, "centre");
         level = TreeReader.number(body, "level");
-        stated = TreeReader.text(body, "errorModel").equals("stated");
+        stated = ErrorModel.of(TreeReader.text(body, "errorModel")).isStated();
         targetOnSameSensor = body.get("targets").isPresent()
                 && TreeReader.text(body, "targets").equals("same-sensor");
         List<FittedLawView> read = new ArrayList<>();
@@ -196,14 +196,26 @@ public final class FittedLaws {
                 }
             }
         }
-        OptionalDouble scatter = group.get("newRunScatter").isPresent()
-                ? OptionalDouble.of(TreeReader.number(group, "newRunScatter"))
-                : OptionalDouble.empty();
+        NewRun newRun = new NewRun(
+                group.get("newRunScatter").isPresent()
+                        ? OptionalDouble.of(TreeReader.number(group, "newRunScatter"))
+                        : OptionalDouble.empty(),
+                si(group, "newRunRate"),
+                si(group, "newRunKelvin"));
         double dof = TreeReader.number(TreeReader.group(group, "statistics"), "dof");
         FittedModel fitted = new FittedModel(
                 id, held(group), symbols, values, covariance, stated ? OptionalDouble.empty() : OptionalDouble.of(dof));
         List<Node> shared = group.get("sharedErrors").isPresent() ? TreeReader.items(group, "sharedErrors") : List.of();
-        return new FittedLawView(id, TreeReader.text(group, "title"), fitted, scatter, shared);
+        return new FittedLawView(id, TreeReader.text(group, "title"), fitted, newRun, shared);
+    }
+
+    private static OptionalDouble si(Node.Group group, String key) {
+        if (group.get(key).isEmpty()) {
+            return OptionalDouble.empty();
+        }
+        Node.Quantity quantity = TreeReader.quantity(group, key);
+        return OptionalDouble.of(
+                quantity.value().orElseThrow() * unit(quantity.unit()).factor());
     }
 
     /** The context with the parameters that were held in this fit. */

@@ -3,6 +3,7 @@ package org.saddlebook.barrier.internal;
 import java.util.ArrayList;
 import java.util.List;
 import org.saddlebook.api.campaign.ErrorModel;
+import org.saddlebook.api.campaign.RatePoint;
 import org.saddlebook.api.campaign.RateTable;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.model.Parameter;
@@ -28,9 +29,7 @@ final class ErrorModelComparison {
         columns.add(new Node.Column("errorModel", "Error model", ""));
         List<List<Node>> rows = new ArrayList<>();
         for (ErrorModel errorModel : ErrorModel.values()) {
-            if (errorModel == ErrorModel.STATED
-                    && table.used().stream()
-                            .anyMatch(point -> point.rateUncertainty().isEmpty())) {
+            if (!allowed(errorModel)) {
                 continue;
             }
             LawOutcome outcome = LawFitter.fit(model, context, Measurements.of(table, errorModel), check);
@@ -62,5 +61,16 @@ final class ErrorModelComparison {
             rows.add(row);
         }
         return new Node.Table(columns, rows);
+    }
+
+    private boolean allowed(ErrorModel errorModel) {
+        for (RatePoint point : table.used()) {
+            if ((errorModel.isStated() && point.rateUncertainty().isEmpty())
+                    || (errorModel == ErrorModel.STATED_BOTH
+                            && point.kelvinUncertainty().isEmpty())) {
+                return false;
+            }
+        }
+        return true;
     }
 }

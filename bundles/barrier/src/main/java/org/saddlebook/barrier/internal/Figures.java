@@ -1,6 +1,7 @@
 package org.saddlebook.barrier.internal;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.OptionalDouble;
 import org.saddlebook.api.campaign.RatePoint;
@@ -8,6 +9,7 @@ import org.saddlebook.api.campaign.RateTable;
 import org.saddlebook.api.findings.Axis;
 import org.saddlebook.api.findings.Layer;
 import org.saddlebook.api.findings.Node;
+import org.saddlebook.barrier.api.NewRun;
 import org.saddlebook.presentation.api.UnitText;
 
 /** The figures of the section: ln k with the laws, and the residuals of the law that carries the bands. */
@@ -41,12 +43,9 @@ final class Figures {
     private Node.Figure rates(List<FittedLaw> laws, FittedLaw shown) {
         double[] grid = grid();
         List<Layer> layers = new ArrayList<>();
-        OptionalDouble scatter = shown.newRunScatter();
-        if (scatter.isPresent()) {
-            layers.add(band(Layer.Kind.NEW_RUN_BAND, shown.title() + ", new run", shown, grid, scatter.getAsDouble()));
-        }
         if (shown.scale().isPresent()) {
-            layers.add(band(Layer.Kind.CONFIDENCE_BAND, shown.title() + ", mean", shown, grid, 0));
+            layers.add(band(Layer.Kind.NEW_RUN_BAND, shown.title() + ", new run", shown, grid, true));
+            layers.add(band(Layer.Kind.CONFIDENCE_BAND, shown.title() + ", mean", shown, grid, false));
         }
         for (FittedLaw law : laws) {
             double[] y = new double[grid.length];
@@ -62,7 +61,7 @@ final class Figures {
             for (int i = 0; i < x.length; i++) {
                 x[i] = targets.get(i);
             }
-            layers.add(band(Layer.Kind.PREDICTED, "predicted", shown, x, 0));
+            layers.add(band(Layer.Kind.PREDICTED, "predicted", shown, x, false));
         }
         layers.removeIf(layer -> layer.size() == 0);
         List<String> cautions = new ArrayList<>();
@@ -99,22 +98,60 @@ final class Figures {
                 List.of());
     }
 
-    private Layer band(Layer.Kind kind, String label, FittedLaw law, double[] grid, double scatter) {
+    /** A band of the mean or of a new run; where a new run may read zero, its logarithm has no lower end and no band is drawn. */
+    private Layer band(Layer.Kind kind, String label, FittedLaw law, double[] grid, boolean newRun) {
+        double[] x = new double[grid.length];
         double[] y = new double[grid.length];
         double[] low = new double[grid.length];
         double[] high = new double[grid.length];
-        for (int i = 0; i < grid.length; i++) {
-            FittedLaw.Estimate estimate = law.lnRate(grid[i]);
-            double half = new FittedLaw.Estimate(
-                            estimate.value(),
-                            OptionalDouble.of(estimate.variance().orElseThrow() + scatter * scatter),
-                            estimate.sharedVariance())
-                    .halfWidth(level, law.degreesOfFreedom());
-            y[i] = estimate.value() - lnUnit;
-            low[i] = y[i] - half;
-            high[i] = y[i] + half;
+        int count = 0;
+        for (double kelvin : grid) {
+            double[] half = newRun ? newRunHalves(law, kelvin) : meanHalves(law.lnRate(kelvin), law);
+            if (Double.isFinite(half[0]) && Double.isFinite(half[1])) {
+                x[count] = kelvin;
+                y[count] = law.lnRate(kelvin).value() - lnUnit;
+                low[count] = y[count] - half[0];
+                high[count] = y[count] + half[1];
+                count++;
+            }
         }
-        return new Layer(kind, label, grid, y, low, high);
+        return new Layer(
+                kind,
+                label,
+                Arrays.copyOf(x, count),
+                Arrays.copyOf(y, count),
+                Arrays.copyOf(low, count),
+                Arrays.copyOf(high, count));
+    }
+
+    private double[] meanHalves(FittedLaw.Estimate estimate, FittedLaw law) {
+        double half = estimate.halfWidth(level, law.degreesOfFreedom());
+        return new double[] {half, half};
+    }
+
+    private double[] newRunHalves(FittedLaw law, double kelvin) {
+        FittedLaw.Estimate estimate = law.lnRate(kelvin);
+        NewRun newRun = law.newRun();
+        OptionalDouble scatter = newRun.onLogarithm(law.slope(kelvin));
+        if (scatter.isPresent()) {
+            return meanHalves(
+                    new FittedLaw.Estimate(
+                            estimate.value(),
+                            OptionalDouble.of(
+                                    estimate.variance().orElseThrow() + scatter.getAsDouble() * scatter.getAsDouble()),
+                            estimate.sharedVariance()),
+                    law);
+        }
+        double half = estimate.halfWidth(level, law.degreesOfFreedom());
+        double own =
+                law.quantile(level) * newRun.rate().orElse(Double.POSITIVE_INFINITY) / StrictMath.exp(estimate.value());
+        double below = length(StrictMath.expm1(-half), own);
+        double above = length(StrictMath.expm1(half), own);
+        return new double[] {below < 1 ? -StrictMath.log1p(-below) : Double.POSITIVE_INFINITY, StrictMath.log1p(above)};
+    }
+
+    private static double length(double a, double b) {
+        return Math.sqrt(a * a + b * b);
     }
 
     private Layer points(Layer.Kind kind, boolean excluded) {

@@ -6,6 +6,7 @@ import org.saddlebook.api.campaign.ErrorModel;
 import org.saddlebook.api.model.Derived;
 import org.saddlebook.api.model.Parameter;
 import org.saddlebook.api.model.RateFunction;
+import org.saddlebook.barrier.api.NewRun;
 import org.saddlebook.estimation.api.Fit;
 import org.saddlebook.estimation.api.Normal;
 import org.saddlebook.estimation.api.StudentPlusNormal;
@@ -130,19 +131,38 @@ record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurement
         return estimate(value, gradient);
     }
 
-    /**
-     * Standard deviation in ln k of one more run; absent when the scale of the errors is unknown, or when the error of k
-     * is an absolute one and has no fixed size in ln k.
-     */
-    OptionalDouble newRunScatter() {
-        if (data.errorModel() == ErrorModel.CONSTANT_ABSOLUTE) {
-            return OptionalDouble.empty();
-        }
+    /** How one more run would scatter about the law. */
+    NewRun newRun() {
         if (data.stated()) {
-            return OptionalDouble.of(data.typicalRelativeUncertainty());
+            OptionalDouble kelvin = data.uncertainTemperatures()
+                    ? OptionalDouble.of(data.typicalKelvinUncertainty())
+                    : OptionalDouble.empty();
+            return new NewRun(OptionalDouble.of(data.typicalRelativeUncertainty()), OptionalDouble.empty(), kelvin);
         }
         OptionalDouble scale = scale();
-        return scale.isPresent() ? OptionalDouble.of(Math.sqrt(scale.getAsDouble())) : OptionalDouble.empty();
+        if (scale.isEmpty()) {
+            return NewRun.UNKNOWN;
+        }
+        double deviation = Math.sqrt(scale.getAsDouble());
+        return data.errorModel() == ErrorModel.CONSTANT_ABSOLUTE
+                ? new NewRun(
+                        OptionalDouble.empty(),
+                        OptionalDouble.of(deviation * data.responseUnit()),
+                        OptionalDouble.empty())
+                : NewRun.ofLnRate(deviation);
+    }
+
+    /** d ln k/dT at a temperature, 1/K. */
+    double slope(double kelvin) {
+        return BothErrorsFitter.slope(law, kelvin, fit.parameters());
+    }
+
+    /** Weights of the residuals of the fit; null where all are 1. */
+    double[] weights() {
+        if (fit instanceof DistanceFit distances) {
+            return distances.weights();
+        }
+        return data.response() == Measurements.Response.RATE ? data.weights() : data.weightsOnLogarithm();
     }
 
     /** Covariance of the estimates, shared errors included; of size 0 when the scale of the errors is unknown. */

@@ -20,6 +20,13 @@ final class LawFitter {
      * @param check called now and then; throws when the user cancels
      */
     static LawOutcome fit(RateModel model, RateContext context, Measurements data, Runnable check) {
+        LawOutcome outcome = ordinary(model, context, data, check);
+        return data.uncertainTemperatures() && outcome instanceof FittedLaw fitted
+                ? BothErrorsFitter.fit(fitted, check)
+                : outcome;
+    }
+
+    private static LawOutcome ordinary(RateModel model, RateContext context, Measurements data, Runnable check) {
         String id = model.id();
         String title = model.description().title();
         RateFunction law;

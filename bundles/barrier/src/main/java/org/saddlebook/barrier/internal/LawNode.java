@@ -11,6 +11,7 @@ import org.saddlebook.api.model.Derived;
 import org.saddlebook.api.model.Parameter;
 import org.saddlebook.api.quantity.Unit;
 import org.saddlebook.barrier.api.FittedLaws;
+import org.saddlebook.barrier.api.NewRun;
 
 /** Writes one member of {@code barrier.models}. */
 final class LawNode {
@@ -88,7 +89,16 @@ final class LawNode {
         double[][] covariance = law.covariance();
         if (covariance.length > 0) {
             tree.put("covariance", covariance(law, basis, covariance));
-            tree.put("newRunScatter", law.newRunScatter());
+            NewRun newRun = law.newRun();
+            tree.put("newRunScatter", newRun.lnRate());
+            if (newRun.rate().isPresent()) {
+                tree.put(
+                        "newRunRate",
+                        Node.Quantity.of(newRun.rate().getAsDouble() / rateUnit.factor(), rateUnit.code()));
+            }
+            if (newRun.kelvin().isPresent()) {
+                tree.put("newRunKelvin", Node.Quantity.of(newRun.kelvin().getAsDouble(), "K"));
+            }
             if (!law.shared().isEmpty()) {
                 List<Node> shared = new ArrayList<>();
                 law.shared().forEach(shift -> shared.add(shift.node()));

@@ -1,5 +1,6 @@
 package org.saddlebook.barrier.internal;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.TreeSet;
 import org.saddlebook.api.campaign.ErrorModel;
@@ -31,23 +32,30 @@ final class Measurements {
 
     private final ErrorModel errorModel;
     private final Response response;
+    private final List<RatePoint> points;
     private final double[] kelvin;
     private final double[] lnRate;
+    private final double[] stated;
+    private final double[] kelvinStated;
     private final double[] relative;
     private final double[] weights;
 
-    private Measurements(ErrorModel errorModel, double[] kelvin, double[] lnRate, double[] relative) {
+    private Measurements(
+            ErrorModel errorModel,
+            Response response,
+            List<RatePoint> points,
+            double[] kelvin,
+            double[] lnRate,
+            double[] stated,
+            double[] kelvinStated) {
         this.errorModel = errorModel;
+        this.response = response;
+        this.points = points;
         this.kelvin = kelvin;
         this.lnRate = lnRate;
-        this.relative = relative;
-        double largest = 0;
-        for (double u : relative) {
-            largest = Math.max(largest, u);
-        }
-        response = largest > LARGEST_RELATIVE_UNCERTAINTY || errorModel == ErrorModel.CONSTANT_ABSOLUTE
-                ? Response.RATE
-                : Response.LN_RATE;
+        this.stated = stated;
+        this.kelvinStated = kelvinStated;
+        relative = kelvinStated.length == 0 ? stated : withTemperatures();
         weights = new double[relative.length];
         for (int i = 0; i < weights.length; i++) {
             // On k the weight is 1/u(k)^2; u(k) = relative * k, and the response is k in units of exp(lnRate[0]).
@@ -62,16 +70,105 @@ final class Measurements {
         int n = used.size();
         double[] kelvin = new double[n];
         double[] lnRate = new double[n];
-        double[] relative = new double[errorModel == ErrorModel.STATED ? n : 0];
+        double[] relative = new double[errorModel.isStated() ? n : 0];
+        double[] kelvinStated = new double[errorModel == ErrorModel.STATED_BOTH ? n : 0];
+        double largest = 0;
         for (int i = 0; i < n; i++) {
             RatePoint point = used.get(i);
             kelvin[i] = point.kelvin();
             lnRate[i] = StrictMath.log(point.rate());
             if (relative.length > 0) {
                 relative[i] = point.rateUncertainty().orElseThrow() / point.rate();
+                largest = Math.max(largest, relative[i]);
+            }
+            if (kelvinStated.length > 0) {
+                kelvinStated[i] = point.kelvinUncertainty().orElseThrow();
             }
         }
-        return new Measurements(errorModel, kelvin, lnRate, relative);
+        Response response = largest > LARGEST_RELATIVE_UNCERTAINTY || errorModel == ErrorModel.CONSTANT_ABSOLUTE
+                ? Response.RATE
+                : Response.LN_RATE;
+        return new Measurements(errorModel, response, used, kelvin, lnRate, relative, kelvinStated);
+    }
+
+    /** The same without the points at one temperature, fitted to the same response. */
+    Measurements without(double leftOutKelvin) {
+        List<RatePoint> kept = new ArrayList<>();
+        int[] rows = new int[kelvin.length];
+        int count = 0;
+        for (int i = 0; i < kelvin.length; i++) {
+            if (kelvin[i] != leftOutKelvin) {
+                kept.add(points.get(i));
+                rows[count++] = i;
+            }
+        }
+        return new Measurements(
+                errorModel,
+                response,
+                kept,
+                pick(kelvin, rows, count),
+                pick(lnRate, rows, count),
+                pick(stated, rows, count),
+                pick(kelvinStated, rows, count));
+    }
+
+    private static double[] pick(double[] values, int[] rows, int count) {
+        double[] picked = new double[values.length == 0 ? 0 : count];
+        for (int i = 0; i < picked.length; i++) {
+            picked[i] = values[rows[i]];
+        }
+        return picked;
+    }
+
+    /**
+     * Relative uncertainties of k that an uncertain temperature adds to: {@code u(T) |d ln k/dT|} with the slope of a
+     * straight line of ln k in 1/T.
+     */
+    private double[] withTemperatures() {
+        double sum = 0;
+        double x = 0;
+        double y = 0;
+        for (int i = 0; i < kelvin.length; i++) {
+            double weight = 1 / (stated[i] * stated[i]);
+            sum += weight;
+            x += weight / kelvin[i];
+            y += weight * lnRate[i];
+        }
+        double xx = 0;
+        double xy = 0;
+        for (int i = 0; i < kelvin.length; i++) {
+            double weight = 1 / (stated[i] * stated[i]);
+            double distance = 1 / kelvin[i] - x / sum;
+            xx += weight * distance * distance;
+            xy += weight * distance * (lnRate[i] - y / sum);
+        }
+        double slope = xx > 0 ? xy / xx : 0;
+        double[] result = new double[kelvin.length];
+        for (int i = 0; i < result.length; i++) {
+            double fromTemperature = slope / (kelvin[i] * kelvin[i]) * kelvinStated[i];
+            result[i] = Math.sqrt(stated[i] * stated[i] + fromTemperature * fromTemperature);
+        }
+        return result;
+    }
+
+    /** Whether the temperatures have stated uncertainties of their own. */
+    boolean uncertainTemperatures() {
+        return kelvinStated.length > 0;
+    }
+
+    /** Stated standard uncertainty of the temperature of point i, K. */
+    double kelvinUncertainty(int i) {
+        return kelvinStated[i];
+    }
+
+    /** Stated relative standard uncertainty of k of point i alone, without that of its temperature. */
+    double statedUncertainty(int i) {
+        return stated[i];
+    }
+
+    /** The point as measured. */
+    RatePoint point(int i) {
+        return points.get(i);
     }
 
     /** The same as a common error would have shown them: temperatures and ln k displaced, {@code sign} +1 or -1. */
@@ -82,7 +179,7 @@ final class Measurements {
             shown[i] = cause.shifted(kelvin[i], sign);
             ln[i] = lnRate[i] + sign * cause.lnRateShift();
         }
-        return new Measurements(errorModel, shown, ln, relative);
+        return new Measurements(errorModel, response, points, shown, ln, stated, kelvinStated);
     }
 
     int size() {
@@ -95,7 +192,7 @@ final class Measurements {
 
     /** Whether the size of the errors is known, not estimated from the scatter. */
     boolean stated() {
-        return errorModel == ErrorModel.STATED;
+        return errorModel.isStated();
     }
 
     Response response() {
@@ -127,7 +224,7 @@ final class Measurements {
         return lnRate[i];
     }
 
-    /** Stated relative uncertainty of point i; 0 where none is stated. */
+    /** Stated relative uncertainty of point i, that of its temperature included; 0 where none is stated. */
     double relativeUncertainty(int i) {
         return relative.length == 0 ? 0 : relative[i];
     }
@@ -210,11 +307,20 @@ final class Measurements {
 
     /** Standard deviation in ln k of one more run as stated: the root mean square of the stated ones. */
     double typicalRelativeUncertainty() {
+        return rootMeanSquare(stated);
+    }
+
+    /** Standard uncertainty of the temperature of one more run: the root mean square of the stated ones, K; 0 for none. */
+    double typicalKelvinUncertainty() {
+        return rootMeanSquare(kelvinStated);
+    }
+
+    private static double rootMeanSquare(double[] values) {
         double sum = 0;
-        for (double u : relative) {
+        for (double u : values) {
             sum += u * u;
         }
-        return relative.length == 0 ? 0 : Math.sqrt(sum / relative.length);
+        return values.length == 0 ? 0 : Math.sqrt(sum / values.length);
     }
 
     private double weightOnLogarithm(int i) {

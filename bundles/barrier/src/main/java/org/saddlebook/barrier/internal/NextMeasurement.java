@@ -25,7 +25,6 @@ final class NextMeasurement {
     private final boolean onSameSensor;
     private final double[] temperatures;
     private final boolean equalCost;
-    private final double typicalWeight;
 
     /**
      * Where and at what cost one may measure.
@@ -50,8 +49,6 @@ final class NextMeasurement {
         for (int i = 0; i < temperatures.length; i++) {
             temperatures[i] = Math.min(from + i * STEP, to);
         }
-        double u = law.data().typicalRelativeUncertainty();
-        typicalWeight = law.data().stated() ? 1 / (u * u) : 1;
     }
 
     /** What is known about the parameters: the covariance of unit scale and the number of runs added so far. */
@@ -204,13 +201,16 @@ final class NextMeasurement {
 
     /** Weight of one run on ln k in the units of the fit. */
     private double weight(double kelvin) {
+        if (law.data().stated()) {
+            double u = law.newRun().onLogarithm(law.slope(kelvin)).orElseThrow();
+            return 1 / (u * u);
+        }
         if (law.data().response() == Measurements.Response.LN_RATE) {
-            return typicalWeight;
+            return 1;
         }
         // On k, in units of the first measured one, a run at T weighs (d k / d ln k)^2 = k^2 times its weight on k.
         double k = StrictMath.exp(law.lnRate(kelvin).value() - law.data().lnRate(0));
-        double u = law.data().typicalRelativeUncertainty();
-        return law.data().stated() ? 1 / (u * u) : k * k;
+        return k * k;
     }
 
     private double cost(double kelvin) {

@@ -6,6 +6,7 @@ import java.util.OptionalDouble;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.model.Parameter;
 import org.saddlebook.api.quantity.Unit;
+import org.saddlebook.barrier.api.NewRun;
 
 /**
  * Rows of {@code barrier.predictions}: k at a temperature with the interval of the mean and that of a new run. The
@@ -22,7 +23,8 @@ record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, dou
      * One row.
      *
      * @param lnRate ln k in SI with its variance
-     * @param newRunScatter standard deviation in ln k of one more run
+     * @param newRun how one more run would scatter
+     * @param slope d ln k/dT there, 1/K
      * @param degreesOfFreedom of the scale; empty for normal quantiles
      * @param assumedScatter whether the scatter of a new run is taken over from the stated uncertainties
      */
@@ -30,7 +32,8 @@ record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, dou
             double kelvin,
             String model,
             FittedLaw.Estimate lnRate,
-            OptionalDouble newRunScatter,
+            NewRun newRun,
+            double slope,
             OptionalDouble degreesOfFreedom,
             boolean assumedScatter) {
         double outside = Math.max(0, Math.max(lowestKelvin - kelvin, kelvin - highestKelvin));
@@ -51,17 +54,22 @@ record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, dou
                 .put("temperature", Node.Quantity.of(kelvin, "K"))
                 .put("model", model)
                 .put("k", quantities.of(lnRate, Parameter.Scale.LOG, rateUnit, cautions));
-        if (lnRate.variance().isPresent() && newRunScatter.isPresent()) {
-            double scatter = newRunScatter.getAsDouble();
-            FittedLaw.Estimate newRun = new FittedLaw.Estimate(
-                    lnRate.value(),
-                    OptionalDouble.of(lnRate.variance().getAsDouble() + scatter * scatter),
-                    lnRate.sharedVariance());
+        if (lnRate.variance().isPresent()) {
             List<String> more = new ArrayList<>(cautions);
             if (assumedScatter) {
                 more.add("new-run-as-stated");
             }
-            tree.put("kNewRun", quantities.of(newRun, Parameter.Scale.LOG, rateUnit, more));
+            OptionalDouble onLogarithm = newRun.onLogarithm(slope);
+            if (onLogarithm.isPresent()) {
+                double scatter = onLogarithm.getAsDouble();
+                FittedLaw.Estimate wider = new FittedLaw.Estimate(
+                        lnRate.value(),
+                        OptionalDouble.of(lnRate.variance().getAsDouble() + scatter * scatter),
+                        lnRate.sharedVariance());
+                tree.put("kNewRun", quantities.of(wider, Parameter.Scale.LOG, rateUnit, more));
+            } else if (newRun.rate().isPresent()) {
+                tree.put("kNewRun", quantities.newRun(lnRate, newRun.rate().getAsDouble(), rateUnit, more));
+            }
         }
         return tree.put("extrapolation", Node.Quantity.of(outside, "K")).group();
     }
@@ -71,7 +79,8 @@ record Predictions(Unit rateUnit, double lowestKelvin, double highestKelvin, dou
                 kelvin,
                 law.id(),
                 law.lnRate(kelvin, targetOnSameSensor),
-                law.newRunScatter(),
+                law.newRun(),
+                law.slope(kelvin),
                 law.degreesOfFreedom(),
                 law.data().stated());
     }

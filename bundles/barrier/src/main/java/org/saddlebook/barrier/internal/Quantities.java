@@ -53,6 +53,31 @@ record Quantities(double level, OptionalDouble degreesOfFreedom) {
                 cautions);
     }
 
+    /**
+     * What one more run would read when its error is an absolute one of k. On each side the half-width of the mean, on ln k,
+     * and that of the run, on k, are added in quadrature. A reading may be zero or less: the interval is then open below.
+     *
+     * @param lnRate ln k in SI with its variance, which is present
+     * @param deviation standard deviation of the run, SI
+     */
+    Node.Quantity newRun(FittedLaw.Estimate lnRate, double deviation, Unit unit, List<String> cautions) {
+        double k = StrictMath.exp(lnRate.value());
+        double half = lnRate.halfWidth(level, degreesOfFreedom);
+        double own = FittedLaw.quantile(level, degreesOfFreedom) * deviation;
+        double below = -k * StrictMath.expm1(-half);
+        double above = k * StrictMath.expm1(half);
+        double lower = (k - Math.sqrt(below * below + own * own)) / unit.factor();
+        double upper = (k + Math.sqrt(above * above + own * own)) / unit.factor();
+        double mean = k * lnRate.standardUncertainty();
+        double uncertainty = Math.sqrt(mean * mean + deviation * deviation) / unit.factor();
+        if (!Double.isFinite(uncertainty) || !Double.isFinite(upper)) {
+            return Node.Quantity.of(k / unit.factor(), unit.code()).withCautions(cautions);
+        }
+        return Node.Quantity.of(k / unit.factor(), unit.code(), uncertainty)
+                .withInterval(limits(lower, upper, method(lnRate)))
+                .withCautions(cautions);
+    }
+
     /** Limits beyond the range of a double leave that side open. */
     private Interval limits(double lower, double upper, String method) {
         boolean low = lower > 0 && Double.isFinite(lower);

@@ -71,7 +71,8 @@ record StoredLaws(FittedLaws laws) {
                         kelvin,
                         id,
                         new FittedLaw.Estimate(lnRate, variance, shared),
-                        law.newRunScatter(),
+                        law.newRun(),
+                        BothErrorsFitter.slope(function, kelvin, fitted.values()),
                         fitted.degreesOfFreedom(),
                         laws.stated());
     }

@@ -26,6 +26,7 @@ import org.saddlebook.api.quantity.Unit;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Task;
 import org.saddlebook.barrier.api.FittedLaws;
+import org.saddlebook.barrier.api.NewRun;
 import org.saddlebook.model.arrhenius.internal.Arrhenius;
 
 /**
@@ -59,7 +60,7 @@ public class WindowBenchmark {
                 covariance,
                 OptionalDouble.of(3));
         law = new BoundLaw(
-                new FittedLaws.FittedLawView("arrhenius", "Arrhenius", fitted, OptionalDouble.empty(), List.of()),
+                new FittedLaws.FittedLawView("arrhenius", "Arrhenius", fitted, NewRun.UNKNOWN, List.of()),
                 new Arrhenius().bind(context),
                 false);
         Thermo thermo = new Thermo(

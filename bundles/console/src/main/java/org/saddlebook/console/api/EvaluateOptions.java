@@ -23,7 +23,7 @@ import org.saddlebook.units.api.Units;
 public final class EvaluateOptions {
     /** The options, for the synopsis of a verb. */
     public static final String SYNOPSIS = "[--at T]... [--model ID]... [--standard STATE] [--seed N]"
-            + " [--errors constant-relative|stated|constant-absolute] [--level P]"
+            + " [--errors constant-relative|stated|stated-both|constant-absolute] [--level P]"
             + " [--read KEY=VALUE]...";
 
     /** What each means, for the help of a verb; lines of plain text. */
@@ -34,6 +34,7 @@ public final class EvaluateOptions {
             --seed N          seed of random numbers, 0 to 9007199254740991
             --errors MODEL    constant-relative: one relative error, estimated from the scatter
                               stated: the uncertainties in the table
+                              stated-both: also the uncertainties of the temperatures in the table
                               constant-absolute: one error of k itself, estimated from the scatter
             --level P         coverage probability of intervals, above 0.5 and below 1
             --read KEY=VALUE  settle how a table is read, such as decimal=comma, unit.T=degC or sheet=Rates;

@@ -49,6 +49,7 @@ final class BarrierSummary {
     private void table(Node table, Node.Group body) {
         String errors = switch (Nodes.text(body, "errorModel")) {
             case "stated" -> "uncertainties as stated";
+            case "stated-both" -> "uncertainties of k and T as stated";
             case "constant-absolute" -> "one absolute error, estimated from the scatter";
             default -> "one relative error, estimated from the scatter";
         };

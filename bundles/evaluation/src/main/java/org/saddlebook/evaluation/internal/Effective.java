@@ -66,19 +66,34 @@ final class Effective {
         List<RatePoint> used = table.used();
         Optional<RatePoint> without =
                 used.stream().filter(point -> point.rateUncertainty().isEmpty()).findFirst();
+        Optional<RatePoint> untempered = used.stream()
+                .filter(point -> point.kelvinUncertainty().isEmpty())
+                .findFirst();
         if (choices.errorModel().isEmpty()) {
-            return used.isEmpty() || without.isPresent() ? ErrorModel.CONSTANT_RELATIVE : ErrorModel.STATED;
+            return used.isEmpty() || without.isPresent()
+                    ? ErrorModel.CONSTANT_RELATIVE
+                    : untempered.isPresent() ? ErrorModel.STATED : ErrorModel.STATED_BOTH;
         }
-        if (choices.errorModel().get() == ErrorModel.STATED && without.isPresent()) {
-            problems.add(
-                    new Problem(
-                            "uncertainty-missing",
-                            new Place(title, without.get().asRead().line(), Optional.of("u(k)")),
-                            "a rate constant without a stated uncertainty",
-                            "u(k) for every used point, as the error model “stated” needs",
-                            "State u(k) for every row, exclude the row with a reason, or choose the error model constant-relative."));
+        ErrorModel asked = choices.errorModel().get();
+        if (asked.isStated() && without.isPresent()) {
+            problems.add(missing(title, without.get(), "u(k)", "a rate constant", asked));
         }
-        return choices.errorModel().get();
+        if (asked == ErrorModel.STATED_BOTH && untempered.isPresent()) {
+            problems.add(missing(title, untempered.get(), "u(T)", "a temperature", asked));
+        }
+        return asked;
+    }
+
+    private static Problem missing(String title, RatePoint point, String column, String what, ErrorModel asked) {
+        return new Problem(
+                "uncertainty-missing",
+                new Place(title, point.asRead().line(), Optional.of(column)),
+                what + " without a stated uncertainty",
+                column + " for every used point, as the error model “" + asked.key() + "” needs",
+                "State " + column + " for every row, exclude the row with a reason, or choose the error model "
+                        + (asked == ErrorModel.STATED_BOTH && column.equals("u(T)")
+                                ? "stated."
+                                : "constant-relative."));
     }
 
     /** Digits that do not depend on the Java version. */

@@ -142,7 +142,10 @@ final class ValueReader {
         try {
             return ErrorModel.of(directive.value());
         } catch (IllegalArgumentException e) {
-            throw wrong(directive, "one of constant-relative, stated, constant-absolute", "Choose one of these words.");
+            throw wrong(
+                    directive,
+                    "one of constant-relative, stated, stated-both, constant-absolute",
+                    "Choose one of these words.");
         }
     }
 

@@ -130,6 +130,9 @@ final class Measured {
             case STATED ->
                 "the stated standard uncertainties: weights (k/u)² on ln k, never rescaled, intervals with the"
                         + " normal quantile";
+            case STATED_BOTH ->
+                "the stated standard uncertainties of k and of the temperatures: weighted distance from the law,"
+                        + " never rescaled, intervals with the normal quantile";
             case CONSTANT_ABSOLUTE ->
                 "the same absolute error for every point, of a size estimated from the scatter: least squares on k"
                         + " itself, intervals with Student’s t";

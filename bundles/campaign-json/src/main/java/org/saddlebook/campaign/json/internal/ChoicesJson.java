@@ -172,7 +172,7 @@ final class ChoicesJson {
             try {
                 choices = choices.withErrorModel(ErrorModel.of(word));
             } catch (IllegalArgumentException e) {
-                throw errorModel.get().wrongValue("one of constant-relative, stated, constant-absolute");
+                throw errorModel.get().wrongValue("one of constant-relative, stated, stated-both, constant-absolute");
             }
         }
         return choices;

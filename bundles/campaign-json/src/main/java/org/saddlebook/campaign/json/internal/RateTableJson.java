@@ -24,8 +24,8 @@ import org.saddlebook.units.api.Units;
 final class RateTableJson {
     private static final List<String> TABLE_KEYS = List.of("statedUnit", "order", "units", "points");
     private static final List<String> UNIT_KEYS = List.of("temperature", "k");
-    private static final List<String> POINT_KEYS =
-            List.of("temperature", "k", "temperatureUncertainty", "kUncertainty", "label", "excluded", "asRead");
+    private static final List<String> POINT_KEYS = List.of(
+            "temperature", "k", "temperatureUncertainty", "kUncertainty", "label", "block", "excluded", "asRead");
     private static final List<String> AS_READ_KEYS = List.of("line", "temperature", "k");
 
     private RateTableJson() {}
@@ -59,6 +59,9 @@ final class RateTableJson {
         }
         if (!point.label().isEmpty()) {
             out.put("label", point.label());
+        }
+        if (!point.block().isEmpty()) {
+            out.put("block", point.block());
         }
         if (point.excluded().isPresent()) {
             out.put("excluded", point.excluded().get());
@@ -195,6 +198,7 @@ final class RateTableJson {
         at.onlyKeys(POINT_KEYS);
         Amounts.Amount temperature = Amounts.temperature(at.member("temperature"), plainTemperature);
         Optional<JsonCursor> label = at.optional("label");
+        Optional<JsonCursor> block = at.optional("block");
         Optional<JsonCursor> excluded = at.optional("excluded");
         Optional<JsonCursor> asRead = at.optional("asRead");
         return new RatePoint(
@@ -204,7 +208,8 @@ final class RateTableJson {
                 uncertainty(at, "kUncertainty", k, plainRate),
                 label.isPresent() ? label.get().text() : "",
                 excluded.isPresent() ? Optional.of(excluded.get().text()) : Optional.empty(),
-                asRead.isPresent() ? asRead(asRead.get()) : RatePoint.AsRead.NOT_READ);
+                asRead.isPresent() ? asRead(asRead.get()) : RatePoint.AsRead.NOT_READ)
+                .withBlock(block.isPresent() ? block.get().text() : "");
     }
 
     private static OptionalDouble uncertainty(JsonCursor at, String key, Amounts.Amount amount, Optional<Unit> plain)

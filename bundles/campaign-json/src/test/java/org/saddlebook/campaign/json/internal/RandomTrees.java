@@ -265,7 +265,8 @@ final class RandomTrees {
                         random.nextBoolean()
                                 ? RatePoint.AsRead.NOT_READ
                                 : new RatePoint.AsRead(
-                                        random.nextBoolean() ? OptionalInt.empty() : OptionalInt.of(7), "25", text())));
+                                        random.nextBoolean() ? OptionalInt.empty() : OptionalInt.of(7), "25", text()))
+                        .withBlock(random.nextBoolean() ? "" : text()));
             }
             return new RateTable(unit, Units.rateOrder(unit).orElseThrow(), points);
         } catch (UnitException e) {

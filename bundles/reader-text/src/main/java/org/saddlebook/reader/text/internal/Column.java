@@ -18,6 +18,6 @@ record Column(int index, String heading, Heading.Kind kind, Unit unit, Converter
     }
 
     boolean hasNumbers() {
-        return kind != Heading.Kind.LABEL && kind != Heading.Kind.EXCLUDED;
+        return kind != Heading.Kind.LABEL && kind != Heading.Kind.BLOCK && kind != Heading.Kind.EXCLUDED;
     }
 }

@@ -35,6 +35,7 @@ final class ColumnPlan {
         add(Kind.TEMPERATURE_UNCERTAINTY);
         addRateUncertainty();
         add(Kind.LABEL);
+        add(Kind.BLOCK);
         add(Kind.EXCLUDED);
         refuseTransformed();
         requireBoth();
@@ -266,7 +267,7 @@ final class ColumnPlan {
     }
 
     private static boolean isText(Kind kind) {
-        return kind == Kind.LABEL || kind == Kind.EXCLUDED;
+        return kind == Kind.LABEL || kind == Kind.BLOCK || kind == Kind.EXCLUDED;
     }
 
     private String heading(int index) {

@@ -17,6 +17,7 @@ record Heading(Kind kind, String unit, boolean certain) {
         RATE_UNCERTAINTY("u(k)", "standard uncertainty of the rate constant"),
         RELATIVE_RATE_UNCERTAINTY("u(k)/k", "relative standard uncertainty of the rate constant"),
         LABEL("label", "label of the run"),
+        BLOCK("block", "stock, batch or day of the run"),
         EXCLUDED("excluded", "reason for exclusion"),
         /** 1/T and its multiples. */
         RECIPROCAL_TEMPERATURE("1/T", "reciprocal temperature"),

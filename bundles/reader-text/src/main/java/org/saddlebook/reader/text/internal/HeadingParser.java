@@ -50,6 +50,10 @@ final class HeadingParser {
         new Name("k", Kind.RATE),
         new Name("label", Kind.LABEL),
         new Name("run", Kind.LABEL),
+        new Name("block", Kind.BLOCK),
+        new Name("batch", Kind.BLOCK),
+        new Name("stock", Kind.BLOCK),
+        new Name("day", Kind.BLOCK),
         new Name("excluded", Kind.EXCLUDED),
     };
 

@@ -60,6 +60,7 @@ final class PointReader {
             return null;
         }
         Column label = plan.column(Kind.LABEL);
+        Column block = plan.column(Kind.BLOCK);
         return new RatePoint(
                 kelvin,
                 si,
@@ -67,7 +68,8 @@ final class PointReader {
                 optional(rateUncertainty > 0 ? rateUncertainty : fromRelative),
                 label == null ? "" : row.cell(label),
                 excluded,
-                new RatePoint.AsRead(OptionalInt.of(row.line()), row.cell(temperature), row.cell(rate)));
+                new RatePoint.AsRead(OptionalInt.of(row.line()), row.cell(temperature), row.cell(rate)))
+                .withBlock(block == null ? "" : row.cell(block));
     }
 
     /** The number in a cell; null when there is none, which is then among the problems unless it may be absent. */

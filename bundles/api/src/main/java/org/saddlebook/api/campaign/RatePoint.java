@@ -114,7 +114,15 @@ public record RatePoint(
     /** The same with a stated standard uncertainty of the rate constant, SI. */
     public RatePoint withRateUncertainty(double uncertainty) {
         return new RatePoint(
-                kelvin, rate, kelvinUncertainty, OptionalDouble.of(uncertainty), label, excluded, asRead, conditions, block);
+                kelvin,
+                rate,
+                kelvinUncertainty,
+                OptionalDouble.of(uncertainty),
+                label,
+                excluded,
+                asRead,
+                conditions,
+                block);
     }
 
     /** The same, measured under these conditions. */
@@ -125,18 +133,35 @@ public record RatePoint(
     /** The same with a stated standard uncertainty of the temperature, K. */
     public RatePoint withKelvinUncertainty(double uncertainty) {
         return new RatePoint(
-                kelvin, rate, OptionalDouble.of(uncertainty), rateUncertainty, label, excluded, asRead, conditions, block);
+                kelvin,
+                rate,
+                OptionalDouble.of(uncertainty),
+                rateUncertainty,
+                label,
+                excluded,
+                asRead,
+                conditions,
+                block);
     }
 
     /** The same in this block. */
     public RatePoint withBlock(String name) {
-        return new RatePoint(kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, conditions, name);
+        return new RatePoint(
+                kelvin, rate, kelvinUncertainty, rateUncertainty, label, excluded, asRead, conditions, name);
     }
 
     /** The same, excluded for this reason. */
     public RatePoint exclude(String reason) {
         return new RatePoint(
-                kelvin, rate, kelvinUncertainty, rateUncertainty, label, Optional.of(reason), asRead, conditions, block);
+                kelvin,
+                rate,
+                kelvinUncertainty,
+                rateUncertainty,
+                label,
+                Optional.of(reason),
+                asRead,
+                conditions,
+                block);
     }
 
     /** The same, used again. */

@@ -202,13 +202,13 @@ final class RateTableJson {
         Optional<JsonCursor> excluded = at.optional("excluded");
         Optional<JsonCursor> asRead = at.optional("asRead");
         return new RatePoint(
-                temperature.si(),
-                k.si(),
-                uncertainty(at, "temperatureUncertainty", temperature, plainTemperature),
-                uncertainty(at, "kUncertainty", k, plainRate),
-                label.isPresent() ? label.get().text() : "",
-                excluded.isPresent() ? Optional.of(excluded.get().text()) : Optional.empty(),
-                asRead.isPresent() ? asRead(asRead.get()) : RatePoint.AsRead.NOT_READ)
+                        temperature.si(),
+                        k.si(),
+                        uncertainty(at, "temperatureUncertainty", temperature, plainTemperature),
+                        uncertainty(at, "kUncertainty", k, plainRate),
+                        label.isPresent() ? label.get().text() : "",
+                        excluded.isPresent() ? Optional.of(excluded.get().text()) : Optional.empty(),
+                        asRead.isPresent() ? asRead(asRead.get()) : RatePoint.AsRead.NOT_READ)
                 .withBlock(block.isPresent() ? block.get().text() : "");
     }
 

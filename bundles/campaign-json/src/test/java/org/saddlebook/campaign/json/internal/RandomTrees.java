@@ -256,16 +256,18 @@ final class RandomTrees {
             List<RatePoint> points = new ArrayList<>();
             for (int i = 1 + random.nextInt(4); i > 0; i--) {
                 points.add(new RatePoint(
-                        positive(),
-                        positive(),
-                        random.nextBoolean() ? OptionalDouble.empty() : OptionalDouble.of(positive()),
-                        random.nextBoolean() ? OptionalDouble.empty() : OptionalDouble.of(positive()),
-                        text(),
-                        random.nextBoolean() ? Optional.empty() : Optional.of(text()),
-                        random.nextBoolean()
-                                ? RatePoint.AsRead.NOT_READ
-                                : new RatePoint.AsRead(
-                                        random.nextBoolean() ? OptionalInt.empty() : OptionalInt.of(7), "25", text()))
+                                positive(),
+                                positive(),
+                                random.nextBoolean() ? OptionalDouble.empty() : OptionalDouble.of(positive()),
+                                random.nextBoolean() ? OptionalDouble.empty() : OptionalDouble.of(positive()),
+                                text(),
+                                random.nextBoolean() ? Optional.empty() : Optional.of(text()),
+                                random.nextBoolean()
+                                        ? RatePoint.AsRead.NOT_READ
+                                        : new RatePoint.AsRead(
+                                                random.nextBoolean() ? OptionalInt.empty() : OptionalInt.of(7),
+                                                "25",
+                                                text()))
                         .withBlock(random.nextBoolean() ? "" : text()));
             }
             return new RateTable(unit, Units.rateOrder(unit).orElseThrow(), points);

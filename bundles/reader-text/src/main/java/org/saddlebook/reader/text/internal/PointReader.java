@@ -62,13 +62,13 @@ final class PointReader {
         Column label = plan.column(Kind.LABEL);
         Column block = plan.column(Kind.BLOCK);
         return new RatePoint(
-                kelvin,
-                si,
-                optional(kelvinUncertainty),
-                optional(rateUncertainty > 0 ? rateUncertainty : fromRelative),
-                label == null ? "" : row.cell(label),
-                excluded,
-                new RatePoint.AsRead(OptionalInt.of(row.line()), row.cell(temperature), row.cell(rate)))
+                        kelvin,
+                        si,
+                        optional(kelvinUncertainty),
+                        optional(rateUncertainty > 0 ? rateUncertainty : fromRelative),
+                        label == null ? "" : row.cell(label),
+                        excluded,
+                        new RatePoint.AsRead(OptionalInt.of(row.line()), row.cell(temperature), row.cell(rate)))
                 .withBlock(block == null ? "" : row.cell(block));
     }
 

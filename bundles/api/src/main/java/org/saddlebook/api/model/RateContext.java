@@ -65,6 +65,15 @@ public final class RateContext {
                 Optional.empty());
     }
 
+    /** The same with rate constants shown in another unit of the same dimension. */
+    public RateContext withRateUnit(Unit unit) {
+        if (!unit.dimension().equals(rateUnit.dimension())) {
+            throw new IllegalArgumentException(unit.code() + " is not of the dimension of " + rateUnit.code());
+        }
+        return new RateContext(
+                unit, order, standard, transmission, referenceKelvin, fixed, conditions, tunnelling, transmissionLaw);
+    }
+
     /** The same with this standard state. */
     public RateContext withStandard(StandardState newStandard) {
         return new RateContext(

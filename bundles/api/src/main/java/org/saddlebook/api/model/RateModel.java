@@ -25,6 +25,14 @@ public interface RateModel {
     RateFunction bind(RateContext context) throws Inapplicable;
 
     /**
+     * The context with whatever the law holds unless somebody decided otherwise; the engine binds to this one and states
+     * what is held. A law all of whose parameters a common campaign determines need not override it.
+     */
+    default RateContext completed(RateContext context) {
+        return context;
+    }
+
+    /**
      * Names of the conditions that the law depends on beside the temperature, such as {@link Conditions#THIRD_BODY}. A
      * table that does not state them makes the engine refuse the law; its function takes them through {@link
      * RateFunction#lnRate(double, Conditions, double[], double[])}.

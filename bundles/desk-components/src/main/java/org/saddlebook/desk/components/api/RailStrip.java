@@ -1,0 +1,84 @@
+package org.saddlebook.desk.components.api;
+
+import java.awt.Dimension;
+import java.awt.Graphics;
+import java.awt.Graphics2D;
+import java.awt.RenderingHints;
+import javax.accessibility.AccessibleContext;
+import javax.accessibility.AccessibleRole;
+import javax.swing.JComponent;
+import org.saddlebook.desk.api.DeskContext;
+import org.saddlebook.desk.api.Ink;
+import org.saddlebook.desk.api.TemperatureScale;
+
+/** Marks of a folded stratum, each at its temperature on the rail. */
+public final class RailStrip extends JComponent {
+    private static final long serialVersionUID = 1L;
+
+    /** Draws the marks. */
+    @FunctionalInterface
+    public interface Painter {
+        /**
+         * Draws.
+         *
+         * @param g smoothed, clipped to the strip
+         * @param scale where temperatures lie in the strip
+         * @param ink colours
+         * @param width of the strip, points
+         * @param height of the strip, points
+         */
+        void paint(Graphics2D g, TemperatureScale scale, Ink ink, int width, int height);
+    }
+
+    private final transient DeskContext context;
+    private final transient Painter painter;
+
+    /**
+     * A strip.
+     *
+     * @param name accessible name; what the marks are
+     * @param height preferred height, points
+     */
+    public RailStrip(String name, int height, DeskContext context, Painter painter) {
+        this.context = context;
+        this.painter = painter;
+        setFocusable(false);
+        setOpaque(false);
+        setPreferredSize(new Dimension(100, height));
+        getAccessibleContext().setAccessibleName(name);
+        context.onScale(this::repaint);
+    }
+
+    @Override
+    protected void paintComponent(Graphics graphics) {
+        if (getWidth() <= 0 || !isShowing()) {
+            return;
+        }
+        Graphics2D g = (Graphics2D) graphics.create();
+        try {
+            g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+            g.setRenderingHint(RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
+            g.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
+            painter.paint(g, context.scale(this), context.ink(), getWidth(), getHeight());
+        } finally {
+            g.dispose();
+        }
+    }
+
+    @Override
+    public AccessibleContext getAccessibleContext() {
+        if (accessibleContext == null) {
+            accessibleContext = new AccessibleStrip();
+        }
+        return accessibleContext;
+    }
+
+    private final class AccessibleStrip extends AccessibleJComponent {
+        private static final long serialVersionUID = 1L;
+
+        @Override
+        public AccessibleRole getAccessibleRole() {
+            return AccessibleRole.CANVAS;
+        }
+    }
+}

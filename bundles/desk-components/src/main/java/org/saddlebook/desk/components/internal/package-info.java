@@ -1,0 +1,2 @@
+/** Components of the desk as services. */
+package org.saddlebook.desk.components.internal;

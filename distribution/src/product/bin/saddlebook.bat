@@ -20,7 +20,8 @@ if not defined version set "version=17"
 for /f "tokens=1 delims=." %%F in ("%version%") do set "feature=%%F"
 if %feature% LSS 17 goto no_java
 
-set "options=-XX:TieredStopAtLevel=1 -XX:Tier3InvocationThreshold=1000 -XX:Tier3MinInvocationThreshold=500 -XX:Tier3CompileThreshold=5000 -XX:+UseSerialGC -XX:-UsePerfData -Xss1m -Xlog:disable -Xlog:all=off -Djava.awt.headless=true"
+set "options=-XX:TieredStopAtLevel=1 -XX:Tier3InvocationThreshold=1000 -XX:Tier3MinInvocationThreshold=500 -XX:Tier3CompileThreshold=5000 -XX:+UseSerialGC -XX:-UsePerfData -Xss1m -Xlog:disable -Xlog:all=off"
+if /i not "%~1"=="desk" set "options=%options% -Djava.awt.headless=true"
 if %feature% GEQ 24 set "options=%options% --enable-native-access=ALL-UNNAMED --sun-misc-unsafe-memory-access=allow"
 
 set "lib=%product%\lib"

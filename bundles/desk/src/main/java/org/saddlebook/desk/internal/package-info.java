@@ -1,0 +1,2 @@
+/** The shell; nothing here is for others. */
+package org.saddlebook.desk.internal;

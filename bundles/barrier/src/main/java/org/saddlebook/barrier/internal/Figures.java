@@ -12,7 +12,10 @@ import org.saddlebook.api.findings.Node;
 import org.saddlebook.barrier.api.NewRun;
 import org.saddlebook.presentation.api.UnitText;
 
-/** The figures of the section: ln k with the laws, and the residuals of the law that carries the bands. */
+/**
+ * The figures of the section: ln k and ln(k/T) with the laws, the joint region and the residuals of the law that carries
+ * the bands.
+ */
 final class Figures {
     private static final int GRID = 41;
 
@@ -31,13 +34,19 @@ final class Figures {
     }
 
     /**
-     * Both figures.
+     * The figures.
      *
      * @param laws fitted laws
      * @param shown the law whose bands, predictions and residuals are drawn
      */
     Node.Items of(List<FittedLaw> laws, FittedLaw shown) {
-        return new Node.Items(List.of(rates(laws, shown), residuals(shown)));
+        Node.Figure rates = rates(laws, shown);
+        List<Node> figures = new ArrayList<>();
+        figures.add(rates);
+        figures.add(residuals(shown));
+        figures.add(SideFigures.overTemperature(rates, table.rateUnit().code()));
+        SideFigures.jointRegion(shown, level).ifPresent(figures::add);
+        return new Node.Items(figures);
     }
 
     private Node.Figure rates(List<FittedLaw> laws, FittedLaw shown) {

@@ -34,10 +34,16 @@ enum Statement {
     TOLERANCE,
     MEASURE_FROM,
     MEASURE_TO,
-    RUN_COST;
+    RUN_COST,
+    REFERENCE,
+    VISCOSITY,
+    MEDIUM,
+    COLLISION_DIAMETER,
+    REDUCED_MASS;
 
     private static final String SPONTANEITY = "spontaneity";
     private static final String BARRIER = "barrier";
+    private static final String DATA_CHECKS = "dataChecks";
 
     /** Words of their own that only look like one of ours. */
     private static final List<String> UNRELATED = List.of("dg", "\u03b4g", "\u2206g", "delta g", "ph");
@@ -69,6 +75,11 @@ enum Statement {
             case MEASURE_FROM -> List.of("measure from");
             case MEASURE_TO -> List.of("measure to");
             case RUN_COST -> List.of("run cost");
+            case REFERENCE -> List.of("reference");
+            case VISCOSITY -> List.of("viscosity");
+            case MEDIUM -> List.of("medium");
+            case COLLISION_DIAMETER -> List.of("collision diameter");
+            case REDUCED_MASS -> List.of("reduced mass");
         };
     }
 
@@ -151,6 +162,14 @@ enum Statement {
             case MEASURE_TO -> Settings.put(campaign, BARRIER, "measureTo", kelvin(directive));
             case RUN_COST ->
                 Settings.put(campaign, BARRIER, "runCost", ValueReader.word(directive, List.of("half-life", "equal")));
+            case REFERENCE ->
+                Settings.put(campaign, DATA_CHECKS, "reference", ReferenceReader.read(directive, campaign));
+            case VISCOSITY -> Settings.put(campaign, DATA_CHECKS, "viscosity", ValueReader.viscosity(directive));
+            case MEDIUM ->
+                Settings.put(campaign, DATA_CHECKS, "medium", ValueReader.word(directive, List.of("solution", "gas")));
+            case COLLISION_DIAMETER ->
+                Settings.put(campaign, DATA_CHECKS, "collisionDiameter", ValueReader.length(directive));
+            case REDUCED_MASS -> Settings.put(campaign, DATA_CHECKS, "reducedMass", ValueReader.molarMass(directive));
         };
     }
 

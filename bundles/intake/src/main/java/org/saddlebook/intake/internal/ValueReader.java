@@ -201,6 +201,27 @@ final class ValueReader {
         return new Node.Scalar(value);
     }
 
+    static Node viscosity(Directive directive) throws InputException {
+        return above(directive, new Dimension(1, -1, -1, 0, 0), "a dynamic viscosity", "0.89 mPa.s", "Pa.s");
+    }
+
+    static Node length(Directive directive) throws InputException {
+        return above(directive, new Dimension(0, 1, 0, 0, 0), "a length", "0.4 nm", "m");
+    }
+
+    static Node molarMass(Directive directive) throws InputException {
+        return above(directive, new Dimension(1, 0, 0, 0, -1), "a molar mass", "20 g/mol", "kg/mol");
+    }
+
+    private static Node above(Directive directive, Dimension dimension, String what, String example, String unit)
+            throws InputException {
+        Node.Quantity quantity = (Node.Quantity) quantity(directive, dimension, what, example, unit);
+        if (!(quantity.value().orElse(0) > 0)) {
+            throw wrong(directive, what + " above zero, for example " + example, "Correct the number.");
+        }
+        return quantity;
+    }
+
     private static Node quantity(Directive directive, Dimension dimension, String what, String example, String unit)
             throws InputException {
         Measured measured = measured(directive, dimension, what, example);

@@ -157,6 +157,59 @@ class TableImportTest {
     }
 
     @Test
+    void takesAReferenceToCompareWith() throws Exception {
+        Campaign campaign = campaign("""
+                # reference: Ea = 85.2 +- 1.1 kJ/mol, A = 1e13 1/s, from a notebook, page 12
+                # viscosity: 0.89 mPa.s
+                # medium: solution
+                # collision diameter: 0.4 nm
+                # reduced mass: 20 g/mol
+                """);
+        assertEquals(
+                new Node.Group(Map.of(
+                        "reference",
+                        new Node.Group(Map.of(
+                                "Ea", Node.Quantity.of(85.2, "kJ/mol", 1.1),
+                                "A", Node.Quantity.of(1e13, "1/s"),
+                                "source", new Node.Text("a notebook, page 12"))),
+                        "viscosity",
+                        Node.Quantity.of(0.00089, "Pa.s"),
+                        "medium",
+                        new Node.Text("solution"),
+                        "collisionDiameter",
+                        Node.Quantity.of(0.4e-9, "m"),
+                        "reducedMass",
+                        Node.Quantity.of(0.02, "kg/mol"))),
+                campaign.settings().get("dataChecks"));
+        assertEquals(
+                new Node.Group(Map.of(
+                        "reference",
+                        new Node.Group(
+                                Map.of("k", Node.Quantity.of(0.0012, "1/s"), "at", Node.Quantity.of(298.15, "K"))))),
+                campaign("# reference: k = 1.2e-3 1/s at 25 degC\n").settings().get("dataChecks"));
+    }
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "reference: Ea = 85.2 kJ/mol | wrong-reference",
+                "reference: Ea = 85.2 kJ/mol, A = 1e13 L/(mol.s) | wrong-dimension",
+                "reference: Ea = 85.2, A = 1e13 1/s | missing-unit",
+                "reference: Ea = 85.2 kJ/mol, Ea = 86 kJ/mol | wrong-reference",
+                "reference: Smith 2001 | wrong-reference",
+                "viscosity: 1 kJ/mol | wrong-dimension",
+                "viscosity: -1 mPa.s | wrong-value",
+                "medium: glass | wrong-value",
+            })
+    void refusesAReferenceThatCannotBeUsed(String statement, String code) throws IOException {
+        Path file = write(temp, "rates.csv", "# " + statement + "\n" + TABLE);
+        Problem problem = problem(file);
+        assertEquals(code, problem.code());
+        assertEquals(1, problem.place().line().orElseThrow());
+    }
+
+    @Test
     void takesACovarianceInItsUnit() throws Exception {
         Campaign campaign = campaign("# cov(dH, dS): 1.5 kJ.J/(mol2.K)\n# constant kind: elementary\n");
         assertEquals(

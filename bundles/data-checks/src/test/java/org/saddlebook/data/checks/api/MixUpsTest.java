@@ -26,7 +26,7 @@ class MixUpsTest {
         assertEquals(57.43, of("L/(mol.s)", 2, "unit-L/(mol.ms)").entropyShift(), 0.005);
         assertEquals(397.82, of("L/(mol.s)", 2, "unit-cm3/({molecule}.s)").entropyShift(), 0.005);
         assertEquals(-397.82, of("L/(mol.s)", 2, "twice-cm3/({molecule}.s)").entropyShift(), 0.005);
-        assertEquals(-340.39, of("cm3/({molecule}.s)", 2, "unit-m3/(mol.s)").entropyShift(), 0.005);
+        assertEquals(-340.39, of("cm3/({molecule}.s)", 2, "unit-L/(mmol.s)").entropyShift(), 0.005);
     }
 
     @Test

@@ -92,12 +92,12 @@ public final class Choices {
         }
     }
 
-    /** Nothing decided: every installed model, no target, 1 mol/L assumed, level 0.95, seed 1. */
+    /** Nothing decided: every installed model that does not wait for a request, no target, 1 mol/L assumed, level 0.95, seed 1. */
     public static Choices defaults() {
         return DEFAULTS;
     }
 
-    /** Ids of the models asked for by name; empty for every installed one. */
+    /** Ids of the models asked for by name; empty for every installed one that does not wait for a request. */
     public List<String> models() {
         return models;
     }

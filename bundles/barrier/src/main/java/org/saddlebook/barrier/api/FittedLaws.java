@@ -4,11 +4,14 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.Supplier;
 import org.saddlebook.api.campaign.ErrorModel;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.model.FittedModel;
+import org.saddlebook.api.model.Inapplicable;
 import org.saddlebook.api.model.RateContext;
+import org.saddlebook.api.model.TunnellingModel;
 import org.saddlebook.api.quantity.Unit;
 import org.saddlebook.barrier.internal.ContextNode;
 import org.saddlebook.barrier.internal.TreeReader;
@@ -24,6 +27,7 @@ public final class FittedLaws {
     public static final String LOGARITHM = "ln ";
 
     private final RateContext context;
+    private final boolean conditionsAssumed;
     private final double lowestKelvin;
     private final double highestKelvin;
     private final double centreKelvin;
@@ -67,8 +71,11 @@ public final class FittedLaws {
         }
     }
 
-    private FittedLaws(Node.Group body) {
-        context = ContextNode.read(TreeReader.group(body, "context"));
+    private FittedLaws(Node.Group body, Supplier<List<TunnellingModel>> corrections) {
+        Node.Group surroundings = TreeReader.group(body, "context");
+        context = resolved(ContextNode.read(surroundings), corrections);
+        conditionsAssumed =
+                surroundings.get("conditionsAssumed").orElse(null) instanceof Node.Flag flag && flag.value();
         Node.Group table = TreeReader.group(body, "table");
         lowestKelvin = kelvin(table, "lowest");
         highestKelvin = kelvin(table, "highest");
@@ -100,10 +107,32 @@ public final class FittedLaws {
      * @throws IllegalArgumentException when the section is not one that the barrier analysis wrote, or was refused
      */
     public static FittedLaws of(Section barrier) {
+        return of(barrier, List::of);
+    }
+
+    /**
+     * The laws of a section, with stated tunnelling applied.
+     *
+     * @param corrections the installed tunnelling corrections, asked for only when the section states one; where the right
+     *     one is missing, laws of transition-state theory refuse to be bound
+     * @throws IllegalArgumentException as {@link #of(Section)}
+     */
+    public static FittedLaws of(Section barrier, Supplier<List<TunnellingModel>> corrections) {
         if (!(barrier.body() instanceof Node.Group group)) {
             throw new IllegalArgumentException("the section is no group");
         }
-        return new FittedLaws(group);
+        return new FittedLaws(group, corrections);
+    }
+
+    private static RateContext resolved(RateContext context, Supplier<List<TunnellingModel>> corrections) {
+        if (context.tunnelling().isEmpty()) {
+            return context;
+        }
+        try {
+            return TunnellingModel.resolve(context, corrections.get());
+        } catch (Inapplicable missing) {
+            return context;
+        }
     }
 
     /** Every fitted law, in order of the findings. */
@@ -134,6 +163,11 @@ public final class FittedLaws {
     /** The context every law was bound to, without held parameters. */
     public RateContext context() {
         return context;
+    }
+
+    /** Whether nobody stated the conditions of the context: a law that depends on them must not predict. */
+    public boolean conditionsAssumed() {
+        return conditionsAssumed;
     }
 
     /** Lowest measured temperature that was used, K. */

@@ -7,6 +7,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.function.Supplier;
 import org.osgi.framework.BundleContext;
 import org.osgi.framework.InvalidSyntaxException;
 import org.osgi.framework.ServiceReference;
@@ -19,6 +20,7 @@ import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.model.Inapplicable;
 import org.saddlebook.api.model.RateModel;
+import org.saddlebook.api.model.TunnellingModel;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.api.problem.Place;
 import org.saddlebook.api.problem.Problem;
@@ -60,16 +62,26 @@ public final class BarrierComponent implements Analysis, Prediction {
 
     @Override
     public Section analyse(Campaign campaign, Findings earlier, Task task) throws Cancelled {
-        return new BarrierEvaluation(campaign, installed(), task).section();
+        return new BarrierEvaluation(campaign, installed(), this::corrections, task).section();
     }
 
     @Override
     public List<Node> predict(Findings findings, List<Double> kelvin, List<String> models) throws InputException {
-        return predict(findings, kelvin, models, installed());
+        return predict(findings, kelvin, models, installed(), this::corrections);
     }
 
     static List<Node> predict(
             Findings findings, List<Double> kelvin, List<String> models, Map<String, InstalledModel> installed)
+            throws InputException {
+        return predict(findings, kelvin, models, installed, List::of);
+    }
+
+    private static List<Node> predict(
+            Findings findings,
+            List<Double> kelvin,
+            List<String> models,
+            Map<String, InstalledModel> installed,
+            Supplier<List<TunnellingModel>> corrections)
             throws InputException {
         Place place = Place.of(findings.campaignTitle());
         Section section = findings.section(BarrierEvaluation.SECTION)
@@ -80,7 +92,7 @@ public final class BarrierComponent implements Analysis, Prediction {
                         "findings of an evaluated rate table",
                         "Evaluate a campaign that has a rate table and predict from its findings.")));
         try {
-            StoredLaws laws = new StoredLaws(FittedLaws.of(section));
+            StoredLaws laws = new StoredLaws(FittedLaws.of(section, corrections));
             List<Node> rows = new ArrayList<>();
             for (String id : models.isEmpty() ? laws.ids() : models) {
                 if (!laws.ids().contains(id)) {
@@ -100,11 +112,27 @@ public final class BarrierComponent implements Analysis, Prediction {
                             "an installed model",
                             "Install the bundle that provides the model " + id + "."));
                 }
+                if (laws.laws().conditionsAssumed()
+                        && !model.model().conditions().isEmpty()) {
+                    throw new InputException(new Problem(
+                            "third-body-missing",
+                            place,
+                            "findings of " + id + " without a stated third body",
+                            "the third body that the prediction is to hold for",
+                            "Add a line such as \"# third body: 1 bar\" to the table and evaluate it again."));
+                }
                 for (double t : kelvin) {
                     rows.add(laws.predict(id, model.model(), t));
                 }
             }
             return rows;
+        } catch (StoredLaws.NoValue undefined) {
+            throw new InputException(new Problem(
+                    "no-value",
+                    place,
+                    String.valueOf(undefined.getMessage()),
+                    "a temperature at which the law is defined",
+                    "Choose another temperature, or name another model."));
         } catch (Inapplicable | RuntimeException unreadable) {
             throw new InputException(new Problem(
                     "unreadable-findings",
@@ -113,6 +141,25 @@ public final class BarrierComponent implements Analysis, Prediction {
                     "a section barrier as Saddlebook writes it",
                     "Evaluate the campaign again."));
         }
+    }
+
+    /** The installed tunnelling corrections. */
+    private List<TunnellingModel> corrections() {
+        List<ServiceReference<TunnellingModel>> references = new ArrayList<>();
+        try {
+            references.addAll(context.getServiceReferences(TunnellingModel.class, null));
+        } catch (InvalidSyntaxException impossible) {
+            throw new IllegalStateException("no filter, no syntax", impossible);
+        }
+        references.sort(Comparator.reverseOrder());
+        List<TunnellingModel> models = new ArrayList<>();
+        for (ServiceReference<TunnellingModel> reference : references) {
+            TunnellingModel model = context.getService(reference);
+            if (model != null) {
+                models.add(model);
+            }
+        }
+        return models;
     }
 
     /** The installed models by id; of equal ids the one of the highest rank, then the oldest, counts. */

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.Supplier;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.campaign.Choices;
 import org.saddlebook.api.campaign.RateTable;
@@ -15,6 +16,7 @@ import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.model.RateContext;
 import org.saddlebook.api.model.RateModel;
 import org.saddlebook.api.model.StandardState;
+import org.saddlebook.api.model.TunnellingModel;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Contained;
 import org.saddlebook.api.task.Task;
@@ -30,14 +32,26 @@ final class BarrierEvaluation {
     private final Map<String, InstalledModel> installed;
     private final Task task;
     private final Optional<Node> settings;
+    private final Supplier<List<TunnellingModel>> corrections;
+
+    /** An evaluation without tunnelling corrections. */
+    BarrierEvaluation(Campaign campaign, Map<String, InstalledModel> installed, Task task) {
+        this(campaign, installed, List::of, task);
+    }
 
     /**
      * An evaluation.
      *
      * @param campaign effective campaign with a rate table
      * @param installed model id to model
+     * @param corrections the installed tunnelling corrections, asked for only when tunnelling is stated
      */
-    BarrierEvaluation(Campaign campaign, Map<String, InstalledModel> installed, Task task) {
+    BarrierEvaluation(
+            Campaign campaign,
+            Map<String, InstalledModel> installed,
+            Supplier<List<TunnellingModel>> corrections,
+            Task task) {
+        this.corrections = corrections;
         this.choices = campaign.choices();
         this.table = campaign.rateTable().orElseThrow();
         this.installed = installed;
@@ -64,7 +78,13 @@ final class BarrierEvaluation {
             return Section.refused(SECTION, TITLE, String.valueOf(unusable.getMessage()));
         }
         Measurements data = Measurements.of(table, choices.errorModel().orElseThrow());
-        RateContext context = context();
+        Surroundings surroundings;
+        try {
+            surroundings = Surroundings.of(context(), settings, data, corrections);
+        } catch (IllegalArgumentException unusable) {
+            return Section.refused(SECTION, TITLE, String.valueOf(unusable.getMessage()));
+        }
+        RateContext context = surroundings.context();
         Plausibility plausibility = new Plausibility(context, choices, data, shared);
         double centre = data.centreKelvin();
         LawNode nodes = new LawNode(plausibility, table.rateUnit(), centre, choices.level());
@@ -80,7 +100,7 @@ final class BarrierEvaluation {
         List<Node> predicted = new ArrayList<>();
         List<String> notes = new ArrayList<>();
         for (String id : choices.models()) {
-            Computed computed = compute(id, context(id, context), data, shared, plausibility, nodes, predictions);
+            Computed computed = compute(id, surroundings, data, shared, plausibility, nodes, predictions);
             models.add(computed.node());
             predicted.addAll(computed.predictions());
             notes.addAll(computed.notes());
@@ -91,12 +111,17 @@ final class BarrierEvaluation {
         if (choices.models().isEmpty()) {
             notes.add("No rate model is installed. Install a feature such as model-eyring.");
         }
+        if (!surroundings.trouble().isEmpty()) {
+            notes.add(surroundings.trouble());
+        }
+        List<Double> shownAt = new ArrayList<>(List.of(centre));
+        shownAt.addAll(choices.targetsKelvin());
         Tree body = new Tree()
                 .put("errorModel", data.errorModel().key())
                 .put("response", data.response().text())
                 .put("level", choices.level())
                 .put("targets", shared.targetOnSameSensor() ? "same-sensor" : "true")
-                .put("context", ContextNode.of(context, choices.standard().isEmpty()))
+                .put("context", ContextNode.of(surroundings, choices.standard().isEmpty(), shownAt))
                 .put("table", table(data, centre))
                 .put("models", new Node.Items(models));
         Contained<Comparison> comparison = task.contain(
@@ -126,10 +151,13 @@ final class BarrierEvaluation {
                 String id = limits.carrying().get().id();
                 Contained<Node.Table> errorModels = task.contain(
                         "the comparison of error models",
-                        () -> new ErrorModelComparison(table, choices.level(), choices.targetsKelvin())
+                        () -> new ErrorModelComparison(
+                                        table,
+                                        choices.level(),
+                                        definedTargets(limits.carrying().get()))
                                 .of(
                                         installed.get(id).model(),
-                                        context(id, context),
+                                        installed.get(id).model().completed(context(id, context)),
                                         table.rateUnit(),
                                         new CancelCheck(task)));
                 if (errorModels instanceof Contained.Answer<Node.Table> compared) {
@@ -153,7 +181,7 @@ final class BarrierEvaluation {
 
     private Computed compute(
             String id,
-            RateContext context,
+            Surroundings surroundings,
             Measurements data,
             SharedErrors shared,
             Plausibility plausibility,
@@ -169,15 +197,32 @@ final class BarrierEvaluation {
                     "The model " + id + " is not installed; install the bundle that provides it."));
         }
         Contained<Computed> answer = task.contain(model.culprit(id), () -> {
+            String missing = Surroundings.missing(model.model(), data);
+            if (!missing.isEmpty()) {
+                return without(new LawOutcome.NotFitted(
+                        id, model.model().description().title(), LawOutcome.Kind.REFUSED, missing));
+            }
+            RateContext context = model.model().completed(context(id, surroundings.context()));
             LawOutcome outcome = fit(model.model(), context, data, shared.causes(context.order()));
             if (!(outcome instanceof FittedLaw law)) {
-                return without((LawOutcome.NotFitted) outcome);
-            }
-            List<Node> rows = new ArrayList<>();
-            for (double kelvin : choices.targetsKelvin()) {
-                rows.add(predictions.row(kelvin, law));
+                LawOutcome.NotFitted missed = (LawOutcome.NotFitted) outcome;
+                boolean unresolved = context.tunnelling().isPresent()
+                        && context.transmissionLaw().isEmpty();
+                return without(
+                        missed.kind() == LawOutcome.Kind.REFUSED && unresolved
+                                ? new LawOutcome.NotFitted(
+                                        id,
+                                        missed.title(),
+                                        missed.kind(),
+                                        missed.reason() + " " + surroundings.trouble())
+                                : missed);
             }
             List<String> notes = new ArrayList<>();
+            List<Node> rows = rows(
+                    law, !model.model().conditions().isEmpty() && surroundings.thirdBodyAssumed(), predictions, notes);
+            for (String remark : law.law().remarks(law.fit().parameters())) {
+                notes.add(law.title() + ": " + remark);
+            }
             for (int i = 0; i < law.parameters().size(); i++) {
                 if (law.parameters().get(i).symbol().equals("dS")) {
                     notes.add(plausibility.hint(law, law.parameter(i), choices.level()));
@@ -195,6 +240,25 @@ final class BarrierEvaluation {
         }
         return without(new LawOutcome.NotFitted(
                 id, id, LawOutcome.Kind.FAILED, ((Contained.Broke<Computed>) answer).reason()));
+    }
+
+    /** Predictions at the targets; what is left out is said in a note. */
+    private List<Node> rows(FittedLaw law, boolean unstated, Predictions predictions, List<String> notes) {
+        List<Node> rows = new ArrayList<>();
+        for (double kelvin : choices.targetsKelvin()) {
+            if (unstated) {
+                notes.add(law.title() + ": no prediction, because the third body is not stated; add a line such as"
+                        + " \"# third body: 2.4e19 molecule cm-3\" or \"# third body: 1 bar\". Lines and derived quantities"
+                        + " are given at the geometric middle of the table.");
+                break;
+            }
+            if (law.defined(kelvin)) {
+                rows.add(predictions.row(kelvin, law));
+            } else {
+                notes.add(law.title() + " has no value at " + Words.kelvin(kelvin) + ".");
+            }
+        }
+        return rows;
     }
 
     private LawOutcome fit(RateModel model, RateContext context, Measurements data, List<SharedErrors.Cause> causes)
@@ -230,6 +294,16 @@ final class BarrierEvaluation {
             }
         }
         return own;
+    }
+
+    private List<Double> definedTargets(FittedLaw law) {
+        List<Double> defined = new ArrayList<>();
+        for (double kelvin : choices.targetsKelvin()) {
+            if (law.defined(kelvin)) {
+                defined.add(kelvin);
+            }
+        }
+        return defined;
     }
 
     private Node.Group table(Measurements data, double centre) {

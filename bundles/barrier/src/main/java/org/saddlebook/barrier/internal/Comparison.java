@@ -24,6 +24,7 @@ final class Comparison {
     private static final double NO_SUPPORT = 10;
 
     private final List<FittedLaw> laws;
+    private final List<FittedLaw> compared;
     private final double level;
     private final List<Double> targets;
     private final List<String> notes = new ArrayList<>();
@@ -37,8 +38,9 @@ final class Comparison {
         for (FittedLaw law : laws) {
             remaining.add(law.id());
         }
-        for (FittedLaw larger : laws) {
-            for (FittedLaw smaller : laws) {
+        compared = withoutTwins();
+        for (FittedLaw larger : compared) {
+            for (FittedLaw smaller : compared) {
                 OptionalDouble value = Containment.valueAt(smaller, larger);
                 if (value.isPresent()) {
                     judge(smaller, larger, value.getAsDouble());
@@ -46,6 +48,27 @@ final class Comparison {
             }
         }
         separateBySupport();
+    }
+
+    /** Laws that are one curve in other parameters are compared once: to tell them apart would be a matter of words. */
+    private List<FittedLaw> withoutTwins() {
+        List<FittedLaw> different = new ArrayList<>();
+        for (FittedLaw law : laws) {
+            FittedLaw twin = null;
+            for (FittedLaw earlier : different) {
+                if (Containment.sameCurve(earlier, law)) {
+                    twin = earlier;
+                }
+            }
+            if (twin == null) {
+                different.add(law);
+            } else {
+                remaining.remove(law.id());
+                notes.add(law.title() + " and " + twin.title()
+                        + " are the same curve in other parameters; the comparison goes on with " + twin.title() + ".");
+            }
+        }
+        return different;
     }
 
     /** Ids of the laws that cannot be told apart; one when there is a decision. */
@@ -84,6 +107,11 @@ final class Comparison {
             notes.add(pair + "no degree of freedom is left to judge " + symbol + ".");
             return;
         }
+        if (estimate.variance().getAsDouble() == 0) {
+            notes.add(pair + symbol + " ended at its bound, so the data give no sign of what " + larger.title()
+                    + " has beyond " + smaller.title() + ".");
+            return;
+        }
         double halfWidth =
                 larger.quantile(level) * Math.sqrt(estimate.variance().getAsDouble());
         // The printed value is where the laws coincide up to rounding of a fit to a fit.
@@ -108,6 +136,9 @@ final class Comparison {
             notes.add(pair + "no curvature inside " + interval.substring(0, interval.length() - 1)
                     + ", would move k at the targets by more than " + Rounding.percent(TOLERANCE)
                     + "; " + smaller.title() + " suffices there.");
+        } else if (Double.isInfinite(largest)) {
+            notes.add(pair + interval + " includes " + Rounding.shortest(shown)
+                    + ", where the two laws coincide, but at a target one of them has no value.");
         } else {
             notes.add(pair + interval + " includes " + Rounding.shortest(shown)
                     + ", where the two laws coincide, but also curvature that would move k at a target by a factor of up"
@@ -116,8 +147,8 @@ final class Comparison {
     }
 
     private void separateBySupport() {
-        for (FittedLaw better : laws) {
-            for (FittedLaw worse : laws) {
+        for (FittedLaw better : compared) {
+            for (FittedLaw worse : compared) {
                 OptionalDouble one = new FitStatistics(better).aicc();
                 OptionalDouble other = new FitStatistics(worse).aicc();
                 // A criterion may speak for the law with more parameters, never for the one with fewer.
@@ -138,7 +169,7 @@ final class Comparison {
     private Map<String, Node> akaikeWeights() {
         Map<String, Double> criteria = new LinkedHashMap<>();
         double lowest = Double.POSITIVE_INFINITY;
-        for (FittedLaw law : laws) {
+        for (FittedLaw law : compared) {
             OptionalDouble aicc = new FitStatistics(law).aicc();
             if (aicc.isPresent()) {
                 criteria.put(law.id(), aicc.getAsDouble());

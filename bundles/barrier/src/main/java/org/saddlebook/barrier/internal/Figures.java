@@ -57,11 +57,16 @@ final class Figures {
             layers.add(band(Layer.Kind.CONFIDENCE_BAND, shown.title() + ", mean", shown, grid, false));
         }
         for (FittedLaw law : laws) {
+            double[] x = new double[grid.length];
             double[] y = new double[grid.length];
-            for (int i = 0; i < grid.length; i++) {
-                y[i] = law.lnRate(grid[i]).value() - lnUnit;
+            int count = 0;
+            for (double kelvin : grid) {
+                if (law.defined(kelvin)) {
+                    x[count] = kelvin;
+                    y[count++] = law.lnRate(kelvin).value() - lnUnit;
+                }
             }
-            layers.add(Layer.of(Layer.Kind.LINE, law.title(), grid, y));
+            layers.add(Layer.of(Layer.Kind.LINE, law.title(), Arrays.copyOf(x, count), Arrays.copyOf(y, count)));
         }
         layers.add(points(Layer.Kind.EXCLUDED, true));
         layers.add(points(Layer.Kind.MEASURED, false));
@@ -87,12 +92,13 @@ final class Figures {
 
     private Node.Figure residuals(FittedLaw law) {
         int n = data.size();
+        double[] p = law.fit().parameters();
         double[] x = data.kelvin();
         double[] y = new double[n];
         double[] low = new double[n];
         double[] high = new double[n];
         for (int i = 0; i < n; i++) {
-            y[i] = data.lnRate(i) - law.lnRate(x[i]).value();
+            y[i] = data.lnRate(i) - data.lnRate(law.law(), i, p, new double[p.length]);
             low[i] = y[i] - data.relativeUncertainty(i);
             high[i] = y[i] + data.relativeUncertainty(i);
         }

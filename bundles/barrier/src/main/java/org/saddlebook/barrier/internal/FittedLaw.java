@@ -103,6 +103,12 @@ record FittedLaw(String id, String title, RateFunction law, Fit fit, Measurement
         return estimate(fit.parameters()[i], row);
     }
 
+    /** Whether the law has a value at this temperature, K. */
+    boolean defined(double kelvin) {
+        double[] p = fit.parameters();
+        return law.defined(kelvin, p) && Double.isFinite(law.lnRate(kelvin, p, new double[p.length]));
+    }
+
     /** ln k in SI at a true temperature. */
     Estimate lnRate(double kelvin) {
         return lnRate(kelvin, false);

@@ -11,10 +11,11 @@ final class GradientCheck {
 
     private GradientCheck() {}
 
-    /** Empty when value and gradient agree at this temperature and these parameters, else a sentence. */
-    static String at(RateFunction law, double kelvin, double[] p) {
+    /** Empty when value and gradient agree at a measured point and these parameters, else a sentence. */
+    static String at(RateFunction law, Measurements data, int point, double[] p) {
+        double kelvin = data.kelvin(point);
         double[] gradient = new double[p.length];
-        double value = law.lnRate(kelvin, p.clone(), gradient);
+        double value = data.lnRate(law, point, p.clone(), gradient);
         String broken = LawFitter.notFinite(law, kelvin, value, gradient);
         if (!broken.isEmpty()) {
             return broken;
@@ -29,7 +30,7 @@ final class GradientCheck {
             double[] below = p.clone();
             above[j] += step;
             below[j] -= step;
-            double difference = law.lnRate(kelvin, above, unused) - law.lnRate(kelvin, below, unused);
+            double difference = data.lnRate(law, point, above, unused) - data.lnRate(law, point, below, unused);
             double expected = difference / (above[j] - below[j]);
             // What rounding of ln k alone can do to the difference.
             double noise = 8 * Math.ulp(Math.max(Math.abs(value), 1)) / step;
@@ -45,9 +46,10 @@ final class GradientCheck {
     }
 
     /** Empty when the gradient at p is the one at zero, as a law linear in its parameters must have it, else a sentence. */
-    static String straight(RateFunction law, double kelvin, double[] p, double[] atZero) {
+    static String straight(RateFunction law, Measurements data, int point, double[] p, double[] atZero) {
+        double kelvin = data.kelvin(point);
         double[] gradient = new double[p.length];
-        law.lnRate(kelvin, p.clone(), gradient);
+        data.lnRate(law, point, p.clone(), gradient);
         for (int j = 0; j < p.length; j++) {
             if (!(Math.abs(gradient[j] - atZero[j]) <= TOLERANCE * Math.abs(atZero[j]))) {
                 return "The law says that it is linear, but its derivative with respect to "

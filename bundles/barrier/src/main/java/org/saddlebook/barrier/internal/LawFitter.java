@@ -21,7 +21,8 @@ final class LawFitter {
      */
     static LawOutcome fit(RateModel model, RateContext context, Measurements data, Runnable check) {
         LawOutcome outcome = ordinary(model, context, data, check);
-        return data.uncertainTemperatures() && outcome instanceof FittedLaw fitted
+        // Orthogonal regression knows one abscissa: with more conditions the temperatures' errors stay in the weights.
+        return data.uncertainTemperatures() && model.conditions().isEmpty() && outcome instanceof FittedLaw fitted
                 ? BothErrorsFitter.fit(fitted, check)
                 : outcome;
     }
@@ -36,14 +37,16 @@ final class LawFitter {
             return new LawOutcome.NotFitted(id, title, LawOutcome.Kind.REFUSED, inapplicable.getMessage());
         }
         int p = law.parameters().size();
-        int distinct = data.distinctTemperatures();
+        boolean conditions = !model.conditions().isEmpty();
+        int distinct = conditions ? data.distinctPoints() : data.distinctTemperatures();
         if (distinct < p) {
             return new LawOutcome.NotFitted(
                     id,
                     title,
                     LawOutcome.Kind.UNDETERMINED,
                     "The law has " + p + " parameters (" + symbols(law.parameters()) + ") and needs as many different"
-                            + " temperatures; the table has " + distinct + ".");
+                            + (conditions ? " points; the table has " : " temperatures; the table has ") + distinct
+                            + ".");
         }
         if (law.linear() && data.response() == Measurements.Response.LN_RATE) {
             return linear(id, title, law, data);
@@ -57,7 +60,7 @@ final class LawFitter {
             }
             starts = List.of(fitted.fit().parameters());
         } else {
-            starts = law.starts(data.kelvin(), data.lnRate());
+            starts = law.starts(data.kelvin(), data.conditions(), data.lnRate());
         }
         return NonlinearFitter.fit(id, title, law, data, starts, check);
     }
@@ -84,7 +87,7 @@ final class LawFitter {
         double[] response = new double[n];
         double[] zero = new double[p];
         for (int i = 0; i < n; i++) {
-            double offset = law.lnRate(data.kelvin(i), zero.clone(), design[i]);
+            double offset = data.lnRate(law, i, zero.clone(), design[i]);
             String broken = notFinite(law, data.kelvin(i), offset, design[i]);
             if (!broken.isEmpty()) {
                 return new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, broken);
@@ -95,7 +98,7 @@ final class LawFitter {
                 .fold(
                         fit -> {
                             for (int i = 0; i < n; i++) {
-                                String bent = GradientCheck.straight(law, data.kelvin(i), fit.parameters(), design[i]);
+                                String bent = GradientCheck.straight(law, data, i, fit.parameters(), design[i]);
                                 if (!bent.isEmpty()) {
                                     return new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, bent);
                                 }
@@ -110,7 +113,7 @@ final class LawFitter {
     static LawOutcome checked(String id, String title, RateFunction law, Measurements data, Fit fit) {
         double[] p = fit.parameters();
         for (int i = 0; i < data.size(); i++) {
-            String broken = GradientCheck.at(law, data.kelvin(i), p);
+            String broken = GradientCheck.at(law, data, i, p);
             if (!broken.isEmpty()) {
                 return new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, broken);
             }

@@ -1,11 +1,15 @@
 package org.saddlebook.barrier.internal;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import java.util.TreeSet;
 import org.saddlebook.api.campaign.ErrorModel;
 import org.saddlebook.api.campaign.RatePoint;
 import org.saddlebook.api.campaign.RateTable;
+import org.saddlebook.api.model.Conditions;
+import org.saddlebook.api.model.RateFunction;
 
 /** The used points of a rate table with their weights, as flat arrays in order of the table. */
 final class Measurements {
@@ -184,6 +188,29 @@ final class Measurements {
 
     int size() {
         return kelvin.length;
+    }
+
+    /** What else each point was measured at. */
+    List<Conditions> conditions() {
+        List<Conditions> conditions = new ArrayList<>(points.size());
+        for (RatePoint point : points) {
+            conditions.add(point.conditions());
+        }
+        return conditions;
+    }
+
+    /** ln k of a law at the temperature and conditions of point i, with its gradient. */
+    double lnRate(RateFunction law, int i, double[] p, double[] gradient) {
+        return law.lnRate(kelvin[i], points.get(i).conditions(), p, gradient);
+    }
+
+    /** How many points differ in temperature or in another condition. */
+    int distinctPoints() {
+        Set<List<Object>> distinct = new HashSet<>();
+        for (int i = 0; i < kelvin.length; i++) {
+            distinct.add(List.of(kelvin[i], points.get(i).conditions()));
+        }
+        return distinct.size();
     }
 
     ErrorModel errorModel() {

@@ -1,10 +1,14 @@
 package org.saddlebook.barrier.internal;
 
+import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import org.saddlebook.api.model.Parameter;
 import org.saddlebook.api.model.RateFunction;
+import org.saddlebook.estimation.api.NonlinearFit;
 import org.saddlebook.estimation.api.NonlinearLeastSquares;
 import org.saddlebook.estimation.api.NonlinearOptions;
+import org.saddlebook.estimation.api.NonlinearOutcome;
 import org.saddlebook.estimation.api.ResponseFunction;
 
 /** Fits a law by search: a law that is not linear in its parameters, or any law to k itself. */
@@ -25,7 +29,34 @@ final class NonlinearFitter {
         for (int i = 0; i < n; i++) {
             response[i] = logarithm ? data.lnRate(i) : StrictMath.exp(data.lnRate(i) - unit);
         }
-        NonlinearOptions options = NonlinearOptions.defaults().withCheck(check);
+        NonlinearOptions options = options(law).withCheck(check);
+        ResponseFunction function = response(law, data, logarithm, unit);
+        NonlinearOutcome outcome = NonlinearLeastSquares.fit(function, response, data.weights(), starts, options);
+        if (outcome instanceof NonlinearFit found) {
+            double[] ordered = law.ordered(found.parameters());
+            if (!Arrays.equals(ordered, found.parameters())) {
+                // The same minimum with the parameters where the law promises them.
+                outcome = NonlinearLeastSquares.fit(function, response, data.weights(), List.of(ordered), options);
+            }
+        }
+        return outcome.fold(
+                fit -> LawFitter.checked(id, title, law, data, fit),
+                missed -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, missed.reason()),
+                deficient -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.UNDETERMINED, deficient.reason()));
+    }
+
+    /** A law fitted to a curve of ln k at the measured points, each counting alike; empty when the search does not end. */
+    static Optional<NonlinearFit> reproduce(
+            RateFunction law, Measurements data, double[] curve, List<double[]> starts) {
+        return !starts.isEmpty()
+                        && NonlinearLeastSquares.fit(response(law, data, true, 0), curve, null, starts, options(law))
+                                instanceof NonlinearFit fit
+                ? Optional.of(fit)
+                : Optional.empty();
+    }
+
+    private static NonlinearOptions options(RateFunction law) {
+        NonlinearOptions options = NonlinearOptions.defaults();
         List<Parameter> parameters = law.parameters();
         double[] lower = new double[parameters.size()];
         double[] upper = new double[parameters.size()];
@@ -38,13 +69,7 @@ final class NonlinearFitter {
         if (bounded) {
             options = options.withBounds(lower, upper);
         }
-        return NonlinearLeastSquares.fit(
-                        response(law, data, logarithm, unit), response, data.weights(), starts, options)
-                .fold(
-                        fit -> LawFitter.checked(id, title, law, data, fit),
-                        missed -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, missed.reason()),
-                        deficient ->
-                                new LawOutcome.NotFitted(id, title, LawOutcome.Kind.UNDETERMINED, deficient.reason()));
+        return options;
     }
 
     private static ResponseFunction response(RateFunction law, Measurements data, boolean logarithm, double unit) {
@@ -67,7 +92,7 @@ final class NonlinearFitter {
                         values[i] = Double.NaN;
                         continue;
                     }
-                    double ln = law.lnRate(kelvin, p, jacobian[i]);
+                    double ln = data.lnRate(law, i, p, jacobian[i]);
                     values[i] = logarithm ? ln : StrictMath.exp(ln - unit);
                     if (!logarithm) {
                         for (int j = 0; j < p.length; j++) {

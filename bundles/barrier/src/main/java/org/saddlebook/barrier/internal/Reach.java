@@ -54,7 +54,9 @@ final class Reach {
         if (law.isPresent()) {
             List<Node> budgets = new ArrayList<>();
             for (double kelvin : targets) {
-                budgets.add(budget(law.get(), kelvin));
+                if (law.get().defined(kelvin)) {
+                    budgets.add(budget(law.get(), kelvin));
+                }
             }
             if (!budgets.isEmpty()) {
                 tree.put("budgets", new Node.Items(budgets));
@@ -64,7 +66,9 @@ final class Reach {
                 NextMeasurement next = new NextMeasurement(law.get(), level, tolerance, onSameSensor, allowed);
                 List<Node> plans = new ArrayList<>();
                 for (double kelvin : targets) {
-                    plans.add(next.node(kelvin));
+                    if (law.get().defined(kelvin)) {
+                        plans.add(next.node(kelvin));
+                    }
                 }
                 tree.put("nextMeasurements", new Node.Items(plans));
             }
@@ -132,7 +136,7 @@ final class Reach {
         double lowest = Double.POSITIVE_INFINITY;
         double highest = Double.NEGATIVE_INFINITY;
         for (FittedLaw law : laws) {
-            if (candidates.contains(law.id())) {
+            if (candidates.contains(law.id()) && law.defined(kelvin)) {
                 double value = law.lnRate(kelvin).value();
                 lowest = Math.min(lowest, value);
                 highest = Math.max(highest, value);

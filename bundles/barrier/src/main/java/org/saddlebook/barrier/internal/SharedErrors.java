@@ -39,7 +39,9 @@ record SharedErrors(
             "tolerance",
             "measureFrom",
             "measureTo",
-            "runCost");
+            "runCost",
+            Surroundings.THIRD_BODY,
+            Surroundings.TUNNELLING);
 
     /**
      * One cause at one standard uncertainty.

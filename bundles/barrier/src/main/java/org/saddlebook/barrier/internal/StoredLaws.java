@@ -16,6 +16,15 @@ import org.saddlebook.barrier.api.FittedLaws;
  * @param laws the laws
  */
 record StoredLaws(FittedLaws laws) {
+    /** A law has no value at a temperature. */
+    static final class NoValue extends IllegalArgumentException {
+        private static final long serialVersionUID = 1L;
+
+        private NoValue(String message) {
+            super(message);
+        }
+    }
+
     /** Ids of the fitted laws, in order. */
     List<String> ids() {
         return laws.laws().stream().map(FittedLaws.FittedLawView::id).toList();
@@ -40,6 +49,9 @@ record StoredLaws(FittedLaws laws) {
         }
         double[] gradient = new double[symbols.size()];
         double lnRate = function.lnRate(kelvin, fitted.values(), gradient);
+        if (!function.defined(kelvin, fitted.values()) || !Double.isFinite(lnRate)) {
+            throw new NoValue(law.title() + " has no value at " + Words.kelvin(kelvin));
+        }
         double shared = 0;
         double along = 0;
         for (Node each : law.sharedErrors()) {

@@ -3,6 +3,7 @@ package org.saddlebook.evaluation.internal;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
 import java.util.TreeSet;
@@ -11,6 +12,7 @@ import org.saddlebook.api.campaign.Choices;
 import org.saddlebook.api.campaign.ErrorModel;
 import org.saddlebook.api.campaign.RatePoint;
 import org.saddlebook.api.campaign.RateTable;
+import org.saddlebook.api.model.RateModel;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.api.problem.Place;
 import org.saddlebook.api.problem.Problem;
@@ -22,9 +24,39 @@ final class Effective {
     /**
      * The effective campaign.
      *
-     * @param installed ids of the installed rate models
+     * @param installed ids of the installed rate models, all of which are fitted when none is asked for by name
      */
     static Campaign of(Campaign campaign, List<String> installed) throws InputException {
+        return of(campaign, installed, installed);
+    }
+
+    /**
+     * Ids of the models that are fitted when none is asked for by name: those that do not wait for a request and, of laws
+     * that depend on a condition, those whose conditions the table states with more than one value. A law that needs what
+     * no point states is not worth a refusal that nobody asked for.
+     */
+    static List<String> unasked(Campaign campaign, Collection<RateModel> installed) {
+        List<String> ids = new ArrayList<>();
+        for (RateModel model : installed) {
+            boolean fits = !model.onRequest();
+            for (String condition : model.conditions()) {
+                fits &= campaign.rateTable().isPresent()
+                        && campaign.rateTable().get().varies(condition);
+            }
+            if (fits) {
+                ids.add(model.id());
+            }
+        }
+        return ids;
+    }
+
+    /**
+     * The effective campaign.
+     *
+     * @param installed ids of the installed rate models
+     * @param unasked ids of those that are fitted when none is asked for by name
+     */
+    static Campaign of(Campaign campaign, List<String> installed, List<String> unasked) throws InputException {
         List<Problem> problems = new ArrayList<>();
         Choices choices = campaign.choices();
         TreeSet<String> known = new TreeSet<>(installed);
@@ -42,7 +74,7 @@ final class Effective {
             }
         }
         Choices resolved =
-                choices.withModels(List.copyOf(choices.models().isEmpty() ? known : new TreeSet<>(choices.models())));
+                choices.withModels(List.copyOf(new TreeSet<>(choices.models().isEmpty() ? unasked : choices.models())));
         if (campaign.rateTable().isPresent()) {
             RateTable table = campaign.rateTable().get();
             resolved = resolved.withErrorModel(errorModel(campaign.title(), choices, table, problems));

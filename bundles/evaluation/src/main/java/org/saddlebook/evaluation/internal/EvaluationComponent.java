@@ -1,6 +1,7 @@
 package org.saddlebook.evaluation.internal;
 
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -41,10 +42,11 @@ public final class EvaluationComponent implements Evaluation {
     @Override
     public Campaign effective(Campaign campaign) throws InputException {
         List<String> ids = new ArrayList<>();
-        for (RateModel model : services(RateModel.class).values()) {
+        Collection<RateModel> installed = services(RateModel.class).values();
+        for (RateModel model : installed) {
             ids.add(model.id());
         }
-        return Effective.of(campaign, ids);
+        return Effective.of(campaign, ids, Effective.unasked(campaign, installed));
     }
 
     @Override

@@ -4,9 +4,11 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.function.Supplier;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.model.RateFunction;
+import org.saddlebook.api.model.TunnellingModel;
 import org.saddlebook.api.quantity.Unit;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Contained;
@@ -31,13 +33,18 @@ record Fitted(List<BoundLaw> laws, double[] weights, Unit rateUnit, double lowes
      *
      * @throws Refusal when no law has a covariance or none can be bound
      */
-    static Fitted of(Section barrier, Map<String, InstalledModel> installed, Task task) throws Refusal, Cancelled {
+    static Fitted of(
+            Section barrier,
+            Map<String, InstalledModel> installed,
+            Supplier<List<TunnellingModel>> corrections,
+            Task task)
+            throws Refusal, Cancelled {
         if (barrier.outcome() != Section.Outcome.DONE) {
             throw new Refusal("The section barrier has no findings, and window needs its fitted laws.");
         }
         FittedLaws fitted;
         try {
-            fitted = FittedLaws.of(barrier);
+            fitted = FittedLaws.of(barrier, corrections);
         } catch (IllegalArgumentException unreadable) {
             throw new Refusal("The section barrier cannot be read: " + unreadable.getMessage() + ".");
         }
@@ -47,6 +54,11 @@ record Fitted(List<BoundLaw> laws, double[] weights, Unit rateUnit, double lowes
             InstalledModel model = installed.get(view.id());
             if (model == null) {
                 notes.add(view.title() + " is left out: its model is not installed.");
+                continue;
+            }
+            if (fitted.conditionsAssumed() && !model.model().conditions().isEmpty()) {
+                notes.add(view.title()
+                        + " is left out: it depends on the third body, and none is stated for the window.");
                 continue;
             }
             Contained<BoundLaw> bound = task.contain(model.culprit(), () -> {

@@ -17,6 +17,7 @@ import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.findings.Findings;
 import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.model.RateModel;
+import org.saddlebook.api.model.TunnellingModel;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Task;
 
@@ -53,7 +54,26 @@ public final class WindowComponent implements Analysis {
 
     @Override
     public Section analyse(Campaign campaign, Findings earlier, Task task) throws Cancelled {
-        return WindowEvaluation.section(campaign, earlier, installed(), task);
+        return WindowEvaluation.section(campaign, earlier, installed(), this::corrections, task);
+    }
+
+    /** The installed tunnelling corrections. */
+    private List<TunnellingModel> corrections() {
+        List<ServiceReference<TunnellingModel>> references = new ArrayList<>();
+        try {
+            references.addAll(context.getServiceReferences(TunnellingModel.class, null));
+        } catch (InvalidSyntaxException impossible) {
+            throw new IllegalStateException("no filter, no syntax", impossible);
+        }
+        references.sort(Comparator.reverseOrder());
+        List<TunnellingModel> models = new ArrayList<>();
+        for (ServiceReference<TunnellingModel> reference : references) {
+            TunnellingModel model = context.getService(reference);
+            if (model != null) {
+                models.add(model);
+            }
+        }
+        return models;
     }
 
     /** The installed models by id; of equal ids the one of the highest rank, then the oldest, counts. */

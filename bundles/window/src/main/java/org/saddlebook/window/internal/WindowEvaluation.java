@@ -5,10 +5,12 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeSet;
+import java.util.function.Supplier;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.findings.Findings;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
+import org.saddlebook.api.model.TunnellingModel;
 import org.saddlebook.api.quantity.Constants;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Task;
@@ -57,13 +59,24 @@ final class WindowEvaluation {
     /** The section; refused with a reason when what was stated cannot be evaluated. */
     static Section section(Campaign campaign, Findings earlier, Map<String, InstalledModel> installed, Task task)
             throws Cancelled {
+        return section(campaign, earlier, installed, List::of, task);
+    }
+
+    /** The same with the installed tunnelling corrections, asked for only when the barrier states one. */
+    static Section section(
+            Campaign campaign,
+            Findings earlier,
+            Map<String, InstalledModel> installed,
+            Supplier<List<TunnellingModel>> corrections,
+            Task task)
+            throws Cancelled {
         Node.Group body;
         try {
             Request request = RequestReader.read(campaign);
             Optional<Section> barrier = earlier.section("barrier");
             Optional<Fitted> fitted = Optional.empty();
             if (barrier.isPresent() && (request.needsBarrier() || request.law().isPresent())) {
-                fitted = Optional.of(Fitted.of(barrier.get(), installed, task));
+                fitted = Optional.of(Fitted.of(barrier.get(), installed, corrections, task));
             } else if (request.needsBarrier()) {
                 throw new Refusal("The settings of window need fitted rate constants; the campaign has no rate table.");
             }

@@ -28,6 +28,8 @@ import org.saddlebook.api.task.Task;
 import org.saddlebook.barrier.api.FittedLaws;
 import org.saddlebook.barrier.api.NewRun;
 import org.saddlebook.model.arrhenius.internal.Arrhenius;
+import org.saddlebook.spontaneity.api.EquilibriumExtent;
+import org.saddlebook.spontaneity.api.EquilibriumStart;
 
 /**
  * An operating window of 20,000 draws at 200 temperatures on one core: drawing, probability, ends, whole-interval
@@ -45,6 +47,9 @@ public class WindowBenchmark {
     private BoundLaw law;
     private Headroom irreversible;
     private Headroom reversible;
+    private Headroom equilibrium;
+    private Headroom course;
+    private Headroom reversibleCourse;
     private Task task;
 
     /** Binds a law of five invented points. */
@@ -75,6 +80,38 @@ public class WindowBenchmark {
                 Optional.of(thermo));
         reversible = new Headroom(
                 List.of(allowed, new Limit.Time("time", "time", "", 0.6, 36_000, back), clean), Optional.of(thermo));
+        EquilibriumStart start = new EquilibriumStart(
+                new EquilibriumExtent(
+                        List.of(
+                                new EquilibriumExtent.Member(-1, 1, EquilibriumExtent.Kind.SOLUTE),
+                                new EquilibriumExtent.Member(1, 0, EquilibriumExtent.Kind.SOLUTE),
+                                new EquilibriumExtent.Member(1, 0.1, EquilibriumExtent.Kind.SOLUTE)),
+                        0,
+                        1,
+                        2),
+                0);
+        equilibrium = new Headroom(
+                List.of(
+                        new Limit.Equilibrium("equilibrium", "equilibrium", "", 0.6),
+                        new Limit.Time("time", "time", "", 0.95, 36_000, RateLaw.FIRST),
+                        clean),
+                Optional.of(thermo),
+                Optional.of(start));
+        double hour = 3600;
+        Course batch = new Course(
+                new double[] {0, hour, 8 * hour, 10 * hour},
+                new double[] {293.15, 0, 0, 293.15},
+                new boolean[] {false, true, true, false},
+                false);
+        course = new Headroom(
+                List.of(
+                        allowed,
+                        new Limit.Time("time", "time", "", 0.95, 10 * hour, RateLaw.FIRST, Optional.of(batch)),
+                        clean),
+                Optional.of(thermo));
+        reversibleCourse = new Headroom(
+                List.of(allowed, new Limit.Time("time", "time", "", 0.6, 10 * hour, back, Optional.of(batch)), clean),
+                Optional.of(thermo));
         task = new OneCore();
     }
 
@@ -88,6 +125,24 @@ public class WindowBenchmark {
     @Benchmark
     public Object reversibleLaw() throws Cancelled {
         return window(reversible);
+    }
+
+    /** The equilibrium conversion from a stated start in place of ΔG. */
+    @Benchmark
+    public Object equilibriumConversion() throws Cancelled {
+        return window(equilibrium);
+    }
+
+    /** The rate integrated over a batch: heating, holding, cooling. */
+    @Benchmark
+    public Object courseOfTemperature() throws Cancelled {
+        return window(course);
+    }
+
+    /** A reversible reaction followed through the same batch. */
+    @Benchmark
+    public Object reversibleCourse() throws Cancelled {
+        return window(reversibleCourse);
     }
 
     private Object window(Headroom headroom) throws Cancelled {

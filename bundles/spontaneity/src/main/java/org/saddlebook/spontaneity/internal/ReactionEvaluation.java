@@ -76,7 +76,10 @@ final class ReactionEvaluation {
             composition(body);
         }
         if (request.settings().node("equilibrium").isPresent()) {
-            body.put("equilibrium", new Node.Items(equilibrium()));
+            List<String> cautions = new ArrayList<>(List.of("allowed-is-not-fast", SpontaneityCautions.IDEAL));
+            cautions.addAll(common);
+            EquilibriumReader.of(request.settings().node("equilibrium").get(), request.participants())
+                    .write(body, function, rows(), uncertain, cautions);
         }
         body.put("notes", new Node.Items(notes(found.roots(), found.open())));
         ReactionFigure figure = new ReactionFigure(function, quantile, uncertain);
@@ -188,18 +191,6 @@ final class ReactionEvaluation {
         ids.add("at-stated-composition");
         ids.addAll(common);
         return ids;
-    }
-
-    private List<Node> equilibrium() throws Refusal {
-        EquilibriumReader reader =
-                new EquilibriumReader(request.settings().node("equilibrium").orElseThrow(), request.participants());
-        List<String> cautions = new ArrayList<>(List.of("allowed-is-not-fast", SpontaneityCautions.IDEAL));
-        cautions.addAll(common);
-        List<Node> items = new ArrayList<>();
-        for (double kelvin : rows()) {
-            items.add(reader.row(function, kelvin, uncertain, cautions));
-        }
-        return items;
     }
 
     /** Crossovers where the composition is held. */

@@ -13,7 +13,7 @@ import org.saddlebook.thermo.data.api.TableSegment;
  * enthalpies and entropies are taken as independent and the same at every temperature:
  * {@code u²(ΔG) = Σ ν² (u²(ΔfH) + T² u²(S))} (JCGM 100:2008, 5.1.2).
  */
-final class ReactionFunction {
+final class ReactionFunction implements GibbsFunction {
     private final Piece[] pieces;
     private final double varianceOfEnthalpy;
     private final double varianceOfEntropy;
@@ -143,11 +143,13 @@ final class ReactionFunction {
         return piece.enthalpy(kelvin) - kelvin * (piece.entropy(kelvin) - entropyShift);
     }
 
-    double gibbs(double kelvin) {
+    @Override
+    public double gibbs(double kelvin) {
         return gibbs(piece(kelvin), kelvin);
     }
 
-    double enthalpy(double kelvin) {
+    @Override
+    public double enthalpy(double kelvin) {
         return piece(kelvin).enthalpy(kelvin);
     }
 
@@ -172,7 +174,8 @@ final class ReactionFunction {
         return varianceOfEnthalpy + kelvin * kelvin * varianceOfEntropy;
     }
 
-    double uncertaintyOfGibbs(double kelvin) {
+    @Override
+    public double uncertaintyOfGibbs(double kelvin) {
         return Math.sqrt(varianceOfGibbs(kelvin));
     }
 }

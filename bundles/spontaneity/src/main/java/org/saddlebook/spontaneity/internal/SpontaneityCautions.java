@@ -91,7 +91,8 @@ final class SpontaneityCautions {
         return ids;
     }
 
-    private static void addCommon(Stated stated, List<String> ids) {
+    /** Adds the cautions of every number that rests on these ΔH and ΔS. */
+    static void addCommon(Stated stated, List<String> ids) {
         ids.add("constant-heat-capacity");
         if (stated.standard().isEmpty()) {
             ids.add(NO_STANDARD_STATE);

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.findings.Axis;
@@ -64,11 +65,7 @@ final class SpontaneityEvaluation {
                     : settings instanceof Node.Group group
                                     && group.get("reaction").isPresent()
                             ? ofReaction(campaign, ReactionRequest.read(settings, sources))
-                            : new SpontaneityEvaluation(
-                                            campaign,
-                                            StatementReader.read(
-                                                    settings, campaign.choices().standard()))
-                                    .body();
+                            : ofStatement(campaign, settings);
         } catch (Refusal refusal) {
             return Section.refused(SECTION, TITLE, refusal.getMessage());
         }
@@ -77,15 +74,23 @@ final class SpontaneityEvaluation {
         return Section.done(SECTION, TITLE, body, cautions);
     }
 
+    private static Node.Group ofStatement(Campaign campaign, Node settings) throws Refusal {
+        Stated stated = StatementReader.read(settings, campaign.choices().standard());
+        SpontaneityEvaluation evaluation = new SpontaneityEvaluation(campaign, stated);
+        Node.Group body = evaluation.body();
+        Optional<Node> equilibrium = ((Node.Group) settings).get("equilibrium");
+        if (equilibrium.isEmpty()) {
+            return body;
+        }
+        Map<String, Node> members = new LinkedHashMap<>(body.members());
+        evaluation.equilibrium(members, EquilibriumReader.named(equilibrium.get(), stated.standard()));
+        return new Node.Group(members);
+    }
+
     /** With heat capacities where all are known; else with ΔH and ΔS at 298.15 K, and the caution that says so. */
     private static Node.Group ofReaction(Campaign campaign, ReactionRequest request) throws Refusal {
         if (request.heatCapacitiesKnown()) {
             return new ReactionEvaluation(campaign, request).body();
-        }
-        if (request.settings().node("equilibrium").isPresent()) {
-            throw new Refusal(
-                    "The composition at equilibrium needs the heat capacity of every species; choose another source,"
-                            + " or state Cp under species.");
         }
         Map<String, Node> members = new LinkedHashMap<>();
         members.put("reaction", new Node.Text(request.equation().text()));
@@ -98,17 +103,37 @@ final class SpontaneityEvaluation {
             Crossover there = Crossover.of(ConstantReaction.at(stated, lnQ), evaluation.quantile, evaluation.level);
             members.put("crossoversAtComposition", new Node.Items(evaluation.crossovers(there)));
         }
+        Optional<Node> equilibrium = request.settings().node("equilibrium");
+        if (equilibrium.isPresent()) {
+            evaluation.equilibrium(members, EquilibriumReader.of(equilibrium.get(), request.participants()));
+        }
         return new Node.Group(members);
+    }
+
+    private void equilibrium(Map<String, Node> body, EquilibriumReader reader) {
+        List<String> cautions = new ArrayList<>(List.of("allowed-is-not-fast", SpontaneityCautions.IDEAL));
+        SpontaneityCautions.addCommon(stated, cautions);
+        reader.write(
+                body,
+                GibbsFunction.of(stated),
+                temperatures.rows(campaign.choices().targetsKelvin()),
+                !stated.exact(),
+                cautions);
     }
 
     /** The straight line of van 't Hoff in the usual keys, and both fits beside them. */
     private static Node.Group ofTable(Campaign campaign, Node.Group settings) throws Refusal {
-        new SettingsReader(settings, "the settings of spontaneity with a table", List.of("equilibriumTable"));
+        new SettingsReader(
+                settings, "the settings of spontaneity with a table", List.of("equilibriumTable", "equilibrium"));
         TableEvaluation table = new TableEvaluation(
                 campaign, EquilibriumTable.read(settings.get("equilibriumTable").orElseThrow()));
-        Map<String, Node> members = new LinkedHashMap<>(
-                new SpontaneityEvaluation(campaign, table.stated()).body().members());
+        SpontaneityEvaluation line = new SpontaneityEvaluation(campaign, table.stated());
+        Map<String, Node> members = new LinkedHashMap<>(line.body().members());
         members.putAll(table.members());
+        if (settings.get("equilibrium").isPresent()) {
+            line.equilibrium(
+                    members, EquilibriumReader.named(settings.get("equilibrium").get(), Optional.of(table.standard())));
+        }
         return new Node.Group(members);
     }
 

@@ -12,8 +12,8 @@ import org.saddlebook.units.api.Units;
 
 /** Reads the campaign's settings of this section. Nothing is guessed: what is not understood is refused by name. */
 final class StatementReader {
-    private static final List<String> KEYS =
-            List.of("dH", "dS", "correlation", "covariance", "degreesOfFreedom", "range", "standardState");
+    private static final List<String> KEYS = List.of(
+            "dH", "dS", "correlation", "covariance", "degreesOfFreedom", "range", "standardState", "equilibrium");
 
     /** Far beyond every reaction, J/mol or J/(mol K); keeps the arithmetic away from overflow. */
     private static final double LARGEST = 1e12;

@@ -13,6 +13,8 @@ import org.saddlebook.api.model.StandardState;
 import org.saddlebook.api.quantity.Constants;
 import org.saddlebook.estimation.api.Normal;
 import org.saddlebook.estimation.api.StudentT;
+import org.saddlebook.units.api.UnitException;
+import org.saddlebook.units.api.Units;
 
 /** van 't Hoff and Clarke-Glew from an equilibrium table, and whether the data show a heat capacity of reaction. */
 final class TableEvaluation {
@@ -62,6 +64,19 @@ final class TableEvaluation {
     /** Says that a standard state was stated; its text, which may be a molality, is written by {@link #members}. */
     private StandardState marker() {
         return table.kind().equals("Kp") || table.converted() ? StandardState.ONE_BAR : StandardState.ONE_MOLAR;
+    }
+
+    /** The standard state of the constants, where amounts follow from it. */
+    StandardState standard() throws Refusal {
+        if (!table.kind().equals("Kp") && !table.kind().equals("Kc")) {
+            throw new Refusal("The composition at equilibrium needs a Kp or a Kc; " + table.kind()
+                    + " has another standard state.");
+        }
+        try {
+            return Units.standardState(table.standardState());
+        } catch (UnitException wrong) {
+            throw new Refusal("The standard state of the equilibrium table cannot be used: " + wrong.found() + ".");
+        }
     }
 
     private ClarkeGlew line() throws Refusal {

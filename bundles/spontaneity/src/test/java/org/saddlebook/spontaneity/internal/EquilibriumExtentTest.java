@@ -11,6 +11,7 @@ import java.util.SplittableRandom;
 import org.junit.jupiter.api.Test;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
+import org.saddlebook.spontaneity.api.EquilibriumExtent;
 
 /** Extents against closed forms and against the minimum of the Gibbs energy. */
 class EquilibriumExtentTest {

@@ -57,6 +57,16 @@ final class Chunk {
         }
     }
 
+    /** Deviations of ΔH and ΔS, {@code [which][draw]}. */
+    double[][] thermo() {
+        return thermo;
+    }
+
+    /** Deviations of the two parameters of a stated barrier, {@code [which][draw]}. */
+    double[][] stated(int barrier) {
+        return stated[barrier];
+    }
+
     int size() {
         return size;
     }
@@ -105,6 +115,10 @@ final class Chunk {
             double[] rates,
             boolean exact,
             double[] headroom) {
+        if (form.course() != null) {
+            form.course().headroom(this, form.stated(), exact, headroom);
+            return;
+        }
         if (form.reversible() != null) {
             reversible(form.reversible(), kelvin, lnRate, best.orElseThrow(), rates, exact, headroom);
             return;

@@ -108,7 +108,14 @@ final class Draws {
             double[] rates = new double[chunk.size()];
             double lnRate = rates(chunk, kelvin, rates);
             double[] part = new double[chunk.size()];
-            chunk.headroom(headroom.form(limit, kelvin, lnRate), kelvin, lnRate, headroom.thermo(), rates, true, part);
+            chunk.headroom(
+                    headroom.form(limit, kelvin, lnRate, chunk.law()),
+                    kelvin,
+                    lnRate,
+                    headroom.thermo(),
+                    rates,
+                    true,
+                    part);
             System.arraycopy(part, 0, all, from, part.length);
             from += part.length;
         }
@@ -156,7 +163,13 @@ final class Draws {
             Arrays.fill(least, walls.holds(kelvin[t]) ? Double.POSITIVE_INFINITY : -1);
             for (int i = 0; i < limits; i++) {
                 chunk.headroom(
-                        headroom.form(i, kelvin[t], lnRate), kelvin[t], lnRate, headroom.thermo(), rates, false, one);
+                        headroom.form(i, kelvin[t], lnRate, chunk.law()),
+                        kelvin[t],
+                        lnRate,
+                        headroom.thermo(),
+                        rates,
+                        false,
+                        one);
                 int failed = 0;
                 for (int d = 0; d < size; d++) {
                     // A headroom that is not a number counts as missed.

@@ -4,11 +4,13 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.saddlebook.api.quantity.Constants;
+import org.saddlebook.spontaneity.api.EquilibriumStart;
 
 /**
  * How far above its floor each limit is, in J/mol: {@code −ΔG}; {@code RT ln(t_limit/t)}, inverted for a hold time;
  * {@code RT ln} of the odds limit/actual for a share and for an equilibrium conversion. All but the reversible rate law are
- * linear in ln k, ΔH, ΔS and the two parameters of a stated barrier.
+ * linear in ln k, ΔH, ΔS and the two parameters of a stated barrier; of a course of temperature
+ * {@code RT ln(∫k dt / needed)}, which is not linear either.
  */
 final class Headroom {
     /**
@@ -22,6 +24,7 @@ final class Headroom {
      * @param ofEnergy d/d its energy
      * @param ofSecond d/d its second parameter
      * @param reversible the time of a reversible law, whose headroom is not linear; null for all others
+     * @param course what is integrated over a course of temperature, not linear either; null for all others
      */
     record Form(
             double base,
@@ -31,10 +34,24 @@ final class Headroom {
             int stated,
             double ofEnergy,
             double ofSecond,
-            ReversibleTime reversible) {}
+            ReversibleTime reversible,
+            CourseProgress course) {
+        Form(
+                double base,
+                double ofRate,
+                double ofEnthalpy,
+                double ofEntropy,
+                int stated,
+                double ofEnergy,
+                double ofSecond,
+                ReversibleTime reversible) {
+            this(base, ofRate, ofEnthalpy, ofEntropy, stated, ofEnergy, ofSecond, reversible, null);
+        }
+    }
 
     private final List<Limit> limits;
     private final Optional<Thermo> thermo;
+    private final Optional<EquilibriumStart> start;
     private final List<StatedBarrier> stated = new ArrayList<>();
     private final int[] statedIndex;
     private final ReversibleTime[] reversible;
@@ -45,8 +62,18 @@ final class Headroom {
      * @param limits limits without walls of the equipment, which have no headroom
      */
     Headroom(List<Limit> limits, Optional<Thermo> thermo) {
+        this(limits, thermo, Optional.empty());
+    }
+
+    /**
+     * Headroom of limits.
+     *
+     * @param start what is there at the start, for equilibrium conversions; empty for A ⇌ B from A alone
+     */
+    Headroom(List<Limit> limits, Optional<Thermo> thermo, Optional<EquilibriumStart> start) {
         this.limits = List.copyOf(limits);
         this.thermo = thermo;
+        this.start = start;
         statedIndex = new int[limits.size()];
         reversible = new ReversibleTime[limits.size()];
         for (int i = 0; i < statedIndex.length; i++) {
@@ -60,6 +87,13 @@ final class Headroom {
                 reversible[i] = new ReversibleTime(time.conversion(), time.seconds());
             }
         }
+    }
+
+    /** ln Q where the limiting reactant is converted so far, at the standard state of the section spontaneity. */
+    private double lnQuotient(double conversion) {
+        return start.isPresent()
+                ? start.get().extent().lnQAtConversion(conversion) - start.get().lnShift()
+                : StrictMath.log(conversion / (1 - conversion));
     }
 
     List<Limit> limits() {
@@ -78,18 +112,23 @@ final class Headroom {
      * The form of limit i.
      *
      * @param lnRate ln k of the fitted law at this temperature; unused by limits without it
+     * @param law the fitted law itself, for courses of temperature; empty where no limit needs one
      */
-    Form form(int i, double kelvin, double lnRate) {
+    Form form(int i, double kelvin, double lnRate, Optional<BoundLaw> law) {
         double thermal = Constants.GAS * kelvin;
         Limit limit = limits.get(i);
         int own = statedIndex[i];
+        if (limit.course().isPresent()) {
+            CourseProgress progress = CourseProgress.of(limit, kelvin, thermo);
+            double base = progress.best(law);
+            return new Form(base, 0, 0, 0, own, 0, 0, null, progress);
+        }
         if (limit instanceof Limit.Allowed allowed) {
             double base = -thermo.orElseThrow().gibbs(kelvin) - thermal * StrictMath.log(allowed.reactionQuotient());
             return new Form(base, 0, -1, kelvin, -1, 0, 0, null);
         }
         if (limit instanceof Limit.Equilibrium equilibrium) {
-            double x = equilibrium.conversion();
-            double base = -thermo.orElseThrow().gibbs(kelvin) - thermal * StrictMath.log(x / (1 - x));
+            double base = -thermo.orElseThrow().gibbs(kelvin) - thermal * lnQuotient(equilibrium.conversion());
             return new Form(base, 0, -1, kelvin, -1, 0, 0, null);
         }
         if (limit instanceof Limit.Time time) {

@@ -83,7 +83,10 @@ final class HeadroomFigure {
             double lnRate = findings.fitted().isPresent()
                     ? findings.fitted().get().laws().get(0).at(kelvin).lnRate()
                     : Double.NaN;
-            double best = findings.headroom().form(index, kelvin, lnRate).base() / 1000;
+            double best = findings.headroom()
+                            .form(index, kelvin, lnRate, findings.law())
+                            .base()
+                    / 1000;
             if (!(best >= DEEPEST && best <= HIGHEST)) {
                 continue;
             }

@@ -27,6 +27,11 @@ sealed interface Limit {
         return false;
     }
 
+    /** The course of temperature it is judged over; empty for a constant temperature. */
+    default Optional<Course> course() {
+        return Optional.empty();
+    }
+
     /** The stated barrier it uses, where it uses one. */
     default Optional<StatedBarrier> stated() {
         return Optional.empty();
@@ -50,7 +55,8 @@ sealed interface Limit {
     }
 
     /**
-     * Equilibrium conversion of A ⇌ B from A alone, ideal: {@code K/(1+K) ≥ x}.
+     * Equilibrium conversion of the limiting reactant, ideal, from the start that the section spontaneity states: it is at
+     * least x where {@code ln K ≥ ln Q(x)}. Without such a start of A ⇌ B from A alone: {@code K/(1+K) ≥ x}.
      *
      * @param conversion x, between 0 and 1
      */
@@ -70,10 +76,22 @@ sealed interface Limit {
      * Time to a conversion at most so long.
      *
      * @param conversion x, between 0 and 1
-     * @param seconds longest time, s
+     * @param seconds longest time, s; of a course its duration
+     * @param course the course of temperature after which the conversion must be reached; empty for a constant one
      */
-    record Time(String id, String title, String statement, double conversion, double seconds, RateLaw law)
+    record Time(
+            String id,
+            String title,
+            String statement,
+            double conversion,
+            double seconds,
+            RateLaw law,
+            Optional<Course> course)
             implements Limit {
+        Time(String id, String title, String statement, double conversion, double seconds, RateLaw law) {
+            this(id, title, statement, conversion, seconds, law, Optional.empty());
+        }
+
         @Override
         public String kind() {
             return "time";
@@ -119,6 +137,7 @@ sealed interface Limit {
      * @param seconds shortest time, s
      * @param law rate law of the loss, irreversible
      * @param barrier barrier of the loss; empty when the fitted reaction is the loss
+     * @param course the course of temperature after which no more may be lost; empty for a constant one
      */
     record Hold(
             String id,
@@ -127,7 +146,8 @@ sealed interface Limit {
             double conversion,
             double seconds,
             RateLaw law,
-            Optional<StatedBarrier> barrier)
+            Optional<StatedBarrier> barrier,
+            Optional<Course> course)
             implements Limit {
         @Override
         public String kind() {

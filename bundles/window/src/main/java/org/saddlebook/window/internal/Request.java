@@ -46,6 +46,15 @@ record Request(
         return Optional.empty();
     }
 
+    boolean asksForEquilibrium() {
+        for (Limit limit : limits) {
+            if (limit instanceof Limit.Equilibrium) {
+                return true;
+            }
+        }
+        return false;
+    }
+
     Limit.Equipment equipment() {
         double low = 0;
         double high = Double.POSITIVE_INFINITY;

@@ -21,8 +21,12 @@ final class RequestReader {
     private final BarrierReader barriers;
     private final Set<String> ids = new HashSet<>();
 
+    private final boolean startStated;
+
     private RequestReader(Reading settings, Campaign campaign) throws Refusal {
         this.settings = settings;
+        startStated = campaign.settings().get("spontaneity") instanceof Node.Group spontaneity
+                && spontaneity.get("equilibrium").isPresent();
         order = campaign.rateTable().isPresent()
                 ? OptionalDouble.of(campaign.rateTable().get().order())
                 : OptionalDouble.empty();
@@ -107,13 +111,17 @@ final class RequestReader {
         return new Limit.Equilibrium(
                 id("equilibrium"),
                 at.textOr("title", Words.percent(x) + " at equilibrium"),
-                "Equilibrium of A ⇌ B allows a conversion of at least " + Words.percent(x) + ".",
+                "Equilibrium " + (startStated ? "from the stated start" : "of A ⇌ B")
+                        + " allows a conversion of at least " + Words.percent(x) + ".",
                 x);
     }
 
     private Limit time(Reading at) throws Refusal {
-        at.only("kind", "title", "conversion", "within");
+        at.only("kind", "title", "conversion", "within", "course");
         double x = at.share("conversion", "the conversion to reach");
+        if (at.has("course")) {
+            return timeOfCourse(at, x);
+        }
         Reading.Stated within = at.time("within", "the longest time");
         RateLaw own = ownLaw(at);
         reach(own, x, at);
@@ -125,6 +133,25 @@ final class RequestReader {
                 x,
                 within.si(),
                 own);
+    }
+
+    private Limit timeOfCourse(Reading at, double x) throws Refusal {
+        if (at.has("within")) {
+            throw new Refusal("The " + at.place()
+                    + " has both within and a course, which lasts as long as it lasts; state" + " one of them.");
+        }
+        RateLaw own = ownLaw(at);
+        reach(own, x, at);
+        Course course = CourseReader.read(at, !own.irreversible());
+        return new Limit.Time(
+                id("time"),
+                at.textOr("title", Words.percent(x) + " after the course"),
+                "Conversion of " + Words.percent(x) + " at the end of the stated course of temperature ("
+                        + own.kind().word() + ").",
+                x,
+                course.duration(),
+                own,
+                Optional.of(course));
     }
 
     private Limit competing(Reading at) throws Refusal {
@@ -147,9 +174,12 @@ final class RequestReader {
     }
 
     private Limit hold(Reading at) throws Refusal {
-        at.only("kind", "title", "conversion", "atLeast", "barrier", "rateLaw");
+        at.only("kind", "title", "conversion", "atLeast", "barrier", "rateLaw", "course");
         double x = at.share("conversion", "the share lost at the specification limit");
-        Reading.Stated atLeast = at.time("atLeast", "the shortest time");
+        if (at.has("course") == at.has("atLeast")) {
+            throw new Refusal("The " + at.place()
+                    + " needs atLeast, the shortest time, or a course of temperature; state one" + " of them.");
+        }
         Optional<StatedBarrier> barrier = Optional.empty();
         RateLaw loss;
         if (at.has("barrier")) {
@@ -170,9 +200,30 @@ final class RequestReader {
             throw new Refusal("The " + at.place() + " cannot use a reversible rate law; state first, second or order.");
         }
         reach(loss, x, at);
+        if (at.has("course")) {
+            Course course = CourseReader.read(at, false);
+            String over = "less than " + Words.percent(x) + " lost over the course";
+            return new Limit.Hold(
+                    id("hold"),
+                    at.textOr("title", over),
+                    "Stays so: " + over + " of temperature.",
+                    x,
+                    course.duration(),
+                    loss,
+                    barrier,
+                    Optional.of(course));
+        }
+        Reading.Stated atLeast = at.time("atLeast", "the shortest time");
         String title = "less than " + Words.percent(x) + " lost in " + atLeast.text();
         return new Limit.Hold(
-                id("hold"), at.textOr("title", title), "Stays so: " + title + ".", x, atLeast.si(), loss, barrier);
+                id("hold"),
+                at.textOr("title", title),
+                "Stays so: " + title + ".",
+                x,
+                atLeast.si(),
+                loss,
+                barrier,
+                Optional.empty());
     }
 
     private Limit equipment(Reading at) throws Refusal {

@@ -14,6 +14,7 @@ import org.saddlebook.api.model.TunnellingModel;
 import org.saddlebook.api.quantity.Constants;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Task;
+import org.saddlebook.spontaneity.api.EquilibriumStart;
 
 /** The section of one campaign: limits, intervals with probability, practical predictions, headroom figure. */
 final class WindowEvaluation {
@@ -32,7 +33,12 @@ final class WindowEvaluation {
     private final Draws draws;
 
     private WindowEvaluation(
-            Campaign campaign, Request request, Optional<Fitted> fitted, Optional<Thermo> thermo, Task task)
+            Campaign campaign,
+            Request request,
+            Optional<Fitted> fitted,
+            Optional<Thermo> thermo,
+            Optional<EquilibriumStart> start,
+            Task task)
             throws Cancelled {
         this.campaign = campaign;
         this.request = request;
@@ -46,7 +52,7 @@ final class WindowEvaluation {
                 limits.add(limit);
             }
         }
-        headroom = new Headroom(limits, thermo);
+        headroom = new Headroom(limits, thermo, start);
         draws = Draws.make(
                 headroom,
                 request.equipment(),
@@ -91,7 +97,14 @@ final class WindowEvaluation {
             Optional<Thermo> thermo = needing.isPresent() || reversible
                     ? Optional.of(Thermo.of(spontaneity.orElseThrow()))
                     : Optional.empty();
-            body = new WindowEvaluation(campaign, request, fitted, thermo, task).body();
+            Optional<EquilibriumStart> start =
+                    spontaneity.isPresent() ? EquilibriumStart.of(spontaneity.get()) : Optional.empty();
+            if (start.isPresent() && !(start.get().extent().upper() > 0) && request.asksForEquilibrium()) {
+                throw new Refusal(
+                        "The limit on the equilibrium conversion has no reactant at the start; state amounts of the"
+                                + " reactants under equilibrium in the settings of spontaneity.");
+            }
+            body = new WindowEvaluation(campaign, request, fitted, thermo, start, task).body();
         } catch (Refusal refusal) {
             return Section.refused(SECTION, TITLE, refusal.getMessage());
         }

@@ -58,6 +58,11 @@ final class WindowFindings {
         return fitted;
     }
 
+    /** The preferred law, where there is one. */
+    Optional<BoundLaw> law() {
+        return fitted.isPresent() ? Optional.of(fitted.get().laws().get(0)) : Optional.empty();
+    }
+
     double level() {
         return level;
     }
@@ -199,7 +204,8 @@ final class WindowFindings {
     private double best(Limit limit, double kelvin) {
         double lnRate =
                 fitted.isPresent() ? fitted.get().laws().get(0).at(kelvin).lnRate() : Double.NaN;
-        return headroom.form(headroom.limits().indexOf(limit), kelvin, lnRate).base();
+        return headroom.form(headroom.limits().indexOf(limit), kelvin, lnRate, law())
+                .base();
     }
 
     /** By which factor the limit is eased; its headroom grows by RT times the logarithm. */
@@ -217,8 +223,8 @@ final class WindowFindings {
             case "allowed" -> "a tenth of the reaction quotient";
             case "competing" -> ((Limit.Competing) limit).share() < 0.5 ? "twice the share" : "half the main product";
             case "equilibrium" -> "half the odds of the conversion";
-            case "hold" -> "half the time";
-            default -> "twice the time";
+            case "hold" -> limit.course().isPresent() ? "half the progress over the course" : "half the time";
+            default -> limit.course().isPresent() ? "twice the progress over the course" : "twice the time";
         };
     }
 

@@ -45,6 +45,27 @@ final class Bench {
         return new Bench(List.of(models));
     }
 
+    /** An Arrhenius law of first order with a small covariance. */
+    static BoundLaw law(double lnA, double ea) {
+        try {
+            var context = org.saddlebook.api.model.RateContext.of(Units.rateConstant("1/s"), 1);
+            var fitted = new org.saddlebook.api.model.FittedModel(
+                    "arrhenius",
+                    context,
+                    List.of("A", "Ea"),
+                    new double[] {lnA, ea},
+                    new double[][] {{1e-4, 0}, {0, 1}},
+                    java.util.OptionalDouble.empty());
+            return new BoundLaw(
+                    new org.saddlebook.barrier.api.FittedLaws.FittedLawView(
+                            "arrhenius", "Arrhenius", fitted, java.util.OptionalDouble.empty(), List.of()),
+                    new Arrhenius().bind(context),
+                    false);
+        } catch (UnitException | org.saddlebook.api.model.Inapplicable wrong) {
+            throw new IllegalStateException(wrong);
+        }
+    }
+
     /** A tree from plain values: numbers, texts, lists, groups. */
     static Node node(Object value) {
         if (value instanceof Node node) {

@@ -1,4 +1,4 @@
-package org.saddlebook.spontaneity.internal;
+package org.saddlebook.spontaneity.api;
 
 import java.util.List;
 
@@ -8,13 +8,16 @@ import java.util.List;
  * and solids have {@code a = 1} until they are used up. {@code ln Q} never falls with ξ, so there is one answer; where a pure
  * phase runs out before equilibrium, that is the answer and said so.
  */
-final class EquilibriumExtent {
+public final class EquilibriumExtent {
     private static final int MOST_STEPS = 2000;
 
     /** How a species enters Q. */
-    enum Kind {
+    public enum Kind {
+        /** Ideal gas at the held pressure. */
         GAS,
+        /** Ideal solute in the held volume. */
         SOLUTE,
+        /** Pure liquid or solid. */
         PURE
     }
 
@@ -25,7 +28,7 @@ final class EquilibriumExtent {
      * @param amount at the start, mol, not negative
      * @param kind how it enters Q
      */
-    record Member(double coefficient, double amount, Kind kind) {}
+    public record Member(double coefficient, double amount, Kind kind) {}
 
     /**
      * The answer.
@@ -35,7 +38,7 @@ final class EquilibriumExtent {
      * @param perLnK dξ/d ln K, mol; 0 where used up
      * @param perLnPressure dξ/d ln p, mol; 0 where used up
      */
-    record Answer(double extent, boolean usedUp, double perLnK, double perLnPressure) {}
+    public record Answer(double extent, boolean usedUp, double perLnK, double perLnPressure) {}
 
     private final List<Member> members;
     private final double inert;
@@ -49,7 +52,7 @@ final class EquilibriumExtent {
      * @param bar pressure over 1 bar; of no effect without gases
      * @param litres volume over 1 L; of no effect without solutes
      */
-    EquilibriumExtent(List<Member> members, double inert, double bar, double litres) {
+    public EquilibriumExtent(List<Member> members, double inert, double bar, double litres) {
         this.members = List.copyOf(members);
         this.inert = inert;
         this.bar = bar;
@@ -57,7 +60,7 @@ final class EquilibriumExtent {
     }
 
     /** The smallest extent: a product is used up. */
-    double lower() {
+    public double lower() {
         double bound = Double.NEGATIVE_INFINITY;
         for (Member one : members) {
             if (one.coefficient() > 0) {
@@ -68,7 +71,7 @@ final class EquilibriumExtent {
     }
 
     /** The largest extent: a reactant is used up. */
-    double upper() {
+    public double upper() {
         double bound = Double.POSITIVE_INFINITY;
         for (Member one : members) {
             if (one.coefficient() < 0) {
@@ -78,7 +81,8 @@ final class EquilibriumExtent {
         return bound;
     }
 
-    double lnQ(double extent) {
+    /** ln Q at an extent between the bounds. */
+    public double lnQ(double extent) {
         double gas = gas(extent);
         double sum = 0;
         for (Member one : members) {
@@ -90,6 +94,36 @@ final class EquilibriumExtent {
             }
         }
         return sum;
+    }
+
+    /**
+     * ln Q where the limiting reactant is converted to x. Because ln Q rises with the extent, the equilibrium conversion is at
+     * least x exactly where ln K is at least this.
+     *
+     * @param conversion 0 to 1, both excluded; there must be reactants at the start
+     */
+    public double lnQAtConversion(double conversion) {
+        return lnQ(conversion * upper());
+    }
+
+    /** The species that take part. */
+    public List<Member> members() {
+        return members;
+    }
+
+    /** Inert gas, mol. */
+    public double inert() {
+        return inert;
+    }
+
+    /** Pressure over 1 bar. */
+    public double bar() {
+        return bar;
+    }
+
+    /** Volume over 1 L. */
+    public double litres() {
+        return litres;
     }
 
     private double gas(double extent) {
@@ -123,7 +157,7 @@ final class EquilibriumExtent {
     }
 
     /** The equilibrium; both bounds must be finite and differ. */
-    Answer at(double lnK) {
+    public Answer at(double lnK) {
         double low = lower();
         double high = upper();
         for (int i = 0; i < MOST_STEPS; i++) {

@@ -39,7 +39,10 @@ enum Statement {
     VISCOSITY,
     MEDIUM,
     COLLISION_DIAMETER,
-    REDUCED_MASS;
+    REDUCED_MASS,
+    THIRD_BODY,
+    TUNNELLING,
+    HOLD;
 
     private static final String SPONTANEITY = "spontaneity";
     private static final String BARRIER = "barrier";
@@ -80,6 +83,9 @@ enum Statement {
             case MEDIUM -> List.of("medium");
             case COLLISION_DIAMETER -> List.of("collision diameter");
             case REDUCED_MASS -> List.of("reduced mass");
+            case THIRD_BODY -> List.of("third body");
+            case TUNNELLING -> List.of("tunnelling", "tunneling");
+            case HOLD -> List.of("hold");
         };
     }
 
@@ -169,6 +175,9 @@ enum Statement {
                 Settings.put(campaign, DATA_CHECKS, "medium", ValueReader.word(directive, List.of("solution", "gas")));
             case COLLISION_DIAMETER ->
                 Settings.put(campaign, DATA_CHECKS, "collisionDiameter", ValueReader.length(directive));
+            case THIRD_BODY -> Settings.put(campaign, BARRIER, "thirdBody", ValueReader.thirdBody(directive));
+            case TUNNELLING -> Settings.put(campaign, BARRIER, "tunnelling", TunnellingStatement.read(directive));
+            case HOLD -> campaign.withChoices(choices.withFixed(HeldStatement.read(directive, choices.fixed())));
             case REDUCED_MASS -> Settings.put(campaign, DATA_CHECKS, "reducedMass", ValueReader.molarMass(directive));
         };
     }

@@ -65,7 +65,7 @@ final class ValueReader {
         return items(directive);
     }
 
-    private static List<String> items(Directive directive) throws InputException {
+    static List<String> items(Directive directive) throws InputException {
         List<String> items = new ArrayList<>();
         int start = 0;
         String text = directive.value();
@@ -179,6 +179,24 @@ final class ValueReader {
         return new Node.Text(directive.value());
     }
 
+    /** The third body as a concentration in mol/m3 or a pressure in Pa. */
+    static Node thirdBody(Directive directive) throws InputException {
+        try {
+            Measured measured = Units.measured(directive.value());
+            Dimension dimension = measured.unit().dimension();
+            boolean pressure = dimension.equals(Dimension.PRESSURE);
+            if ((!pressure && !dimension.equals(Dimension.CONCENTRATION)) || !(measured.value() > 0)) {
+                throw wrong(
+                        directive,
+                        "a concentration or a pressure above zero, for example 2.4e19 molecule cm-3 or 1 bar",
+                        "Correct the value and its unit.");
+            }
+            return Node.Quantity.of(si(measured), pressure ? "Pa" : "mol/m3");
+        } catch (UnitException e) {
+            throw new InputException(e.at(directive.place()));
+        }
+    }
+
     static Node energy(Directive directive) throws InputException {
         return quantity(directive, Dimension.MOLAR_ENERGY, "a molar energy", "-92.2 +- 0.4 kJ/mol", "J/mol");
     }
@@ -235,7 +253,7 @@ final class ValueReader {
     }
 
     /** Rounded once, so that the same amount in kJ and J gives the same double. */
-    private static double si(Measured measured) {
+    static double si(Measured measured) {
         return Converter.of(measured.unit()).toSi(Numerals.shortest(measured.value()));
     }
 
@@ -266,7 +284,7 @@ final class ValueReader {
         }
     }
 
-    private static InputException wrong(Directive directive, String expected, String remedy) {
+    static InputException wrong(Directive directive, String expected, String remedy) {
         return new InputException(new Problem(
                 "wrong-value",
                 directive.place(),

@@ -94,6 +94,11 @@ final class Amounts {
         return amount;
     }
 
+    /** A value of any dimension, with its unit. */
+    static Amount any(JsonCursor at, String example) throws InputException {
+        return amount(at, Optional.empty(), Kind.ANY, example);
+    }
+
     /** A standard state: {@code "1 bar"} or {@code {"value": 1, "unit": "bar"}}. */
     static StandardState standardState(JsonCursor at) throws InputException {
         String expected = "a standard concentration or pressure, for example \"1 mol/L\" or \"1 bar\"";

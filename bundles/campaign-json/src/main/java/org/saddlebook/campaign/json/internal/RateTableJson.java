@@ -2,11 +2,13 @@ package org.saddlebook.campaign.json.internal;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import org.saddlebook.api.campaign.RatePoint;
 import org.saddlebook.api.campaign.RateTable;
+import org.saddlebook.api.model.Conditions;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.api.problem.Problem;
 import org.saddlebook.api.quantity.Unit;
@@ -25,7 +27,15 @@ final class RateTableJson {
     private static final List<String> TABLE_KEYS = List.of("statedUnit", "order", "units", "points");
     private static final List<String> UNIT_KEYS = List.of("temperature", "k");
     private static final List<String> POINT_KEYS = List.of(
-            "temperature", "k", "temperatureUncertainty", "kUncertainty", "label", "block", "excluded", "asRead");
+            "temperature",
+            "k",
+            "temperatureUncertainty",
+            "kUncertainty",
+            "label",
+            "block",
+            "excluded",
+            "conditions",
+            "asRead");
     private static final List<String> AS_READ_KEYS = List.of("line", "temperature", "k");
 
     private RateTableJson() {}
@@ -65,6 +75,24 @@ final class RateTableJson {
         }
         if (point.excluded().isPresent()) {
             out.put("excluded", point.excluded().get());
+        }
+        if (!point.conditions().isEmpty()) {
+            JsonObject.Builder conditions = JsonObject.builder();
+            for (Map.Entry<String, Double> condition :
+                    point.conditions().values().entrySet()) {
+                String unit = ConditionUnits.si(condition.getKey());
+                if (unit.isEmpty()) {
+                    conditions.put(condition.getKey(), condition.getValue());
+                } else {
+                    conditions.put(
+                            condition.getKey(),
+                            JsonObject.builder()
+                                    .put("value", condition.getValue())
+                                    .put("unit", unit)
+                                    .build());
+                }
+            }
+            out.put("conditions", conditions.build());
         }
         RatePoint.AsRead asRead = point.asRead();
         if (!asRead.equals(RatePoint.AsRead.NOT_READ)) {
@@ -209,7 +237,28 @@ final class RateTableJson {
                         label.isPresent() ? label.get().text() : "",
                         excluded.isPresent() ? Optional.of(excluded.get().text()) : Optional.empty(),
                         asRead.isPresent() ? asRead(asRead.get()) : RatePoint.AsRead.NOT_READ)
+                .withConditions(conditions(at))
                 .withBlock(block.isPresent() ? block.get().text() : "");
+    }
+
+    private static Conditions conditions(JsonCursor at) throws InputException {
+        Conditions conditions = Conditions.NONE;
+        Optional<JsonCursor> stated = at.optional("conditions");
+        if (stated.isEmpty()) {
+            return conditions;
+        }
+        for (JsonCursor value : stated.get().members()) {
+            String name = value.key();
+            if (!name.matches("[a-z][A-Za-z0-9]*")) {
+                throw value.problem(
+                        "wrong-value",
+                        "a condition named \"" + name + "\"",
+                        "a plain name, such as \"thirdBody\" or \"pressure\"",
+                        "Rename it.");
+            }
+            conditions = conditions.with(name, ConditionUnits.value(value, name));
+        }
+        return conditions;
     }
 
     private static OptionalDouble uncertainty(JsonCursor at, String key, Amounts.Amount amount, Optional<Unit> plain)

@@ -25,6 +25,7 @@ import org.saddlebook.api.findings.Interval;
 import org.saddlebook.api.findings.Layer;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
+import org.saddlebook.api.model.Conditions;
 import org.saddlebook.api.model.StandardState;
 import org.saddlebook.units.api.UnitException;
 import org.saddlebook.units.api.Units;
@@ -268,6 +269,13 @@ final class RandomTrees {
                                                 random.nextBoolean() ? OptionalInt.empty() : OptionalInt.of(7),
                                                 "25",
                                                 text()))
+                        .withConditions(
+                                random.nextBoolean()
+                                        ? Conditions.NONE
+                                        : Conditions.NONE
+                                                .with(Conditions.THIRD_BODY, positive())
+                                                .with(Conditions.PRESSURE, positive())
+                                                .with("fieldStrength", positive()))
                         .withBlock(random.nextBoolean() ? "" : text()));
             }
             return new RateTable(unit, Units.rateOrder(unit).orElseThrow(), points);

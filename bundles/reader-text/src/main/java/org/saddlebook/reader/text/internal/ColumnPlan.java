@@ -26,7 +26,9 @@ final class ColumnPlan {
         this.units = new ColumnUnits(header, units, rule, problems);
         this.problems = problems;
         for (String heading : header.cells()) {
-            headings.add(HeadingParser.parse(heading));
+            Heading read = HeadingParser.parse(heading);
+            boolean other = read.kind() == Kind.PRESSURE && !this.units.isPressure(headings.size(), read);
+            headings.add(other ? Heading.OTHER : read);
         }
         refuseDuplicates();
         // Wanted columns first, so that a 1/T beside T is known to be spare.
@@ -34,6 +36,8 @@ final class ColumnPlan {
         add(Kind.RATE);
         add(Kind.TEMPERATURE_UNCERTAINTY);
         addRateUncertainty();
+        add(Kind.THIRD_BODY);
+        add(Kind.PRESSURE);
         add(Kind.LABEL);
         add(Kind.BLOCK);
         add(Kind.EXCLUDED);

@@ -70,11 +70,33 @@ final class ColumnUnits {
         }
     }
 
+    /**
+     * Whether a heading that begins like a pressure is one: p is also the beginning of other things, and a column of those
+     * is not used, as before.
+     */
+    boolean isPressure(int index, Heading heading) {
+        String below = units == null || index >= units.cells().size()
+                ? ""
+                : unwrapped(units.cells().get(index));
+        String text = heading.unit() == null ? below : heading.unit();
+        try {
+            return !text.isEmpty() && parse(text, Kind.PRESSURE, null) != null;
+        } catch (UnitException e) {
+            return false;
+        }
+    }
+
     /** Reads a unit of what a column of this kind holds. */
     static Unit parse(String text, Kind kind, Unit rate) throws UnitException {
         switch (kind) {
             case TEMPERATURE, TEMPERATURE_UNCERTAINTY -> {
                 return Units.temperature(text);
+            }
+            case THIRD_BODY -> {
+                return Units.parse(text, Dimension.CONCENTRATION, "molecule cm-3 or mol/L");
+            }
+            case PRESSURE -> {
+                return Units.parse(text, Dimension.PRESSURE, "bar");
             }
             case RELATIVE_RATE_UNCERTAINTY -> {
                 return Units.parse(text, Dimension.NONE, "1 or %");
@@ -109,6 +131,8 @@ final class ColumnUnits {
             case TEMPERATURE -> "\"T (K)\" or \"T (degC)\"";
             case TEMPERATURE_UNCERTAINTY -> "\"u(T) (K)\"";
             case RATE -> "\"k (1/s)\" or \"k (L mol-1 s-1)\"";
+            case THIRD_BODY -> "\"[M] (molecule cm-3)\" or \"[M] (mol/L)\"";
+            case PRESSURE -> "\"p (bar)\"";
             default -> "\"u(k) (%)\" or \"u(k) (1/s)\"";
         };
         problems.add(

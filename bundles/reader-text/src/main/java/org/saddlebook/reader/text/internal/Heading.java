@@ -16,6 +16,8 @@ record Heading(Kind kind, String unit, boolean certain) {
         TEMPERATURE_UNCERTAINTY("u(T)", "standard uncertainty of the temperature"),
         RATE_UNCERTAINTY("u(k)", "standard uncertainty of the rate constant"),
         RELATIVE_RATE_UNCERTAINTY("u(k)/k", "relative standard uncertainty of the rate constant"),
+        THIRD_BODY("[M]", "concentration of the third body"),
+        PRESSURE("p", "pressure"),
         LABEL("label", "label of the run"),
         BLOCK("block", "stock, batch or day of the run"),
         EXCLUDED("excluded", "reason for exclusion"),

@@ -8,6 +8,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import org.saddlebook.api.campaign.RatePoint;
+import org.saddlebook.api.model.Conditions;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Task;
 import org.saddlebook.reader.text.internal.Heading.Kind;
@@ -69,6 +70,7 @@ final class PointReader {
                         label == null ? "" : row.cell(label),
                         excluded,
                         new RatePoint.AsRead(OptionalInt.of(row.line()), row.cell(temperature), row.cell(rate)))
+                .withConditions(conditions(row, excluded))
                 .withBlock(block == null ? "" : row.cell(block));
     }
 
@@ -156,6 +158,34 @@ final class PointReader {
                 ? number.divide(HUNDRED)
                 : number.multiply(new BigDecimal(column.unit().factor()));
         return inRange(row, column, rates.converter().toSi(rate.multiply(fraction)));
+    }
+
+    /** What else the point was measured at; an excluded row may leave it open. */
+    private Conditions conditions(Row row, Optional<String> excluded) {
+        Conditions conditions = Conditions.NONE;
+        double thirdBody = condition(row, plan.column(Kind.THIRD_BODY), excluded);
+        if (thirdBody > 0) {
+            conditions = conditions.with(Conditions.THIRD_BODY, thirdBody);
+        }
+        double pressure = condition(row, plan.column(Kind.PRESSURE), excluded);
+        return pressure > 0 ? conditions.with(Conditions.PRESSURE, pressure) : conditions;
+    }
+
+    private double condition(Row row, Column column, Optional<String> excluded) {
+        BigDecimal number = number(row, column, excluded.isPresent());
+        if (number == null || column.converter() == null) {
+            return Double.NaN;
+        }
+        if (number.signum() <= 0) {
+            problems.add(
+                    "not-positive",
+                    problems.place(row.line(), column.heading()),
+                    Problems.quoted(row.cell(column)),
+                    "a " + column.kind().words() + " above zero",
+                    "correct the value, or exclude the row with a reason");
+            return Double.NaN;
+        }
+        return inRange(row, column, column.converter().toSi(number));
     }
 
     private double inRange(Row row, Column column, double si) {

@@ -38,6 +38,12 @@ import org.saddlebook.desk.api.TemperatureScale;
 public final class FigureView extends JComponent {
     private static final long serialVersionUID = 1L;
 
+    /** Below this the rail is not laid out yet, or too small to read a figure on it. */
+    private static final double LEAST_RAIL = 160;
+
+    /** Room that numbers of the vertical axis take. */
+    private static final double LEAST_LEFT = 60;
+
     private final transient DeskContext context;
     private final transient FigureDrawings drawings;
     private final transient FigureHand hand;
@@ -188,11 +194,14 @@ public final class FigureView extends JComponent {
     }
 
     private Optional<FigureLook.Rail> rail() {
-        if (!onRail || !isShowing()) {
+        if (!onRail) {
             return Optional.empty();
         }
         TemperatureScale scale = context.scale(this);
-        return Optional.of(new FigureLook.Rail(scale.lowKelvin(), scale.highKelvin(), scale.left(), scale.right()));
+        boolean room = scale.right() - scale.left() >= LEAST_RAIL && scale.left() >= LEAST_LEFT;
+        return room
+                ? Optional.of(new FigureLook.Rail(scale.lowKelvin(), scale.highKelvin(), scale.left(), scale.right()))
+                : Optional.empty();
     }
 
     /** Does what a click on a point does. */

@@ -51,7 +51,7 @@ public final class RailStrip extends JComponent {
 
     @Override
     protected void paintComponent(Graphics graphics) {
-        if (getWidth() <= 0 || !isShowing()) {
+        if (getWidth() <= 0) {
             return;
         }
         Graphics2D g = (Graphics2D) graphics.create();

@@ -14,6 +14,9 @@ import org.saddlebook.presentation.api.UnitText;
  * numbers, each column with its unit in the head and the uncertainty in a column of its own. Immutable.
  */
 public final class TableContent {
+    /** The unit of a column whose cells have units of their own. */
+    public static final String MIXED = "*";
+
     /** No columns and no rows. */
     public static final TableContent EMPTY = new TableContent(List.of(), List.of());
 
@@ -21,7 +24,8 @@ public final class TableContent {
      * A column.
      *
      * @param title head for people, with unit where every cell has the same
-     * @param unit UCUM term of numbers handed on; empty for words
+     * @param unit UCUM term of numbers handed on; empty for words; {@link #MIXED} where each cell has its own, which is
+     *     then handed on in a column beside it
      * @param spread whether uncertainties are handed on in a column beside it
      */
     public record Column(String title, String unit, boolean spread) {}
@@ -32,16 +36,32 @@ public final class TableContent {
      * @param text for people
      * @param value handed on instead of the text; absent for words
      * @param uncertainty standard uncertainty, or standard factor, handed on beside it
+     * @param unit UCUM term of the value; empty for words
      */
-    public record Cell(String text, OptionalDouble value, OptionalDouble uncertainty) {
+    public record Cell(String text, OptionalDouble value, OptionalDouble uncertainty, String unit) {
         /** A cell of words. */
         public static Cell of(String text) {
-            return new Cell(text, OptionalDouble.empty(), OptionalDouble.empty());
+            return new Cell(text, OptionalDouble.empty(), OptionalDouble.empty(), "");
         }
 
         /** A number with the text that stands for it. */
         public static Cell of(String text, double value) {
-            return new Cell(text, OptionalDouble.of(value), OptionalDouble.empty());
+            return new Cell(text, OptionalDouble.of(value), OptionalDouble.empty(), "");
+        }
+
+        /**
+         * A quantity.
+         *
+         * @param text for people
+         */
+        public static Cell of(String text, Node.Quantity quantity) {
+            return new Cell(
+                    text,
+                    quantity.value(),
+                    quantity.standardUncertainty().isPresent()
+                            ? quantity.standardUncertainty()
+                            : quantity.standardFactor(),
+                    quantity.unit());
         }
     }
 
@@ -129,24 +149,19 @@ public final class TableContent {
         for (Node cell : cells) {
             plain |= cell instanceof Node.Scalar;
             if (cell instanceof Node.Quantity quantity) {
-                common = common.isEmpty() || common.equals(quantity.unit()) ? quantity.unit() : "*";
+                common = common.isEmpty() || common.equals(quantity.unit()) ? quantity.unit() : MIXED;
                 spread |= quantity.standardUncertainty().isPresent()
                         || quantity.standardFactor().isPresent();
             }
         }
-        String shown = plain && !common.equals("*") ? UnitText.forPeople(common) : "";
-        return new Column(shown.isEmpty() ? title : title + " / " + shown, common.equals("*") ? "" : common, spread);
+        String shown = plain && !common.equals(MIXED) ? UnitText.forPeople(common) : "";
+        return new Column(shown.isEmpty() ? title : title + " / " + shown, common, spread);
     }
 
     private static Cell cell(String key, Node node, CautionNumbers numbers) {
         String text = LeafText.of(key, node, numbers);
         if (node instanceof Node.Quantity quantity) {
-            return new Cell(
-                    text,
-                    quantity.value(),
-                    quantity.standardUncertainty().isPresent()
-                            ? quantity.standardUncertainty()
-                            : quantity.standardFactor());
+            return Cell.of(text, quantity);
         }
         return node instanceof Node.Scalar scalar ? Cell.of(text, scalar.value()) : Cell.of(text);
     }
@@ -180,6 +195,9 @@ public final class TableContent {
                 Cell cell = rows.get(row).get(j);
                 boolean number = finite(cell.value());
                 cells.add(number ? NumberText.of(cell.value().getAsDouble()) : harmless(cell.text()));
+                if (columns.get(j).unit().equals(MIXED)) {
+                    cells.add(harmless(cell.unit()));
+                }
                 if (columns.get(j).spread()) {
                     cells.add(
                             finite(cell.uncertainty())
@@ -204,6 +222,9 @@ public final class TableContent {
                 } else {
                     csv.text(cell.text());
                 }
+                if (columns.get(j).unit().equals(MIXED)) {
+                    csv.text(cell.unit());
+                }
                 if (columns.get(j).spread()) {
                     csv.number(
                             finite(cell.uncertainty())
@@ -222,8 +243,12 @@ public final class TableContent {
             String title = column.title().contains(" / ")
                     ? column.title().substring(0, column.title().indexOf(" / "))
                     : column.title();
-            String unit = column.unit().equals("1") ? "" : column.unit();
+            boolean mixed = column.unit().equals(MIXED);
+            String unit = column.unit().equals("1") || mixed ? "" : column.unit();
             heads.add(unit.isEmpty() ? title : title + " / " + unit);
+            if (mixed) {
+                heads.add("unit of " + title);
+            }
             if (column.spread()) {
                 heads.add("u(" + title + ") (standard uncertainty; standard factor where estimated on a log scale)"
                         + (unit.isEmpty() ? "" : " / " + unit));

@@ -70,10 +70,12 @@ final class BarrierEvaluation {
         SharedErrors shared;
         double tolerance;
         NextMeasurement.Allowed allowed;
+        IntervalRequest intervals;
         try {
             shared = SharedErrors.read(settings);
             tolerance = SharedErrors.tolerance(settings);
             allowed = SharedErrors.allowed(settings);
+            intervals = IntervalRequest.read(settings);
         } catch (IllegalArgumentException unusable) {
             return Section.refused(SECTION, TITLE, String.valueOf(unusable.getMessage()));
         }
@@ -127,9 +129,11 @@ final class BarrierEvaluation {
         Contained<Comparison> comparison = task.contain(
                 "the comparison of laws", () -> new Comparison(fitted, choices.level(), choices.targetsKelvin()));
         Set<String> candidates = Set.of();
+        Map<String, Double> akaikeWeights = Map.of();
         if (comparison instanceof Contained.Answer<Comparison> answer) {
             body.put("comparison", answer.value().node());
             candidates = answer.value().candidates();
+            akaikeWeights = answer.value().weights();
         } else if (comparison instanceof Contained.Broke<Comparison> broke) {
             notes.add(broke.reason());
         }
@@ -169,6 +173,23 @@ final class BarrierEvaluation {
             } else if (reach instanceof Contained.Broke<Node.Group> broke) {
                 notes.add(broke.reason());
             }
+        }
+        if (!fitted.isEmpty()) {
+            Checks checks = new Checks(
+                    fitted,
+                    shown(fitted, candidates),
+                    table.rateUnit(),
+                    choices.level(),
+                    choices.targetsKelvin(),
+                    task);
+            LeaveOneOut.Refit refit = (id, rest) -> {
+                RateModel model = installed.get(id).model();
+                return fit(model, model.completed(context(id, context)), rest, List.of());
+            };
+            checks.node(refit, akaikeWeights, shared.targetOnSameSensor(), intervals)
+                    .members()
+                    .forEach(body::put);
+            notes.addAll(checks.broken());
         }
         List<String> tableCautions = plausibility.table();
         body.put("notes", Tree.texts(notes));

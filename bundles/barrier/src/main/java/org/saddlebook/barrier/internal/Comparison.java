@@ -166,6 +166,13 @@ final class Comparison {
         }
     }
 
+    /** Akaike weights of the laws that have the criterion, id to weight. */
+    Map<String, Double> weights() {
+        Map<String, Double> weights = new LinkedHashMap<>();
+        akaikeWeights().forEach((id, weight) -> weights.put(id, ((Node.Scalar) weight).value()));
+        return weights;
+    }
+
     private Map<String, Node> akaikeWeights() {
         Map<String, Double> criteria = new LinkedHashMap<>();
         double lowest = Double.POSITIVE_INFINITY;

@@ -21,6 +21,53 @@ final class NonlinearFitter {
             return new LawOutcome.NotFitted(
                     id, title, LawOutcome.Kind.FAILED, "The law is not linear and offers no starting values.");
         }
+        Problem problem = problem(law, data, check);
+        NonlinearOutcome outcome = problem.fit(data, starts);
+        if (outcome instanceof NonlinearFit found) {
+            double[] ordered = law.ordered(found.parameters());
+            if (!Arrays.equals(ordered, found.parameters())) {
+                // The same minimum with the parameters where the law promises them.
+                outcome = problem.fit(data, List.of(ordered));
+            }
+        }
+        return outcome.fold(
+                fit -> LawFitter.checked(id, title, law, data, fit),
+                missed -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, missed.reason()),
+                deficient -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.UNDETERMINED, deficient.reason()));
+    }
+
+    /** A fit by search as the engine takes it. */
+    static final class Problem {
+        private final ResponseFunction function;
+        private final double[] response;
+        private final NonlinearOptions options;
+
+        Problem(ResponseFunction function, double[] response, NonlinearOptions options) {
+            this.function = function;
+            this.response = response;
+            this.options = options;
+        }
+
+        private NonlinearOutcome fit(Measurements data, List<double[]> starts) {
+            return NonlinearLeastSquares.fit(function, response, data.weights(), starts, options);
+        }
+
+        ResponseFunction function() {
+            return function;
+        }
+
+        /** Observed values; not copied. */
+        double[] response() {
+            return response;
+        }
+
+        NonlinearOptions options() {
+            return options;
+        }
+    }
+
+    /** The problem of fitting a law to measurements. */
+    static Problem problem(RateFunction law, Measurements data, Runnable check) {
         int n = data.size();
         boolean logarithm = data.response() == Measurements.Response.LN_RATE;
         // k is fitted in units of the first one, so that its size cannot matter.
@@ -30,19 +77,7 @@ final class NonlinearFitter {
             response[i] = logarithm ? data.lnRate(i) : StrictMath.exp(data.lnRate(i) - unit);
         }
         NonlinearOptions options = options(law).withCheck(check);
-        ResponseFunction function = response(law, data, logarithm, unit);
-        NonlinearOutcome outcome = NonlinearLeastSquares.fit(function, response, data.weights(), starts, options);
-        if (outcome instanceof NonlinearFit found) {
-            double[] ordered = law.ordered(found.parameters());
-            if (!Arrays.equals(ordered, found.parameters())) {
-                // The same minimum with the parameters where the law promises them.
-                outcome = NonlinearLeastSquares.fit(function, response, data.weights(), List.of(ordered), options);
-            }
-        }
-        return outcome.fold(
-                fit -> LawFitter.checked(id, title, law, data, fit),
-                missed -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, missed.reason()),
-                deficient -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.UNDETERMINED, deficient.reason()));
+        return new Problem(response(law, data, logarithm, unit), response, options);
     }
 
     /** A law fitted to a curve of ln k at the measured points, each counting alike; empty when the search does not end. */

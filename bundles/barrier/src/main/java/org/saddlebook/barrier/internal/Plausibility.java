@@ -50,6 +50,9 @@ final class Plausibility {
         if (!data.stated()) {
             cautions.add("assumed-error-model");
         }
+        if (BlockCheck.named(data)) {
+            cautions.add("runs-share-blocks");
+        }
         if (!shared.hasThermometer()) {
             cautions.add("thermometer-not-included");
         }

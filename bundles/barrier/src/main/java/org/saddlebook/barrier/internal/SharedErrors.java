@@ -41,7 +41,10 @@ record SharedErrors(
             "measureTo",
             "runCost",
             Surroundings.THIRD_BODY,
-            Surroundings.TUNNELLING);
+            Surroundings.TUNNELLING,
+            IntervalRequest.METHODS_KEY,
+            IntervalRequest.RESAMPLES_KEY,
+            IntervalRequest.FEW_POINTS_KEY);
 
     /**
      * One cause at one standard uncertainty.

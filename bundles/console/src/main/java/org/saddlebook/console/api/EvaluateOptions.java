@@ -1,6 +1,7 @@
 package org.saddlebook.console.api;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -8,6 +9,7 @@ import java.util.TreeMap;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.campaign.Choices;
 import org.saddlebook.api.campaign.ErrorModel;
+import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.model.StandardState;
 import org.saddlebook.api.problem.InputException;
 import org.saddlebook.api.problem.Place;
@@ -23,7 +25,7 @@ import org.saddlebook.units.api.Units;
 public final class EvaluateOptions {
     /** The options, for the synopsis of a verb. */
     public static final String SYNOPSIS = "[--at T]... [--model ID]... [--standard STATE] [--seed N]"
-            + " [--errors constant-relative|stated|stated-both|constant-absolute] [--level P]"
+            + " [--errors constant-relative|stated|stated-both|constant-absolute] [--level P] [--interval METHOD]..."
             + " [--read KEY=VALUE]...";
 
     /** What each means, for the help of a verb; lines of plain text. */
@@ -37,11 +39,24 @@ public final class EvaluateOptions {
                               stated-both: also the uncertainties of the temperatures in the table
                               constant-absolute: one error of k itself, estimated from the scatter
             --level P         coverage probability of intervals, above 0.5 and below 1
+            --interval METHOD further intervals beside the usual ones; may be repeated. How often 95 % intervals held the
+                              truth, for n points of a straight law with 5 % scatter (20,000 campaigns each):
+                              t: the usual ones; 95 % at any n
+                              profile: 95 % at any n
+                              monte-carlo: 95 % at any n
+                              bootstrap-residual: 85 % at n = 5, 90 % at 8, 92 % at 12
+                              bootstrap-case: 90 % at n = 5, 91 % at 8 and 12
+                              bootstrap-parametric: 86 % at n = 5, 90 % at 8, 92 % at 12
+                              every bootstrap is refused below n = 12 unless the table states
+                              "# bootstrap of few points: accepted"
             --read KEY=VALUE  settle how a table is read, such as decimal=comma, unit.T=degC or sheet=Rates;
                               may be repeated""";
 
+    private static final List<String> INTERVAL_METHODS =
+            List.of("t", "profile", "monte-carlo", "bootstrap-residual", "bootstrap-case", "bootstrap-parametric");
+
     private static final List<String> VALUED =
-            List.of("--at", "--model", "--standard", "--seed", "--errors", "--level", "--read");
+            List.of("--at", "--model", "--standard", "--seed", "--errors", "--level", "--interval", "--read");
 
     private final Options options;
     private final List<Double> targetsKelvin;
@@ -50,6 +65,7 @@ public final class EvaluateOptions {
     private final Optional<Long> seed;
     private final Optional<ErrorModel> errors;
     private final Optional<Double> level;
+    private final List<Node> intervals;
     private final ReadingRule readingRule;
 
     private EvaluateOptions(Options options) throws InputException {
@@ -71,6 +87,7 @@ public final class EvaluateOptions {
         seed = seed(options.value("--seed"));
         errors = errors(options.value("--errors"));
         level = level(options.value("--level"));
+        intervals = intervals(options.values("--interval"));
         readingRule = readingRule(options.values("--read"));
     }
 
@@ -129,7 +146,28 @@ public final class EvaluateOptions {
         if (level.isPresent()) {
             choices = choices.withLevel(level.get());
         }
-        return choices.equals(campaign.choices()) ? campaign : campaign.withChoices(choices);
+        Campaign chosen = choices.equals(campaign.choices()) ? campaign : campaign.withChoices(choices);
+        return intervals.isEmpty() ? chosen : withIntervals(chosen);
+    }
+
+    private Campaign withIntervals(Campaign campaign) {
+        Map<String, Node> members = new LinkedHashMap<>();
+        if (campaign.settings().get("barrier") instanceof Node.Group group) {
+            members.putAll(group.members());
+        }
+        members.put("intervals", new Node.Items(intervals));
+        return campaign.withSetting("barrier", new Node.Group(members));
+    }
+
+    private static List<Node> intervals(List<String> texts) throws InputException {
+        List<Node> methods = new ArrayList<>();
+        for (String text : texts) {
+            if (!INTERVAL_METHODS.contains(text)) {
+                throw wrong("--interval", text, "one of " + String.join(", ", INTERVAL_METHODS));
+            }
+            methods.add(new Node.Text(text));
+        }
+        return methods;
     }
 
     private static ReadingRule readingRule(List<String> texts) throws InputException {

@@ -31,6 +31,7 @@ final class BarrierSummary {
         body.get("comparison").ifPresent(this::comparison);
         predictions(Nodes.items(body, "predictions"));
         new ReachSummary(out).print(body);
+        new ChecksSummary(out).print(body);
         List<Node> notes = Nodes.items(body, "notes");
         if (!notes.isEmpty()) {
             out.println();

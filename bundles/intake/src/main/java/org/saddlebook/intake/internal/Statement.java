@@ -42,11 +42,17 @@ enum Statement {
     REDUCED_MASS,
     THIRD_BODY,
     TUNNELLING,
-    HOLD;
+    HOLD,
+    INTERVALS,
+    RESAMPLES,
+    FEW_POINTS;
 
     private static final String SPONTANEITY = "spontaneity";
     private static final String BARRIER = "barrier";
     private static final String DATA_CHECKS = "dataChecks";
+
+    private static final List<String> INTERVAL_METHODS =
+            List.of("t", "profile", "bootstrap-residual", "bootstrap-case", "bootstrap-parametric", "monte-carlo");
 
     /** Words of their own that only look like one of ours. */
     private static final List<String> UNRELATED = List.of("dg", "\u03b4g", "\u2206g", "delta g", "ph");
@@ -86,6 +92,9 @@ enum Statement {
             case THIRD_BODY -> List.of("third body");
             case TUNNELLING -> List.of("tunnelling", "tunneling");
             case HOLD -> List.of("hold");
+            case INTERVALS -> List.of("intervals");
+            case RESAMPLES -> List.of("resamples");
+            case FEW_POINTS -> List.of("bootstrap of few points");
         };
     }
 
@@ -179,6 +188,16 @@ enum Statement {
             case TUNNELLING -> Settings.put(campaign, BARRIER, "tunnelling", TunnellingStatement.read(directive));
             case HOLD -> campaign.withChoices(choices.withFixed(HeldStatement.read(directive, choices.fixed())));
             case REDUCED_MASS -> Settings.put(campaign, DATA_CHECKS, "reducedMass", ValueReader.molarMass(directive));
+            case INTERVALS ->
+                Settings.put(campaign, BARRIER, "intervals", ValueReader.wordsOf(directive, INTERVAL_METHODS));
+            case RESAMPLES ->
+                Settings.put(campaign, BARRIER, "resamples", ValueReader.count(directive, 1_000, 1_000_000));
+            case FEW_POINTS ->
+                Settings.put(
+                        campaign,
+                        BARRIER,
+                        "bootstrapOfFewPoints",
+                        ValueReader.word(directive, List.of("refused", "accepted")));
         };
     }
 

@@ -197,6 +197,27 @@ final class ValueReader {
         }
     }
 
+    /** Some of a few words. */
+    static Node wordsOf(Directive directive, List<String> known) throws InputException {
+        List<Node> words = new ArrayList<>();
+        for (String word : items(directive)) {
+            if (!known.contains(word)) {
+                throw wrong(directive, "some of " + String.join(", ", known), "Choose among these words.");
+            }
+            words.add(new Node.Text(word));
+        }
+        return new Node.Items(words);
+    }
+
+    /** A whole number. */
+    static Node count(Directive directive, int least, int most) throws InputException {
+        double value = number(directive, directive.value());
+        if (!(value >= least && value <= most) || value != Math.rint(value)) {
+            throw wrong(directive, "a whole number from " + least + " to " + most, "Correct the number.");
+        }
+        return new Node.Scalar(value);
+    }
+
     static Node energy(Directive directive) throws InputException {
         return quantity(directive, Dimension.MOLAR_ENERGY, "a molar energy", "-92.2 +- 0.4 kJ/mol", "J/mol");
     }

@@ -75,6 +75,9 @@ public final class CautionText {
                 "thermometer-not-included",
                 "A common error of the thermometer is not included; it shifts every point together and does not show in the scatter.");
         t.put(
+                "runs-share-blocks",
+                "Runs of one block (stock, batch or day) share an error. The intervals of the laws take them as independent; the table of blocks does not.");
+        t.put(
                 "cannot-be-told-apart",
                 "These data cannot tell the laws apart. That is no evidence for the simpler one.");
         t.put("criterion-absent", "Too few points for this criterion.");

@@ -91,7 +91,7 @@ final class BarrierPage {
                 "",
                 26,
                 this::askedAt);
-        wrong = put(0, new Sentence("What is wrong with the entry", "", Rank.STATEMENT, context.ink()));
+        wrong = page.put(new Sentence("What is wrong with the entry", "", Rank.STATEMENT, context.ink()));
         wrong.say("");
         predictions = put(0, components.table("Predictions", context));
         reach = put(8, new Sentence("How far it reaches and what to measure next", "", Rank.TEXT, context.ink()));

@@ -119,7 +119,8 @@ final class Laws {
         for (Map.Entry<String, String> row : rows.entrySet()) {
             List<Cell> line = new ArrayList<>();
             String symbol = LeafText.activation(row.getKey());
-            line.add(Cell.of(row.getValue().isEmpty() ? symbol : row.getValue() + " " + symbol));
+            String name = row.getKey().equals("k") ? "rate constant" : row.getValue();
+            line.add(Cell.of(name.isEmpty() ? symbol : name + " " + symbol));
             for (Node law : all()) {
                 line.add(cell(law, row.getKey()));
             }

@@ -2,8 +2,10 @@ package org.saddlebook.desk.components.api;
 
 import java.util.Locale;
 import org.saddlebook.api.findings.Node;
+import org.saddlebook.presentation.api.DisplayUnit;
 import org.saddlebook.presentation.api.QuantityText;
 import org.saddlebook.presentation.api.Rounding;
+import org.saddlebook.presentation.api.UnitText;
 
 /** Leaves and keys of findings in words. */
 public final class LeafText {
@@ -24,20 +26,40 @@ public final class LeafText {
      */
     public static String of(String key, Node node, CautionNumbers numbers) {
         if (node instanceof Node.Quantity quantity) {
+            boolean exact = quantity.value().isPresent()
+                    && quantity.standardUncertainty().isEmpty()
+                    && quantity.standardFactor().isEmpty()
+                    && quantity.interval().isEmpty();
+            if (exact && !isTemperature(key, quantity) && few(quantity.value().getAsDouble())) {
+                DisplayUnit shown = DisplayUnit.of(quantity.unit());
+                String number = Rounding.shortest(shown.value(quantity.value().getAsDouble()));
+                return UnitText.after(number, shown.ucum()) + numbers.marks(quantity.cautions());
+            }
             String text = isTemperature(key, quantity) && quantity.interval().isEmpty()
                     ? QuantityText.temperature(quantity)
                     : QuantityText.withInterval(quantity);
             return text + numbers.marks(quantity.cautions());
         }
         if (node instanceof Node.Scalar scalar) {
-            return Rounding.significant(scalar.value(), 6).equals(Rounding.shortest(scalar.value()))
-                    ? Rounding.shortest(scalar.value())
-                    : Rounding.significant(scalar.value(), 4);
+            return few(scalar.value()) ? Rounding.shortest(scalar.value()) : Rounding.significant(scalar.value(), 4);
         }
         if (node instanceof Node.Flag flag) {
             return flag.value() ? "yes" : "no";
         }
         return node instanceof Node.Text text ? text.value() : "";
+    }
+
+    /** Whether a number has so few digits that it was counted or chosen, not measured. */
+    private static boolean few(double value) {
+        if (!Double.isFinite(value)) {
+            return false;
+        }
+        String shortest = Rounding.shortest(value);
+        int digits = 0;
+        for (int i = 0; i < shortest.length(); i++) {
+            digits += Character.isDigit(shortest.charAt(i)) ? 1 : 0;
+        }
+        return digits <= 5;
     }
 
     private static boolean isTemperature(String key, Node.Quantity quantity) {

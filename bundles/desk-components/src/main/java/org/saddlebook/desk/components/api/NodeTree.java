@@ -91,7 +91,10 @@ public final class NodeTree extends JPanel {
                     || (value instanceof Node.Items list && list.items().isEmpty());
             if (!nothing) {
                 String title = LeafText.key(member.getKey());
-                if (!(value instanceof Node.Table)) {
+                boolean ownTitle = value instanceof Node.Table
+                        || (value instanceof Node.Items list
+                                && TableContent.ofLikeGroups(list.items(), numbers).isPresent());
+                if (!ownTitle) {
                     put(new Sentence("", title, Sentence.Rank.HEADING, context.ink()), depth);
                 }
                 add(value, title, depth + 1);

@@ -195,15 +195,15 @@ public final class TestDesk implements DeskContext {
     @Override
     public TemperatureScale scale(Component component) {
         int x = 0;
+        int width = component.getWidth();
         Component here = component;
-        Container holder = component.getParent();
-        while (holder != null) {
-            x += here.getX();
+        for (Container holder = component.getParent(); holder != null; holder = holder.getParent()) {
+            // A page that was laid out by itself is wider than the place around it, which has no size yet.
+            x += holder.getWidth() > 0 ? here.getX() : 0;
+            width = Math.max(width, holder.getWidth());
             here = holder;
-            holder = holder.getParent();
         }
-        double width = Math.max(400, here.getWidth());
-        return new TemperatureScale(low, high, LEFT, width - RIGHT).shifted(x);
+        return new TemperatureScale(low, high, LEFT, Math.max(400, width) - RIGHT).shifted(x);
     }
 
     @Override

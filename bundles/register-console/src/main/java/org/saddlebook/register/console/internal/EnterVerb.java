@@ -3,7 +3,6 @@ package org.saddlebook.register.console.internal;
 import java.io.IOException;
 import java.io.PrintStream;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.osgi.framework.BundleContext;
@@ -11,9 +10,7 @@ import org.osgi.service.component.annotations.Activate;
 import org.osgi.service.component.annotations.Component;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.findings.Findings;
-import org.saddlebook.api.findings.Section;
 import org.saddlebook.api.problem.InputException;
-import org.saddlebook.api.service.CampaignFormat;
 import org.saddlebook.api.service.Evaluation;
 import org.saddlebook.api.service.Intake;
 import org.saddlebook.api.service.ReportWriter;
@@ -93,21 +90,21 @@ public final class EnterVerb implements Verb {
         try {
             effective = evaluation.effective(evaluate.foldInto(opened.campaign()));
         } catch (InputException e) {
-            if (Recompute.onlyAbsentModels(e)) {
+            if (Recomputation.onlyAbsentModels(e)) {
                 invocation.err().println(ProblemText.of(e.problems()));
                 return ExitCode.REFUSED;
             }
             throw e;
         }
         Findings findings = evaluation.evaluate(effective, invocation.progress());
-        if (!hasResult(findings)) {
+        if (!EntryParts.hasResult(findings)) {
             invocation
                     .err()
                     .println("saddlebook: nothing could be evaluated, so nothing was entered. `saddlebook evaluate`"
                             + " says why.");
             return ExitCode.REFUSED;
         }
-        List<PartFile> parts = parts(opened, effective, findings);
+        List<PartFile> parts = EntryParts.of(services, opened.parts(), effective, findings);
         invocation.progress().check(); // from here on it is entered, and no cancel can leave half of it
         Draft draft = supersedes.isPresent()
                 ? Draft.superseding(actor, effective.title(), target)
@@ -129,37 +126,6 @@ public final class EnterVerb implements Verb {
 
     private static Opening opening(Optional<String> supersedes) {
         return supersedes.isPresent() ? Opening.EXISTING : Opening.CREATE;
-    }
-
-    private static boolean hasResult(Findings findings) {
-        for (Section section : findings.sections().values()) {
-            if (section.outcome() == Section.Outcome.DONE) {
-                return true;
-            }
-        }
-        return false;
-    }
-
-    private List<PartFile> parts(Intake.Opened opened, Campaign effective, Findings findings) throws InputException {
-        CampaignFormat format = services.need(CampaignFormat.class, "base");
-        List<PartFile> parts = new ArrayList<>();
-        parts.add(part(PartNames.CAMPAIGN, format.campaign(effective)));
-        parts.add(part(PartNames.FINDINGS, format.findings(findings)));
-        Optional<ReportWriter> writer = services.find(ReportWriter.class);
-        if (writer.isPresent()) {
-            for (Intake.Part file : writer.get().report(effective, findings)) {
-                parts.add(part(file.name(), file.bytes()));
-            }
-        }
-        List<String> names = PartNames.ofSources(opened.parts());
-        for (int i = 0; i < names.size(); i++) {
-            parts.add(part(names.get(i), opened.parts().get(i).bytes()));
-        }
-        return parts;
-    }
-
-    private static PartFile part(String name, byte[] bytes) {
-        return PartFile.of(name, PartNames.type(name), bytes);
     }
 
     private void print(PrintStream out, Register register, Receipt receipt, Campaign effective, List<PartFile> parts) {

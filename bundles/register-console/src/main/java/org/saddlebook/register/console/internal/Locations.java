@@ -35,33 +35,38 @@ final class Locations {
     static String location(Services services, Invocation invocation, Options options) throws InputException {
         Optional<String> given = options.value(OPTION);
         if (given.isPresent()) {
-            return absolute(invocation, given.get());
+            return absolute(invocation.workingFolder(), given.get());
         }
+        return location(services, invocation.workingFolder(), invocation.dataFolder());
+    }
+
+    /** The register meant when nobody names one. */
+    static String location(Services services, Path workingFolder, Path dataFolder) throws InputException {
         for (String name : new String[] {"saddlebook.register", "SADDLEBOOK_REGISTER"}) {
             Optional<String> set = services.setting(name).filter(text -> !text.isBlank());
             if (set.isPresent()) {
-                return absolute(invocation, set.get());
+                return absolute(workingFolder, set.get());
             }
         }
-        return invocation
-                .dataFolder()
-                .resolve("register")
-                .resolve("saddlebook.register")
-                .toString();
+        return dataFolder.resolve("register").resolve("saddlebook.register").toString();
     }
 
-    private static String absolute(Invocation invocation, String typed) throws InputException {
+    private static String absolute(Path workingFolder, String typed) throws InputException {
         if (typed.contains("://")) {
             return typed; // an address, for a store of another kind
         }
-        return path(invocation, typed, OPTION).toString();
+        return path(workingFolder, typed, OPTION).toString();
     }
 
     /** The path of a typed name, seen from the working folder. */
     static Path path(Invocation invocation, String typed, String argument) throws InputException {
+        return path(invocation.workingFolder(), typed, argument);
+    }
+
+    private static Path path(Path workingFolder, String typed, String argument) throws InputException {
         try {
             if (!typed.isBlank()) {
-                return invocation.workingFolder().resolve(Path.of(typed));
+                return workingFolder.resolve(Path.of(typed));
             }
         } catch (InvalidPathException e) {
             // refused below, like an empty name

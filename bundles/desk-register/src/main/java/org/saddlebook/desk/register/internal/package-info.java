@@ -1,0 +1,2 @@
+/** The panel of this bundle. */
+package org.saddlebook.desk.register.internal;

@@ -20,6 +20,7 @@ import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.console.api.EvaluateOptions;
 import org.saddlebook.console.api.ExitCode;
 import org.saddlebook.console.api.Invocation;
+import org.saddlebook.console.api.OutputFolder;
 import org.saddlebook.console.api.Verb;
 import org.saddlebook.presentation.api.ProblemText;
 

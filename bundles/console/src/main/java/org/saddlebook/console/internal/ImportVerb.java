@@ -15,6 +15,7 @@ import org.saddlebook.console.api.EvaluateOptions;
 import org.saddlebook.console.api.ExitCode;
 import org.saddlebook.console.api.Invocation;
 import org.saddlebook.console.api.Options;
+import org.saddlebook.console.api.OutputFolder;
 import org.saddlebook.console.api.Verb;
 
 /** Makes a campaign folder of a table. */

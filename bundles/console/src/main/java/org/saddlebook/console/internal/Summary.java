@@ -7,11 +7,12 @@ import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
 
 /** Findings as text for a terminal: the barrier in a form of its own, every other section by its tree. */
-final class Summary {
+public final class Summary {
     private final PrintStream out;
     private final CautionMarks marks = new CautionMarks();
 
-    Summary(PrintStream out) {
+    /** Prints to a stream. */
+    public Summary(PrintStream out) {
         this.out = out;
     }
 
@@ -20,7 +21,7 @@ final class Summary {
      *
      * @param understood sentences on how the input was read
      */
-    void print(List<String> understood, Findings findings) {
+    public void print(List<String> understood, Findings findings) {
         out.println(findings.campaignTitle());
         for (String sentence : understood) {
             Lines.wrapped(out, "  ", sentence);

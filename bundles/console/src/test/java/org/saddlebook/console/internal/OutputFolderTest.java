@@ -13,6 +13,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.saddlebook.api.problem.InputException;
+import org.saddlebook.console.api.OutputFolder;
 
 class OutputFolderTest {
     private static final byte[] ONE = {1};

@@ -31,11 +31,20 @@ public final class EntryFindingsComponent implements EntryFindings {
 
     @Override
     public byte[] findings(long entry, Invocation invocation, Options options) throws InputException, IOException {
+        return part(entry, PartNames.FINDINGS, invocation, options);
+    }
+
+    @Override
+    public byte[] campaign(long entry, Invocation invocation, Options options) throws InputException, IOException {
+        return part(entry, PartNames.CAMPAIGN, invocation, options);
+    }
+
+    private byte[] part(long entry, String name, Invocation invocation, Options options)
+            throws InputException, IOException {
         try (Register register = Locations.open(services, invocation, options, Opening.EXISTING)) {
             Entry found = register.show(entry);
-            PartEntry part = register.part(found, PartNames.FINDINGS)
-                    .orElseThrow(
-                            () -> new RegisterException("Entry " + entry + " has no part " + PartNames.FINDINGS + "."));
+            PartEntry part = register.part(found, name)
+                    .orElseThrow(() -> new RegisterException("Entry " + entry + " has no part " + name + "."));
             return register.read(part);
         }
     }

@@ -1,4 +1,4 @@
-package org.saddlebook.console.internal;
+package org.saddlebook.console.api;
 
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
@@ -9,16 +9,15 @@ import java.util.Map;
 import java.util.TreeSet;
 import java.util.stream.Stream;
 import org.saddlebook.api.problem.InputException;
-import org.saddlebook.console.api.Options;
 
 /**
  * The folder that {@code --out} names. Everything is written into a folder beside it, which then takes its place: there is
  * never half a result. A folder is only replaced when each file in it was written by an earlier result; the list of them
  * is kept in {@value #LIST}.
  */
-final class OutputFolder {
+public final class OutputFolder {
     /** Names of the files of a result, one a line. */
-    static final String LIST = ".saddlebook-result";
+    public static final String LIST = ".saddlebook-result";
 
     private final Path folder;
 
@@ -27,18 +26,18 @@ final class OutputFolder {
     }
 
     /** Files to write. */
-    static final class Content {
+    public static final class Content {
         private final Map<String, byte[]> files = new LinkedHashMap<>();
 
         /** Adds a file of the result. */
-        void add(String name, byte[] bytes) {
+        public void add(String name, byte[] bytes) {
             if (files.putIfAbsent(name, bytes) != null) {
                 throw new IllegalArgumentException("two files of the name " + name);
             }
         }
 
         /** Adds a source of the campaign, which keeps its own name. */
-        void addSource(String name, byte[] bytes) throws InputException {
+        public void addSource(String name, byte[] bytes) throws InputException {
             if (files.putIfAbsent(name, bytes) != null) {
                 throw Options.wrong(
                         "name-taken",
@@ -55,7 +54,7 @@ final class OutputFolder {
      *
      * @throws InputException it holds files that no result wrote
      */
-    static OutputFolder at(Path folder) throws InputException, IOException {
+    public static OutputFolder at(Path folder) throws InputException, IOException {
         Path real = Files.exists(folder)
                 ? folder.toRealPath()
                 : folder.toAbsolutePath().normalize();
@@ -71,12 +70,12 @@ final class OutputFolder {
     }
 
     /** Where the result is, for people. */
-    Path path() {
+    public Path path() {
         return folder;
     }
 
     /** Writes everything, or nothing. */
-    void write(Content content) throws InputException, IOException {
+    public void write(Content content) throws InputException, IOException {
         refuseForeign(); // somebody may have put something there meanwhile
         Path parent = Files.createDirectories(folder.getParent());
         Path fresh = Files.createTempDirectory(parent, ".saddlebook-");

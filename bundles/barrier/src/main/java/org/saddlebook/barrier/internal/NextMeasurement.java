@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import org.saddlebook.api.findings.Node;
+import org.saddlebook.estimation.api.FisherF;
 import org.saddlebook.estimation.api.StudentT;
 
 /**
@@ -11,8 +12,9 @@ import org.saddlebook.estimation.api.StudentT;
  * most per instrument time, and how many runs reach the tolerance. One run at T adds {@code w g g'} to the information
  * about the parameters, g the gradient of ln k there, so the variance at the target falls by
  * {@code r w (c'Vg)^2 / (1 + r w g'Vg)} for r repeats (A. C. Atkinson, A. N. Donev and R. D. Tobias, Optimum Experimental
- * Designs, with SAS, Oxford 2007, chapter 11); half-widths take the t quantile of the enlarged degrees of freedom and the
- * scale as it is estimated now. Errors common to all runs do not fall with their number and stay in the promise.
+ * Designs, with SAS, Oxford 2007, chapter 11); half-widths take the t quantile of the enlarged degrees of freedom. The scale
+ * that r more runs will estimate is unknown: from s with nu degrees of freedom it becomes
+ * {@code s sqrt((nu + r F) / (nu + r))}, F distributed as F(r, nu), and the promise takes its median. Errors common to all runs do not fall with their number and stay in the promise.
  */
 final class NextMeasurement {
     private static final int MOST_REPEATS = 6;
@@ -25,6 +27,7 @@ final class NextMeasurement {
     private final boolean onSameSensor;
     private final double[] temperatures;
     private final boolean equalCost;
+    private final double[] changes = new double[MOST_RUNS + 1];
 
     /**
      * Where and at what cost one may measure.
@@ -94,7 +97,8 @@ final class NextMeasurement {
         }
     }
 
-    private record Plan(double kelvin, int repeats, double halfWidth, double cost, double merit) {}
+    /** Runs to make; {@code halfWidth} is promised for ln k at the target. */
+    record Plan(double kelvin, int repeats, double halfWidth, double cost, double merit) {}
 
     /** The plan for one target, K. */
     Node.Group node(double targetKelvin) {
@@ -162,24 +166,52 @@ final class NextMeasurement {
         State state = start;
         double half = present;
         while (half > goal && state.added() < MOST_RUNS) {
-            State next = null;
-            double smallest = Double.POSITIVE_INFINITY;
-            for (double kelvin : temperatures) {
-                State tried = state.with(gradient(kelvin), weight(kelvin), 1);
-                double width = halfWidth(tried, c, shared);
-                if (width < smallest) {
-                    smallest = width;
-                    next = tried;
-                }
-            }
-            state = next;
-            half = smallest;
+            state = narrowest(state, c).after();
+            half = halfWidth(state, c, shared);
         }
         return half <= goal ? state.added() : 0;
     }
 
+    private record Run(double kelvin, State after) {}
+
+    /** One run where it narrows the interval most, whatever it costs. */
+    private Run narrowest(State state, double[] c) {
+        Run best = null;
+        double smallest = Double.POSITIVE_INFINITY;
+        for (double kelvin : temperatures) {
+            State tried = state.with(gradient(kelvin), weight(kelvin), 1);
+            double variance = tried.form(c, c);
+            if (best == null || variance < smallest) {
+                smallest = variance;
+                best = new Run(kelvin, tried);
+            }
+        }
+        return best;
+    }
+
+    /** Temperatures of so many runs, each where it narrows the interval at the target most, whatever it costs; K. */
+    double[] sequence(double targetKelvin, int runs) {
+        double[] c = gradient(targetKelvin);
+        State state = new State(law.fit().unscaledCovariance(), 0);
+        double[] kelvin = new double[runs];
+        for (int i = 0; i < runs; i++) {
+            Run next = narrowest(state, c);
+            kelvin[i] = next.kelvin();
+            state = next.after();
+        }
+        return kelvin;
+    }
+
+    /** The best next runs; their half-width is that of ln k. */
+    Plan plan(double targetKelvin) {
+        double[] c = gradient(targetKelvin);
+        double shared = law.lnRate(targetKelvin, onSameSensor).sharedVariance();
+        State now = new State(law.fit().unscaledCovariance(), 0);
+        return best(now, c, shared, halfWidth(now, c, shared));
+    }
+
     private double halfWidth(State state, double[] c, double shared) {
-        double variance = state.form(c, c) * law.scale().orElseThrow();
+        double variance = state.form(c, c) * law.scale().orElseThrow() * change(state.added());
         OptionalDouble dof = law.degreesOfFreedom().isPresent()
                 ? OptionalDouble.of(law.degreesOfFreedom().getAsDouble() + state.added())
                 : OptionalDouble.empty();
@@ -187,6 +219,18 @@ final class NextMeasurement {
             return new FittedLaw.Estimate(0, OptionalDouble.of(variance), shared).halfWidth(level, dof);
         }
         return StudentT.quantile(0.5 + level / 2, dof.getAsDouble()) * Math.sqrt(variance);
+    }
+
+    /** The median of the estimated scale after so many more runs, over the present one. */
+    private double change(int added) {
+        if (added == 0 || law.data().stated()) {
+            return 1;
+        }
+        if (!(changes[added] > 0)) {
+            int dof = law.fit().degreesOfFreedom();
+            changes[added] = (dof + added * FisherF.quantile(0.5, added, dof)) / (dof + added);
+        }
+        return changes[added];
     }
 
     private double sharedAlone(double shared) {

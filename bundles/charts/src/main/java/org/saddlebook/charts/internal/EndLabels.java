@@ -82,9 +82,11 @@ final class EndLabels {
 
     /**
      * Names within the drawing area, for a figure without room beside it: ending left of the line's end, above a line that
-     * rises to it and below one that falls, each on a patch of paper with a leader to its line.
+     * rises to it and below one that falls, each on a patch of paper with a leader to its line; beside a wall, never on it.
+     *
+     * @param walls horizontal coordinates of walls
      */
-    void drawInside(Graphics2D g, Palette palette, Rectangle2D area) {
+    void drawInside(Graphics2D g, Palette palette, Rectangle2D area, List<Double> walls) {
         for (Label label : labels) {
             boolean above = label.before >= label.endY;
             label.top = above ? label.endY - label.height() - 8 : label.endY + 8;
@@ -96,6 +98,10 @@ final class EndLabels {
             double wide = 0;
             for (String line : label.lines) {
                 wide = Math.max(wide, Lettering.width(line, SIZE, false));
+            }
+            for (double wall : walls) {
+                boolean onIt = wall > right - wide - 8 && wall < right + 8;
+                right = onIt && wall - 10 - wide > area.getMinX() ? wall - 10 : right;
             }
             g.setPaint(palette.paper());
             g.fill(new Rectangle2D.Double(right - wide - 2, label.top, wide + 4, label.height()));

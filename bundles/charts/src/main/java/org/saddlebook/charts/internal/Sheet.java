@@ -272,7 +272,15 @@ final class Sheet {
             }
         }
         if (namesInside) {
-            labels.drawInside(g, palette, area);
+            List<Double> walls = new ArrayList<>();
+            for (Layer layer : layers) {
+                if (layer.kind() == Layer.Kind.WALL || layer.kind() == Layer.Kind.VERTICAL_MARK) {
+                    for (double x : layer.x()) {
+                        walls.add(horizontal(x));
+                    }
+                }
+            }
+            labels.drawInside(g, palette, area, walls);
         } else {
             labels.draw(g, palette, area.getMaxX(), area.getMinY(), area.getMaxY());
         }

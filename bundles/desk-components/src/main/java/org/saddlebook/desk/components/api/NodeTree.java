@@ -91,15 +91,29 @@ public final class NodeTree extends JPanel {
                     || (value instanceof Node.Items list && list.items().isEmpty());
             if (!nothing) {
                 String title = LeafText.key(member.getKey());
+                // What begins with a table has its name above that.
                 boolean ownTitle = value instanceof Node.Table
+                        || value instanceof Node.Matrix
+                        || (value instanceof Node.Group inner && hasLeaves(inner))
                         || (value instanceof Node.Items list
-                                && TableContent.ofLikeGroups(list.items(), numbers).isPresent());
+                                && TableContent.ofLikeGroups(list.items(), numbers)
+                                        .isPresent());
                 if (!ownTitle) {
                     put(new Sentence("", title, Sentence.Rank.HEADING, context.ink()), depth);
                 }
                 add(value, title, depth + 1);
             }
         }
+    }
+
+    private static boolean hasLeaves(Node.Group group) {
+        for (Node member : group.members().values()) {
+            if (LeafText.isLeaf(member)
+                    && !(member instanceof Node.Text text && text.value().isEmpty())) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private void items(List<Node> items, String name, int depth) {

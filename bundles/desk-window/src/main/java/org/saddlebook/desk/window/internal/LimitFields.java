@@ -79,7 +79,7 @@ final class LimitFields {
                     words,
                     "Limit " + number + ", " + kind + ": " + words,
                     text.get(),
-                    key.equals("title") || key.endsWith("Title") ? 14 : 7,
+                    key.equals("title") || key.endsWith("Title") ? 9 : 6,
                     typed -> set(index, kind, key, member.getValue(), text.get(), typed));
             first = first.isPresent() ? first : Optional.of(field);
         }

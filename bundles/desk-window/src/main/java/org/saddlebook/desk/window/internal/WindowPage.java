@@ -6,6 +6,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
 import javax.swing.JComponent;
 import javax.swing.JPanel;
 import javax.swing.JScrollPane;
@@ -26,9 +28,15 @@ import org.saddlebook.desk.components.api.TableContent;
 import org.saddlebook.desk.components.api.TableContent.Cell;
 import org.saddlebook.desk.components.api.TableContent.Column;
 import org.saddlebook.desk.components.api.TableView;
+import org.saddlebook.presentation.api.QuantityText;
+import org.saddlebook.presentation.api.Rounding;
 
 /** The open stratum: headroom, the answer, the limits to change, intervals, and everything else. */
 final class WindowPage {
+    /** Members of the section that this page shows in its own way. */
+    private static final Set<String> SHOWN =
+            Set.of("answer", "figures", "level", "range", "draws", "intervals", "best", "limits", "rateLaw");
+
     private final DeskContext context;
     private final DeskComponents components;
     private final Page page;
@@ -37,6 +45,8 @@ final class WindowPage {
     private final Sentence answer;
     private final LimitFields limits;
     private final TableView intervals;
+    private final Sentence best;
+    private final TableView limitTable;
     private final JPanel rest;
     private final CautionList cautions;
 
@@ -49,7 +59,9 @@ final class WindowPage {
         limits = new LimitFields(context);
         page.put(limits.component());
         intervals = page.put(8, components.table("Where all limits hold", context));
-        rest = page.put(new JPanel(new BorderLayout()));
+        best = page.put(new Sentence("Best temperature", "", Rank.TEXT, context.ink()));
+        limitTable = page.put(8, components.table("Each limit by itself", context));
+        rest = page.put(8, new JPanel(new BorderLayout()));
         rest.setOpaque(false);
         cautions = page.put(new CautionList(context.ink()));
         scroll = page.scrolling();
@@ -73,6 +85,8 @@ final class WindowPage {
         } else {
             figure.clear();
             intervals.show(TableContent.EMPTY);
+            limitTable.show(TableContent.EMPTY);
+            best.say("");
             cautions.show(List.of(), Map.of());
         }
         page.revalidate();
@@ -88,12 +102,12 @@ final class WindowPage {
             figure.clear();
         }
         intervals.show(intervals(body, numbers));
+        best.say(best(body));
+        limitTable.show(limitTable(body, numbers));
         Map<String, Node> others = new LinkedHashMap<>();
         if (body instanceof Node.Group group) {
             for (Map.Entry<String, Node> member : group.members().entrySet()) {
-                boolean shown =
-                        member.getKey().equals("answer") || member.getKey().equals("figures");
-                if (!shown) {
+                if (!SHOWN.contains(member.getKey())) {
                     others.put(member.getKey(), member.getValue());
                 }
             }
@@ -133,6 +147,34 @@ final class WindowPage {
                     Cell.of(end(interval, "upperEnd"))));
         }
         return rows.isEmpty() ? TableContent.EMPTY : new TableContent(columns, rows);
+    }
+
+    private static TableContent limitTable(Node body, CautionNumbers numbers) {
+        List<Column> columns = List.of(
+                new Column("limit", "", false),
+                new Column("what it says", "", false),
+                new Column("holds from", "K", false),
+                new Column("to", "K", false),
+                new Column("binds", "", false));
+        List<List<Cell>> rows = new ArrayList<>();
+        for (Node limit : Nodes.items(body, "limits")) {
+            rows.add(List.of(
+                    Cell.of(Nodes.text(limit, "title")),
+                    Cell.of(Nodes.text(limit, "statement")),
+                    cell(limit, "aloneFrom", numbers),
+                    cell(limit, "aloneTo", numbers),
+                    Cell.of(Nodes.text(limit, "binds"))));
+        }
+        return rows.isEmpty() ? TableContent.EMPTY : new TableContent(columns, rows);
+    }
+
+    private static String best(Node body) {
+        Optional<Node.Quantity> at = Nodes.quantity(body, "best", "temperature");
+        OptionalDouble probability = Nodes.number(body, "best", "probability");
+        return at.isEmpty() || probability.isEmpty()
+                ? ""
+                : "All limits hold most surely at " + QuantityText.temperature(at.get()) + ": with probability "
+                        + Rounding.significant(probability.getAsDouble(), 3) + ".";
     }
 
     private static Cell cell(Node interval, String key, CautionNumbers numbers) {

@@ -141,6 +141,14 @@ final class ClarkeGlew {
         return 2 * (scaleStated ? Normal.upperTail(ratio) : StudentT.upperTail(ratio, fit.degreesOfFreedom()));
     }
 
+    /** Covariance of ln K at two temperatures. */
+    double covarianceOfLnK(double kelvin, double other) {
+        int n = fit.parameterCount();
+        double[] first = java.util.Arrays.copyOf(row(kelvin, theta), n);
+        double[] second = java.util.Arrays.copyOf(row(other, theta), n);
+        return scale() * fit.predictionCovariance(first, second) / (Constants.GAS * Constants.GAS);
+    }
+
     /** Covariance of ΔH and ΔS at θ, (J/mol)(J/(mol K)). */
     double covarianceAtTheta() {
         int n = fit.parameterCount();

@@ -25,6 +25,7 @@ import org.saddlebook.units.api.Units;
  * @param standardState of the results, for people
  * @param converted whether a Kc of gases was turned into a Kp at 1 bar
  * @param calorimetric an enthalpy measured in another way; empty for none
+ * @param gases products minus reactants in the gas; empty where no equation is stated
  */
 record EquilibriumTable(
         List<Double> kelvin,
@@ -33,7 +34,8 @@ record EquilibriumTable(
         String kind,
         String standardState,
         boolean converted,
-        Optional<Calorimetric> calorimetric) {
+        Optional<Calorimetric> calorimetric,
+        OptionalDouble gases) {
     private static final List<String> KEYS = List.of("kind", "standardState", "reaction", "rows", "dH");
     private static final List<String> FORMS = List.of("K", "lnK", "pK");
 
@@ -98,7 +100,20 @@ record EquilibriumTable(
                 kind,
                 convert ? "1 bar" : standard,
                 convert,
-                calorimetric);
+                calorimetric,
+                settings.text("reaction").isPresent() ? OptionalDouble.of(gases) : OptionalDouble.empty());
+    }
+
+    /** The standard state of the constants, where it is a pressure or a concentration. */
+    StandardState standard() throws Refusal {
+        if (!kind.equals("Kp") && !kind.equals("Kc")) {
+            throw new Refusal("Amounts and rates need a Kp or a Kc; " + kind + " has another standard state.");
+        }
+        try {
+            return Units.standardState(standardState);
+        } catch (UnitException wrong) {
+            throw new Refusal("The standard state of the equilibrium table cannot be used: " + wrong.found() + ".");
+        }
     }
 
     private static double constant(SettingsReader row, int i) throws Refusal {

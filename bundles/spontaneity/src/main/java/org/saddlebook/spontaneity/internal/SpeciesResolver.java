@@ -13,6 +13,7 @@ import org.saddlebook.reaction.api.Equation;
 import org.saddlebook.reaction.api.Fraction;
 import org.saddlebook.reaction.api.ReactionException;
 import org.saddlebook.reaction.api.Species;
+import org.saddlebook.thermo.data.api.BrokenSourceException;
 import org.saddlebook.thermo.data.api.PowerSegment;
 import org.saddlebook.thermo.data.api.SpeciesData;
 import org.saddlebook.thermo.data.api.SpeciesSource;
@@ -25,6 +26,11 @@ final class SpeciesResolver {
     private static final double STATED_LOWEST = 200;
 
     private static final double STATED_HIGHEST = 1000;
+
+    /** Beyond these a stated value is a slip of unit (common practice, no source): J/mol and J/(mol K). */
+    private static final double LARGEST_ENTHALPY = 2e7;
+
+    private static final double LARGEST_ENTROPY = 20_000;
 
     private final List<SpeciesSource> sources;
     private final Optional<String> wanted;
@@ -81,6 +87,10 @@ final class SpeciesResolver {
         SettingsReader reader = new SettingsReader(node, name, List.of("dHf", "S", "Cp", "lower", "upper"));
         SettingsReader.Si h = reader.quantity("dHf", Dimension.MOLAR_ENERGY, "kJ/mol");
         SettingsReader.Si s = reader.quantity("S", Dimension.MOLAR_ENTROPY, "J/(mol.K)");
+        if (Math.abs(h.value()) > LARGEST_ENTHALPY || Math.abs(s.value()) > LARGEST_ENTROPY) {
+            throw new Refusal(
+                    "In " + name + " dHf or S is larger than any known one; check whether J and kJ were mixed.");
+        }
         SpeciesData data;
         if (reader.node("Cp").isPresent()) {
             double cp =
@@ -109,7 +119,7 @@ final class SpeciesResolver {
         List<Participant> found = new ArrayList<>();
         Set<String> others = new TreeSet<>();
         for (SpeciesSource source : sources) {
-            for (SpeciesData data : source.find(species)) {
+            for (SpeciesData data : asked(source, species)) {
                 boolean fits = wanted.isEmpty()
                         || wanted.get().equals(source.id())
                         || wanted.get().equals(data.source());
@@ -134,6 +144,14 @@ final class SpeciesResolver {
         return found.get(0);
     }
 
+    private static List<SpeciesData> asked(SpeciesSource source, Species species) throws Refusal {
+        try {
+            return source.find(species);
+        } catch (BrokenSourceException broken) {
+            throw new Refusal("The species source " + source.id() + " cannot be used. " + broken.getMessage());
+        }
+    }
+
     private String missing(Species species, Set<String> others) throws Refusal {
         String text = species.text();
         if (!others.isEmpty()) {
@@ -142,7 +160,7 @@ final class SpeciesResolver {
         }
         Set<String> phases = new TreeSet<>();
         for (SpeciesSource source : sources) {
-            for (SpeciesData data : source.find(new Species(species.formula(), Optional.empty(), ""))) {
+            for (SpeciesData data : asked(source, new Species(species.formula(), Optional.empty(), ""))) {
                 phases.add(data.species().text());
             }
         }

@@ -41,6 +41,10 @@ final class SpontaneityCautions {
                 "Gases and solutions are taken as ideal, pure phases as pure, and no other reaction as taking part; at high pressure or ionic strength the composition at equilibrium is another.";
             case JUMP ->
                 "ΔG changes sign in a jump where two sets of data of one species meet: no temperature of equilibrium is found there, look at the data.";
+            case ConsistencyCautions.REVERSIBLE ->
+                "kf/kr = K holds for elementary steps, and for overall laws only where the law is proven to be reversible in this form at equilibrium; the factor 1 − Q/K belongs to the elementary step.";
+            case ConsistencyCautions.INDEPENDENT ->
+                "Rate constants of both directions and K are taken as measured independently; errors that they share, such as one thermometer or one stock solution, are not in the test.";
             default -> CautionText.of(id);
         };
     }

@@ -31,10 +31,15 @@ public final class SpontaneityComponent implements Analysis {
     public SpontaneityComponent(
             @Reference(cardinality = ReferenceCardinality.MULTIPLE, policyOption = ReferencePolicyOption.GREEDY)
                     List<SpeciesSource> sources) {
+        this.sources = ordered(sources);
+    }
+
+    /** In order of id, the curated one last. */
+    static List<SpeciesSource> ordered(List<SpeciesSource> sources) {
         List<SpeciesSource> ordered = new ArrayList<>(sources);
         ordered.sort(Comparator.comparing((SpeciesSource source) -> source.id().equals("curated"))
                 .thenComparing(SpeciesSource::id));
-        this.sources = List.copyOf(ordered);
+        return List.copyOf(ordered);
     }
 
     @Override

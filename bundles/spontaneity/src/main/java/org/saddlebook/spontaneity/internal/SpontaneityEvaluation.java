@@ -130,6 +130,10 @@ final class SpontaneityEvaluation {
         SpontaneityEvaluation line = new SpontaneityEvaluation(campaign, table.stated());
         Map<String, Node> members = new LinkedHashMap<>(line.body().members());
         members.putAll(table.members());
+        members.put(
+                "figures",
+                new Node.Items(
+                        List.of(line.figure(), table.figure(SpontaneityCautions.ofGibbs(table.stated(), false)))));
         if (settings.get("equilibrium").isPresent()) {
             line.equilibrium(
                     members, EquilibriumReader.named(settings.get("equilibrium").get(), Optional.of(table.standard())));
@@ -300,7 +304,8 @@ final class SpontaneityEvaluation {
                 SpontaneityCautions.ofGibbs(stated, false));
     }
 
-    private static void collect(Node node, Map<String, String> texts) {
+    /** Every caution id of a tree with its text, in order of first use. */
+    static void collect(Node node, Map<String, String> texts) {
         if (node instanceof Node.Group group) {
             group.members().values().forEach(member -> collect(member, texts));
         } else if (node instanceof Node.Items items) {

@@ -7,18 +7,20 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.saddlebook.api.campaign.Campaign;
+import org.saddlebook.api.findings.Axis;
 import org.saddlebook.api.findings.Interval;
+import org.saddlebook.api.findings.Layer;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.model.StandardState;
 import org.saddlebook.api.quantity.Constants;
 import org.saddlebook.estimation.api.Normal;
 import org.saddlebook.estimation.api.StudentT;
-import org.saddlebook.units.api.UnitException;
-import org.saddlebook.units.api.Units;
+import org.saddlebook.presentation.api.Rounding;
 
 /** van 't Hoff and Clarke-Glew from an equilibrium table, and whether the data show a heat capacity of reaction. */
 final class TableEvaluation {
     private static final int STEPS = 400;
+    private static final int CURVE = 80;
 
     private final EquilibriumTable table;
     private final double level;
@@ -68,15 +70,7 @@ final class TableEvaluation {
 
     /** The standard state of the constants, where amounts follow from it. */
     StandardState standard() throws Refusal {
-        if (!table.kind().equals("Kp") && !table.kind().equals("Kc")) {
-            throw new Refusal("The composition at equilibrium needs a Kp or a Kc; " + table.kind()
-                    + " has another standard state.");
-        }
-        try {
-            return Units.standardState(table.standardState());
-        } catch (UnitException wrong) {
-            throw new Refusal("The standard state of the equilibrium table cannot be used: " + wrong.found() + ".");
-        }
+        return table.standard();
     }
 
     private ClarkeGlew line() throws Refusal {
@@ -115,6 +109,68 @@ final class TableEvaluation {
         return members;
     }
 
+    /** ln K against 1/T: measured points, the straight line and, where it was fitted, the bent one with its band. */
+    Node figure(List<String> cautions) throws Refusal {
+        ClarkeGlew line = line();
+        Optional<ClarkeGlew> bent = ClarkeGlew.fit(table, theta(), true);
+        double[] x = new double[CURVE + 1];
+        for (int i = 0; i < x.length; i++) {
+            x[i] = i == CURVE ? upper : lower + (upper - lower) * i / CURVE;
+        }
+        List<Layer> layers = new ArrayList<>();
+        ClarkeGlew banded = bent.orElse(line);
+        double q = quantile(banded);
+        double[] low = new double[x.length];
+        double[] high = new double[x.length];
+        double[] y = lnK(banded, x);
+        for (int i = 0; i < x.length; i++) {
+            double half = q * Math.sqrt(Math.max(0, banded.covarianceOfLnK(x[i], x[i])));
+            low[i] = y[i] - half;
+            high[i] = y[i] + half;
+        }
+        layers.add(new Layer(Layer.Kind.CONFIDENCE_BAND, Rounding.percent(level), x, y, low, high));
+        layers.add(Layer.of(Layer.Kind.LINE, "van 't Hoff", x, lnK(line, x)));
+        if (bent.isPresent()) {
+            layers.add(Layer.of(Layer.Kind.LINE, "with heat capacity", x, y));
+        }
+        int n = table.kelvin().size();
+        double[] t = new double[n];
+        double[] measured = new double[n];
+        double[] down = new double[n];
+        double[] up = new double[n];
+        for (int i = 0; i < n; i++) {
+            t[i] = table.kelvin().get(i);
+            measured[i] = table.lnK().get(i);
+            double u =
+                    table.uncertainty().isPresent() ? table.uncertainty().get().get(i) : 0;
+            down[i] = measured[i] - q * u;
+            up[i] = measured[i] + q * u;
+        }
+        layers.add(new Layer(Layer.Kind.MEASURED, "", t, measured, down, up));
+        return new Node.Figure(
+                "equilibrium-constant",
+                "ln K against temperature, measured and fitted",
+                new Axis("temperature", "K", Axis.Scale.RECIPROCAL_TEMPERATURE),
+                new Axis("ln K", "1", Axis.Scale.LINEAR),
+                layers,
+                cautions);
+    }
+
+    private static double[] lnK(ClarkeGlew fit, double[] kelvin) {
+        double[] y = new double[kelvin.length];
+        for (int i = 0; i < y.length; i++) {
+            y[i] = -fit.gibbs(kelvin[i]).value() / (Constants.GAS * kelvin[i]);
+        }
+        return y;
+    }
+
+    private double quantile(ClarkeGlew fit) {
+        double probability = 0.5 + level / 2;
+        return fit.scaleStated()
+                ? Normal.quantile(probability)
+                : StudentT.quantile(probability, fit.degreesOfFreedom());
+    }
+
     private Node.Group group(ClarkeGlew fit) {
         double theta = fit.theta();
         Map<String, Node> members = new LinkedHashMap<>();
@@ -150,10 +206,7 @@ final class TableEvaluation {
     }
 
     private Node.Quantity quantity(ClarkeGlew.Estimate estimate, String unit, ClarkeGlew fit) {
-        double probability = 0.5 + level / 2;
-        double q = fit.scaleStated()
-                ? Normal.quantile(probability)
-                : StudentT.quantile(probability, fit.degreesOfFreedom());
+        double q = quantile(fit);
         double u = estimate.uncertainty();
         return Node.Quantity.of(estimate.value(), unit, u)
                 .withInterval(Interval.between(

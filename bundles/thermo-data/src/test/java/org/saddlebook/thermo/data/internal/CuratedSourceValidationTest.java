@@ -10,6 +10,7 @@ import java.util.List;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.saddlebook.reaction.api.Species;
@@ -180,5 +181,22 @@ class CuratedSourceValidationTest {
         assertEquals(1, SOURCE.find(Species.parse("C(s)")).size(), "graphite answers to any solid carbon");
         assertEquals(0, SOURCE.find(Species.parse("C(s,diamond)")).size());
         assertEquals(0, SOURCE.find(Species.parse("Xe(g)")).size());
+    }
+
+    /** Values at 298.15 K of the NIST Chemistry WebBook (SRD 69), kJ/mol and J/(mol K); from memory. */
+    @ParameterizedTest
+    @CsvSource({
+        "CH4, -74.6, 186.3, 0.4",
+        "CH3OH, -201.0, 239.9, 1.5",
+        "C2H2, 227.4, 200.9, 1.5",
+        "C2H4, 52.4, 219.3, 0.6",
+        "C2H6, -84.0, 229.2, 0.8"
+    })
+    void nasa7OfHydrocarbonsHaveTheirEnthalpiesOfFormation(String species, double h, double s, double reach)
+            throws Exception {
+        SpeciesData data = new CuratedSource().find(Species.parse(species)).get(0);
+        assertEquals("nasa-7", data.source());
+        assertEquals(h, data.nearest(298.15).enthalpy(298.15) / 1000, reach);
+        assertEquals(s, data.nearest(298.15).entropy(298.15), 0.6);
     }
 }

@@ -30,6 +30,12 @@ final class DigitsTable {
         try {
             Path folder = Files.createDirectories(Path.of("target", "reference"));
             Files.write(folder.resolve(name), lines, StandardCharsets.UTF_8);
+            List<String> fragment = new ArrayList<>();
+            fragment.add("## Digits reached on certified sets: " + name.substring(0, name.indexOf('.')));
+            fragment.add("");
+            fragment.addAll(lines);
+            Path checks = Files.createDirectories(Path.of("target", "checks"));
+            Files.write(checks.resolve("digits-" + name), fragment, StandardCharsets.UTF_8);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }

@@ -214,7 +214,7 @@ class ConsoleContractTest {
             many.append(300 + i % 97).append(",1.").append(i % 89 + 10).append("e-4\n");
         }
         Files.writeString(home.resolve("many.csv"), many);
-        InstalledProduct.Running running = product.start("evaluate", "many.csv", "--out", "result");
+        InstalledProduct.Running running = product.startInterruptible("evaluate", "many.csv", "--out", "result");
         Path framework = home.resolve("cache/saddlebook/framework");
         long deadline = System.nanoTime() + 60_000_000_000L;
         while (!Files.isDirectory(framework) && running.process().isAlive() && System.nanoTime() < deadline) {

@@ -62,11 +62,31 @@ final class InstalledProduct {
     record Running(Process process, Path out, Path err) {}
 
     Running start(String... arguments) throws IOException {
+        return start(List.of(), arguments);
+    }
+
+    /**
+     * Starts a command that an interrupt reaches. A build that runs in the background of a shell ignores interrupts, and so
+     * does every process that it starts.
+     */
+    Running startInterruptible(String... arguments) throws IOException, InterruptedException {
+        List<String> reset = List.of("env", "--default-signal=INT");
+        List<String> trial = new ArrayList<>(reset);
+        trial.add("true");
+        int known = new ProcessBuilder(trial)
+                .redirectErrorStream(true)
+                .redirectOutput(ProcessBuilder.Redirect.DISCARD)
+                .start()
+                .waitFor();
+        return start(known == 0 ? reset : List.of(), arguments);
+    }
+
+    private Running start(List<String> prefix, String... arguments) throws IOException {
         Files.createDirectories(home);
         Path out = Files.createTempFile(home, "out", ".txt");
         Path err = Files.createTempFile(home, "err", ".txt");
-        List<String> command =
-                new ArrayList<>(List.of(product.resolve("bin/saddlebook").toString()));
+        List<String> command = new ArrayList<>(prefix);
+        command.add(product.resolve("bin/saddlebook").toString());
         command.addAll(List.of(arguments));
         ProcessBuilder builder = new ProcessBuilder(command)
                 .directory(home.toFile())

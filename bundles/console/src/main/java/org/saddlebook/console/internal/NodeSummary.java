@@ -1,6 +1,8 @@
 package org.saddlebook.console.internal;
 
 import java.io.PrintStream;
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
@@ -11,6 +13,8 @@ import org.saddlebook.presentation.api.UnitText;
 
 /** Prints any tree of findings: a section of a bundle that nobody here knows reads as well as our own. */
 final class NodeSummary {
+    private static final int DIGITS = 6;
+
     private final PrintStream out;
     private final CautionMarks marks;
 
@@ -153,7 +157,14 @@ final class NodeSummary {
             return text + marks.marks(quantity.cautions());
         }
         if (node instanceof Node.Scalar scalar) {
-            return Rounding.shortest(scalar.value());
+            return Rounding.shortest(shown(scalar.value()));
+        }
+        if (node instanceof Node.Items items && isShort(items)) {
+            StringBuilder list = new StringBuilder();
+            for (Node item : items.items()) {
+                list.append(list.length() == 0 ? "" : ", ").append(line("", item));
+            }
+            return list.toString();
         }
         if (node instanceof Node.Flag flag) {
             return flag.value() ? "yes" : "no";
@@ -165,7 +176,26 @@ final class NodeSummary {
         return node instanceof Node.Quantity
                 || node instanceof Node.Scalar
                 || node instanceof Node.Flag
-                || node instanceof Node.Text;
+                || node instanceof Node.Text
+                || (node instanceof Node.Items items && isShort(items));
+    }
+
+    /** Plain numbers read better one behind the other. */
+    private static boolean isShort(Node.Items items) {
+        for (Node item : items.items()) {
+            if (!(item instanceof Node.Scalar)) {
+                return false;
+            }
+        }
+        return !items.items().isEmpty();
+    }
+
+    /** Statistics have more digits than anybody reads; whole numbers keep theirs, and 0.9999999 is not 1; files keep all. */
+    private static double shown(double value) {
+        double rounded = value == Math.rint(value)
+                ? value
+                : new BigDecimal(value).round(new MathContext(DIGITS)).doubleValue();
+        return rounded == Math.rint(rounded) ? value : rounded;
     }
 
     private static boolean isEmpty(Node node) {

@@ -26,13 +26,16 @@ final class Page {
         Tools tools = new Tools(campaign, findings, numbers, shelf, "in-short");
         body.append(stratum("stratum short", "In short", InShort.html(findings, tools), tools));
         tools = new Tools(campaign, findings, numbers, shelf, "measured");
-        body.append(stratum("Measured", Measured.html(campaign, tools), tools));
+        // A comparison of several campaigns has none of its own.
+        boolean own = !campaign.equals(Campaign.titled(campaign.title()))
+                || findings.sections().isEmpty();
+        body.append(own ? stratum("Measured", Measured.html(campaign, tools), tools) : "");
         for (Section section : findings.sections().values()) {
             tools = new Tools(campaign, findings, numbers, shelf, "section-" + section.id());
             body.append(stratum(section.title(), parts.html(section, tools), tools));
         }
         tools = new Tools(campaign, findings, numbers, shelf, "not-stated");
-        body.append(stratum("Not stated", Unstated.html(campaign, findings), tools));
+        body.append(own ? stratum("Not stated", Unstated.html(campaign, findings), tools) : "");
         body.append(stratum("How it was computed", Provenance.html(campaign, findings, parts.lost()), tools));
         List<Intake.Part> files = new ArrayList<>();
         files.add(new Intake.Part("report.html", page(findings, body).getBytes(StandardCharsets.UTF_8)));

@@ -7,7 +7,10 @@ import org.saddlebook.api.findings.Layer;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.quantity.Unit;
 
-/** k of every reaction against 1/T with its line and the interval of the mean. */
+/**
+ * k of every reaction against 1/T: the line over the range of all of them, so that they can be compared, and the interval of
+ * the mean where the reaction was measured.
+ */
 final class SeriesFigure {
     private static final int STEPS = 48;
 
@@ -19,6 +22,12 @@ final class SeriesFigure {
         List<Layer> points = new ArrayList<>();
         double quantile = fit.scale().quantile(level);
         double s = Math.sqrt(fit.scale().variance());
+        double lowest = Double.POSITIVE_INFINITY;
+        double highest = 0;
+        for (Reaction reaction : fit.reactions()) {
+            lowest = Math.min(lowest, reaction.lowest());
+            highest = Math.max(highest, reaction.highest());
+        }
         for (int r = 0; r < fit.lines().size(); r++) {
             Reaction reaction = fit.reactions().get(r);
             ReactionLine line = fit.lines().get(r);
@@ -37,7 +46,14 @@ final class SeriesFigure {
                 upper[i] = StrictMath.exp(line.at(x) + half) / unit.factor();
             }
             layers.add(new Layer(Layer.Kind.CONFIDENCE_BAND, "", kelvin, middle, lower, upper));
-            layers.add(Layer.of(Layer.Kind.LINE, reaction.name(), kelvin, middle));
+            double[] ends = new double[STEPS + 1];
+            double[] height = new double[STEPS + 1];
+            for (int i = 0; i <= STEPS; i++) {
+                double x = 1 / lowest + (1 / highest - 1 / lowest) * i / STEPS;
+                ends[i] = 1 / x;
+                height[i] = StrictMath.exp(line.at(x)) / unit.factor();
+            }
+            layers.add(Layer.of(Layer.Kind.LINE, reaction.name(), ends, height));
             double[] t = new double[reaction.size()];
             double[] k = new double[reaction.size()];
             for (int i = 0; i < t.length; i++) {

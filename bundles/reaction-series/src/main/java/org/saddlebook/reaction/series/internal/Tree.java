@@ -26,8 +26,16 @@ final class Tree {
         return put(key, new Node.Scalar(number));
     }
 
+    /** The group; what it is and the sentence come first, the numbers behind it after them. */
     Node.Group group() {
-        return new Node.Group(members);
+        Map<String, Node> ordered = new LinkedHashMap<>();
+        for (String key : List.of("id", "sentence")) {
+            if (members.containsKey(key)) {
+                ordered.put(key, members.get(key));
+            }
+        }
+        members.forEach(ordered::putIfAbsent);
+        return new Node.Group(ordered);
     }
 
     /** A value with t or normal interval, in SI unit {@code code}. */

@@ -80,10 +80,16 @@ class SeriesValidationTest {
     void enantiomersAreThoseOfR() throws Exception {
         Node.Group body = Data.body(RatioFindings.section(
                 RatioReader.read("ee.csv", Data.EXCESS.getBytes(StandardCharsets.UTF_8)), List.of(298.15), 0.95));
-        close(-8989.847303, Data.quantity(body, "ddH").value().getAsDouble(), 1e-9);
-        close(211.5360944, Data.quantity(body, "ddH").standardUncertainty().getAsDouble(), 1e-8);
-        close(-25.43146205, Data.quantity(body, "ddS").value().getAsDouble(), 1e-9);
-        close(0.7589548102, Data.quantity(body, "ddS").standardUncertainty().getAsDouble(), 1e-8);
+        close(-8989.847303, Data.quantity(body, "enthalpyDifference").value().getAsDouble(), 1e-9);
+        close(
+                211.5360944,
+                Data.quantity(body, "enthalpyDifference").standardUncertainty().getAsDouble(),
+                1e-8);
+        close(-25.43146205, Data.quantity(body, "entropyDifference").value().getAsDouble(), 1e-9);
+        close(
+                0.7589548102,
+                Data.quantity(body, "entropyDifference").standardUncertainty().getAsDouble(),
+                1e-8);
         Node.Quantity inversion = Data.quantity(body, "inversion");
         close(353.4931372, inversion.value().getAsDouble(), 1e-9);
         Interval set = inversion.interval().orElseThrow();

@@ -182,7 +182,9 @@ class FigureVisionTest {
         }
         strokes.add(length);
         // Ochre, the fourth ink, is for thick strokes and reaches 2.7 on paper.
-        assertTrue(strongest >= (level > 1 ? 3 : 2.5), where + ": contrast of the line at level " + level + " is " + strongest);
+        assertTrue(
+                strongest >= (level > 1 ? 3 : 2.5),
+                where + ": contrast of the line at level " + level + " is " + strongest);
         return strokes;
     }
 

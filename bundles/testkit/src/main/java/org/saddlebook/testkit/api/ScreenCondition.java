@@ -54,8 +54,7 @@ final class ScreenCondition implements ExecutionCondition {
     private static Optional<String> virtual(String display) {
         Path socket = Path.of("/tmp/.X11-unix/X" + display.substring(1));
         try {
-            Process server = new ProcessBuilder(
-                            "Xvfb", display, "-screen", "0", "1366x768x24", "-nolisten", "tcp")
+            Process server = new ProcessBuilder("Xvfb", display, "-screen", "0", "1366x768x24", "-nolisten", "tcp")
                     .redirectErrorStream(true)
                     .redirectOutput(ProcessBuilder.Redirect.DISCARD)
                     .start();

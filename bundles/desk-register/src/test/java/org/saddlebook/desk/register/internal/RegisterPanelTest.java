@@ -153,7 +153,9 @@ class RegisterPanelTest {
         choose(0);
         press("Open the chosen entry beside this campaign");
         Intake.Opened opened = desk.opened().get(0);
-        assertEquals(ExampleStates.ringClosure().campaign().title(), opened.campaign().title());
+        assertEquals(
+                ExampleStates.ringClosure().campaign().title(),
+                opened.campaign().title());
         assertEquals("sources/rates.csv", opened.parts().get(0).name());
     }
 
@@ -167,8 +169,7 @@ class RegisterPanelTest {
         Pictures.onDesk(false, () -> {
             try {
                 desk.show(state.withFindings(
-                        state.campaign(),
-                        FORMAT.readFindings("other", other.getBytes(StandardCharsets.UTF_8))));
+                        state.campaign(), FORMAT.readFindings("other", other.getBytes(StandardCharsets.UTF_8))));
             } catch (org.saddlebook.api.problem.InputException e) {
                 throw new AssertionError(e);
             }

@@ -51,7 +51,7 @@ final class ConsistencyEvaluation {
         body.put("figures", new Node.Items(figures));
         Node.Group group = new Node.Group(body);
         Map<String, String> cautions = new LinkedHashMap<>();
-        SpontaneityEvaluation.collect(group, cautions);
+        CautionTexts.collect(group, cautions);
         return Section.done(SECTION, TITLE, group, cautions);
     }
 

@@ -70,7 +70,7 @@ final class SpontaneityEvaluation {
             return Section.refused(SECTION, TITLE, refusal.getMessage());
         }
         Map<String, String> cautions = new LinkedHashMap<>();
-        collect(body, cautions);
+        CautionTexts.collect(body, cautions);
         return Section.done(SECTION, TITLE, body, cautions);
     }
 
@@ -302,24 +302,5 @@ final class SpontaneityEvaluation {
                 new Axis("ΔG", "kJ/mol", Axis.Scale.LINEAR),
                 layers,
                 SpontaneityCautions.ofGibbs(stated, false));
-    }
-
-    /** Every caution id of a tree with its text, in order of first use. */
-    static void collect(Node node, Map<String, String> texts) {
-        if (node instanceof Node.Group group) {
-            group.members().values().forEach(member -> collect(member, texts));
-        } else if (node instanceof Node.Items items) {
-            items.items().forEach(item -> collect(item, texts));
-        } else if (node instanceof Node.Quantity quantity) {
-            add(quantity.cautions(), texts);
-        } else if (node instanceof Node.Figure figure) {
-            add(figure.cautions(), texts);
-        }
-    }
-
-    private static void add(List<String> ids, Map<String, String> texts) {
-        for (String id : ids) {
-            texts.putIfAbsent(id, SpontaneityCautions.text(id));
-        }
     }
 }

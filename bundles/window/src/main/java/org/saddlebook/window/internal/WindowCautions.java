@@ -14,6 +14,7 @@ final class WindowCautions {
     static final String NO_UNCERTAINTY = "window-no-uncertainty";
     static final String INDEPENDENT = "window-independent";
     static final String LAWS_DIFFER = "window-laws-differ";
+    static final String COURSE = "window-course";
     static final String WHOLE = "window-whole";
 
     private WindowCautions() {}
@@ -30,6 +31,8 @@ final class WindowCautions {
                 "No uncertainty was stated for a barrier or for ΔH or ΔS: it is taken as exact, and the probability is too sharp.";
             case INDEPENDENT ->
                 "The fitted rate constants, the thermodynamic data and the stated barriers are taken as independent of each other; of the parameters of a stated barrier this holds where no correlation was stated.";
+            case COURSE ->
+                "The course of temperature is taken as followed exactly, everywhere in the vessel; overshoot, lag and gradients are not in the numbers.";
             case LAWS_DIFFER -> "More than one law fits; the draws are spread over those that cannot be told apart.";
             default -> CautionText.of(id);
         };

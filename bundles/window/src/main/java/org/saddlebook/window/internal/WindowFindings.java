@@ -355,9 +355,11 @@ final class WindowFindings {
     private void addCommon(List<String> ids) {
         boolean storage = false;
         boolean independent = false;
+        boolean course = false;
         boolean sharp = thermo.isPresent() && thermo.get().exact();
         for (Limit limit : headroom.limits()) {
             storage |= limit instanceof Limit.Hold;
+            course |= limit.course().isPresent();
             independent |= limit.stated().isPresent();
             sharp |= limit.stated().isPresent() && !limit.stated().get().uncertain();
         }
@@ -367,6 +369,9 @@ final class WindowFindings {
         ids.add("not-a-hazard-assessment");
         if (storage) {
             ids.add("storage-lower-bound");
+        }
+        if (course) {
+            ids.add(WindowCautions.COURSE);
         }
         if (thermo.isPresent()) {
             ids.add("allowed-is-not-fast");

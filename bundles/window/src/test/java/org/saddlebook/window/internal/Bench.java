@@ -58,7 +58,7 @@ final class Bench {
                     java.util.OptionalDouble.empty());
             return new BoundLaw(
                     new org.saddlebook.barrier.api.FittedLaws.FittedLawView(
-                            "arrhenius", "Arrhenius", fitted, java.util.OptionalDouble.empty(), List.of()),
+                            "arrhenius", "Arrhenius", fitted, org.saddlebook.barrier.api.NewRun.UNKNOWN, List.of()),
                     new Arrhenius().bind(context),
                     false);
         } catch (UnitException | org.saddlebook.api.model.Inapplicable wrong) {

@@ -161,6 +161,9 @@ class CourseTest {
             }
         }
         assertEquals(low, even(section, "lowerEnd"), 0.15);
+        Node.Quantity end = (Node.Quantity) Bench.at(section.body(), "intervals", 0, "lower");
+        assertTrue(end.cautions().contains("window-course"));
+        assertTrue(section.cautions().get("window-course").contains("followed exactly"));
     }
 
     @Test

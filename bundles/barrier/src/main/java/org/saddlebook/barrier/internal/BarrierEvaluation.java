@@ -13,6 +13,7 @@ import org.saddlebook.api.campaign.Choices;
 import org.saddlebook.api.campaign.RateTable;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
+import org.saddlebook.api.model.Conditions;
 import org.saddlebook.api.model.RateContext;
 import org.saddlebook.api.model.RateModel;
 import org.saddlebook.api.model.StandardState;
@@ -115,6 +116,17 @@ final class BarrierEvaluation {
         }
         if (!surroundings.trouble().isEmpty()) {
             notes.add(surroundings.trouble());
+        }
+        List<String> blind = new ArrayList<>();
+        for (FittedLaw law : fitted) {
+            if (installed.get(law.id()).model().conditions().isEmpty()) {
+                blind.add(law.title());
+            }
+        }
+        if (!blind.isEmpty() && table.varies(Conditions.THIRD_BODY)) {
+            notes.add(
+                    "The third body varies over the table; the laws of temperature alone do not know it and take its effect"
+                            + " for scatter: " + String.join(", ", blind) + ".");
         }
         List<Double> shownAt = new ArrayList<>(List.of(centre));
         shownAt.addAll(choices.targetsKelvin());

@@ -31,8 +31,16 @@ final class NonlinearFitter {
             }
         }
         return outcome.fold(
-                fit -> LawFitter.checked(id, title, law, data, fit),
-                missed -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, missed.reason()),
+                fit -> Openness.determined(LawFitter.checked(id, title, law, data, fit)),
+                missed -> Openness.ranAway(
+                                law, problem.function(), problem.response(), data.weights(), missed.bestParameters())
+                        ? new LawOutcome.NotFitted(
+                                id,
+                                title,
+                                LawOutcome.Kind.UNDETERMINED,
+                                "The search ran away along parameters that leave no trace in the data, so they do not"
+                                        + " determine the " + law.parameters().size() + " parameters of this law.")
+                        : new LawOutcome.NotFitted(id, title, LawOutcome.Kind.FAILED, missed.reason()),
                 deficient -> new LawOutcome.NotFitted(id, title, LawOutcome.Kind.UNDETERMINED, deficient.reason()));
     }
 

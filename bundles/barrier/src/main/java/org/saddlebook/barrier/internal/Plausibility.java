@@ -96,7 +96,7 @@ final class Plausibility {
                 } else if (context.order() > 1) {
                     cautions.add("entropy-at-one-molar");
                 }
-                if (choices.transmission() == 1) {
+                if (choices.transmission() == 1 && context.transmissionLaw().isEmpty()) {
                     cautions.add("assumed-transmission");
                 }
             }

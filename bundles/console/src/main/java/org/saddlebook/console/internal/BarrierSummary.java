@@ -45,6 +45,51 @@ final class BarrierSummary {
                 + (Nodes.flag(context, "standardStateAssumed") ? " (assumed)" : "")
                 + ", overall order " + Rounding.shortest(Nodes.number(context, "order"))
                 + ", transmission coefficient " + Rounding.shortest(Nodes.number(context, "transmission")));
+        Optional<Node> tunnelling = Nodes.get(context, "tunnelling");
+        if (tunnelling.isPresent()) {
+            tunnelling(tunnelling.get());
+        }
+        Optional<Node> conditions = Nodes.get(context, "conditions");
+        if (conditions.isPresent()) {
+            StringBuilder line = new StringBuilder("  k is read at");
+            for (Map.Entry<String, Node> condition :
+                    Nodes.members(context, "conditions").entrySet()) {
+                if (condition.getValue() instanceof Node.Quantity quantity) {
+                    line.append(' ')
+                            .append(condition.getKey().equals("thirdBody") ? "[M]" : condition.getKey())
+                            .append(' ')
+                            .append(Rounding.significant(quantity.value().orElse(Double.NaN), 4))
+                            .append(' ')
+                            .append(UnitText.forPeople(quantity.unit()));
+                }
+            }
+            out.println(line.append(
+                    Nodes.flag(context, "conditionsAssumed") ? ", the middle of the table (not stated)" : " (stated)"));
+        }
+    }
+
+    private void tunnelling(Node stated) {
+        StringBuilder line = new StringBuilder("  tunnelling ").append(Nodes.text(stated, "model"));
+        Optional<Node.Quantity> wavenumber = Nodes.quantity(stated, "wavenumber");
+        if (wavenumber.isPresent()) {
+            line.append(", ")
+                    .append(Rounding.shortest(wavenumber.get().value().orElse(Double.NaN)))
+                    .append("i cm⁻¹");
+        }
+        List<Node> coefficients = Nodes.items(stated, "coefficients");
+        if (coefficients.isEmpty()) {
+            line.append(", could not be applied");
+        }
+        for (Node row : coefficients) {
+            Optional<Node.Quantity> kelvin = Nodes.quantity(row, "temperature");
+            if (kelvin.isPresent()) {
+                line.append("; κ ")
+                        .append(Rounding.significant(Nodes.number(row, "kappa"), 4))
+                        .append(" at ")
+                        .append(QuantityText.temperature(kelvin.get()));
+            }
+        }
+        out.println(line);
     }
 
     private void table(Node table, Node.Group body) {

@@ -73,6 +73,12 @@ public final class ModelsVerb implements Verb {
                 out.println("  " + description.formula());
                 out.println("  source: " + description.source());
                 description.contains().ifPresent(id -> out.println("  contains: " + id));
+                if (model.get().onRequest()) {
+                    out.println("  fitted when asked for by name");
+                } else if (!model.get().conditions().isEmpty()) {
+                    out.println("  fitted where a table states: "
+                            + String.join(", ", model.get().conditions()));
+                }
                 out.println("  bundle: " + reference.getBundle().getSymbolicName() + " "
                         + reference.getBundle().getVersion());
             }

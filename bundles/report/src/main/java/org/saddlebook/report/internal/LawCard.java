@@ -163,6 +163,21 @@ final class LawCard {
                     .append(Rounding.shortest(transmission.getAsDouble()))
                     .append(". ");
         }
+        Optional<Node> tunnelling = Trees.get(node, "tunnelling");
+        if (tunnelling.isPresent()) {
+            text.append("Tunnelling: ").append(Trees.text(tunnelling.get(), "model"));
+            for (Node row : Trees.items(tunnelling.get(), "coefficients")) {
+                Optional<Node.Quantity> kelvin = Trees.quantity(row, "temperature");
+                OptionalDouble kappa = Trees.number(row, "kappa");
+                if (kelvin.isPresent() && kappa.isPresent()) {
+                    text.append(", κ ")
+                            .append(Rounding.significant(kappa.getAsDouble(), 4))
+                            .append(" at ")
+                            .append(QuantityText.temperature(kelvin.get()));
+                }
+            }
+            text.append(". ");
+        }
         Optional<Node.Quantity> reference = Trees.quantity(node, "referenceTemperature");
         if (reference.isPresent()) {
             text.append("Laws with a reference temperature use ")

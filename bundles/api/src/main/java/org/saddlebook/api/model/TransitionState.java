@@ -56,7 +56,7 @@ public final class TransitionState {
      */
     public static TransitionState of(RateContext context) throws Inapplicable {
         Objects.requireNonNull(context, "context");
-        if (!applies(context)) {
+        if (!(context.order() >= 1)) {
             throw new Inapplicable(
                     "Transition-state theory describes a step of at least one molecule; a rate constant of"
                             + " an order below 1 belongs to no such step, so enthalpy and entropy of activation have no meaning"

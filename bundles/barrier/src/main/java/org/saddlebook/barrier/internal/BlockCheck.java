@@ -100,7 +100,7 @@ final class BlockCheck {
             double[] row = new double[parameters.length];
             row[j] = 1;
             rows.add(row(
-                    parameter.symbol(),
+                    Words.symbol(parameter.symbol()),
                     fit,
                     row,
                     parameters[j],

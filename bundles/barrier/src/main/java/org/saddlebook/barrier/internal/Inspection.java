@@ -171,7 +171,7 @@ final class Inspection {
         double end = x[n - 1] * 1.1;
         return new Node.Figure(
                 "normal-quantiles",
-                "Are the residuals of the law " + law.title() + " normal?",
+                "Residuals of the law " + law.title() + " against normal quantiles",
                 new Axis("normal quantile", "1", Axis.Scale.LINEAR),
                 new Axis("studentised residual", "1", Axis.Scale.LINEAR),
                 List.of(

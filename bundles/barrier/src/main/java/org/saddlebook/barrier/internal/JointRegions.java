@@ -78,7 +78,7 @@ final class JointRegions {
 
     private String name(int j) {
         Parameter parameter = law.parameters().get(j);
-        return (parameter.scale() == Parameter.Scale.LOG ? "ln " : "") + parameter.symbol();
+        return (parameter.scale() == Parameter.Scale.LOG ? "ln " : "") + Words.symbol(parameter.symbol());
     }
 
     private double shown(int j, double value) {
@@ -91,10 +91,7 @@ final class JointRegions {
     private Axis axis(int j) {
         Parameter parameter = law.parameters().get(j);
         boolean logarithm = parameter.scale() == Parameter.Scale.LOG;
-        return new Axis(
-                logarithm ? "ln " + parameter.symbol() : parameter.symbol(),
-                logarithm ? "1" : parameter.unit().code(),
-                Axis.Scale.LINEAR);
+        return new Axis(name(j), logarithm ? "1" : parameter.unit().code(), Axis.Scale.LINEAR);
     }
 
     private Node.Figure figure(JointRegion region, int first, int second) {

@@ -127,7 +127,7 @@ final class OtherIntervals {
             OptionalDouble upper = end(law, parameter, interval.upper());
             row(
                     law,
-                    parameter.symbol(),
+                    Words.symbol(parameter.symbol()),
                     "profile",
                     interval.estimate(),
                     parameter.scale(),
@@ -158,7 +158,8 @@ final class OtherIntervals {
             return OptionalDouble.of(at.value());
         }
         String reason = limit instanceof ProfileLimit.Open open ? open.reason() : ((ProfileLimit.Lost) limit).reason();
-        notes.add("profile, " + law.title() + ", " + parameter.symbol() + ": one end is open, " + reason + ".");
+        notes.add("profile, " + law.title() + ", " + Words.symbol(parameter.symbol()) + ": one end is open, " + reason
+                + ".");
         return OptionalDouble.empty();
     }
 
@@ -183,7 +184,7 @@ final class OtherIntervals {
                     method,
                     law,
                     resamples,
-                    parameter.symbol(),
+                    Words.symbol(parameter.symbol()),
                     Resamples.parameter(j),
                     parameter.scale(),
                     parameter.unit());

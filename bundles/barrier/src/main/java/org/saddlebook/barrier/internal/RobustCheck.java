@@ -50,7 +50,9 @@ final class RobustCheck {
         columns.add(new Node.Column("method", "Method", ""));
         for (Parameter parameter : law.parameters()) {
             columns.add(new Node.Column(
-                    parameter.symbol(), parameter.symbol(), parameter.unit().code()));
+                    parameter.symbol(),
+                    Words.symbol(parameter.symbol()),
+                    parameter.unit().code()));
         }
         columns.add(new Node.Column("downweighted", "Points that lost weight", ""));
         return Optional.of(new Tree()
@@ -116,7 +118,8 @@ final class RobustCheck {
             double u = Math.sqrt(law.parameter(j).variance().orElseThrow());
             double moved = (fit.parameters()[j] - law.fit().parameters()[j]) / u;
             if (Math.abs(moved) > 1) {
-                String text = name + " moves " + law.parameters().get(j).symbol() + " of " + law.title() + " by "
+                String text = name + " moves "
+                        + Words.symbol(law.parameters().get(j).symbol()) + " of " + law.title() + " by "
                         + Rounding.significant(Math.abs(moved), 2)
                         + " of its standard uncertainties: a few points carry the difference.";
                 notes.add(text);

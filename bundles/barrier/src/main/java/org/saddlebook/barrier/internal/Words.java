@@ -10,4 +10,15 @@ final class Words {
     static String kelvin(double kelvin) {
         return QuantityText.temperature(kelvin);
     }
+
+    /** A parameter's plain symbol as people write it. */
+    static String symbol(String plain) {
+        return switch (plain) {
+            case "dH" -> "ΔH‡";
+            case "dS" -> "ΔS‡";
+            case "dG" -> "ΔG‡";
+            case "dCp" -> "ΔCp‡";
+            default -> plain;
+        };
+    }
 }

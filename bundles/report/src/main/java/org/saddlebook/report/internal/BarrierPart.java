@@ -28,6 +28,7 @@ final class BarrierPart implements ReportPart {
             "predictions",
             "figures",
             "notes",
+            "remarks",
             "cautions");
 
     @Override
@@ -42,6 +43,13 @@ final class BarrierPart implements ReportPart {
         html.append(comparison(body));
         for (String note : Trees.texts(body, "notes")) {
             html.append(Html.element("p", Html.text(note))).append('\n');
+        }
+        List<String> remarks = Trees.texts(body, "remarks");
+        if (!remarks.isEmpty()) {
+            html.append("<h3>What the data could not show</h3>\n");
+            for (String remark : remarks) {
+                html.append(Html.element("p", Html.text(remark))).append('\n');
+            }
         }
         List<String> cautions = Trees.texts(body, "cautions");
         if (!cautions.isEmpty()) {

@@ -18,14 +18,21 @@ import org.saddlebook.units.api.Units;
  * @param kelvin the temperature of all constants, K
  * @param names of the steps
  * @param lnK of the steps; in (mol/m3)^power
+ * @param power of concentration in each unit
  * @param uncertainty standard uncertainties of ln K; empty where not stated
  * @param cycles for each cycle how often each step is gone, negative against its direction
  */
 @SuppressWarnings("ArrayRecordComponent") // compared by nobody; handed over inside this package only
 record CycleSteps(
-        double kelvin, List<String> names, double[] lnK, OptionalDouble[] uncertainty, List<double[]> cycles) {
+        double kelvin,
+        List<String> names,
+        double[] lnK,
+        double[] power,
+        OptionalDouble[] uncertainty,
+        List<double[]> cycles) {
     private static final List<String> FORMS = List.of("K", "lnK", "pK", "dG", "forward");
     private static final double LN_10 = StrictMath.log(10);
+    private static final double LN_1000 = StrictMath.log(1000);
 
     static CycleSteps read(Node node) throws Refusal {
         SettingsReader settings = new SettingsReader(node, "the cycles", List.of("temperature", "steps", "closures"));
@@ -62,7 +69,7 @@ record CycleSteps(
                         + " is left over. State K with its unit, and check the directions.");
             }
         }
-        return new CycleSteps(kelvin, List.copyOf(names), ln, u, cycles);
+        return new CycleSteps(kelvin, List.copyOf(names), ln, power, u, cycles);
     }
 
     /** ln K in SI, power of concentration, and standard uncertainty of ln K that a quantity carries, NaN for none. */
@@ -193,6 +200,11 @@ record CycleSteps(
             cycles.add(cycle);
         }
         return List.copyOf(cycles);
+    }
+
+    /** What to add to ln K of a step so that concentrations count in mol/L, as people write them. */
+    double perLitre(int step) {
+        return power[step] == 0 ? 0 : -power[step] * LN_1000;
     }
 
     String text(int cycle) {

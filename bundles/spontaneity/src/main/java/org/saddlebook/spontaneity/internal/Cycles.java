@@ -114,10 +114,13 @@ final class Cycles {
             double size = reduced > 0 ? Math.abs(correction) / Math.sqrt(reduced) : 0;
             Map<String, Node> row = new LinkedHashMap<>();
             row.put("step", new Node.Text(steps.names().get(i)));
-            row.put("lnK", Node.Quantity.of(x[i], "1", Math.sqrt(v[i])).withCautions(cautions));
+            row.put(
+                    "lnK",
+                    Node.Quantity.of(x[i] + steps.perLitre(i), "1", Math.sqrt(v[i]))
+                            .withCautions(cautions));
             row.put(
                     "adjusted",
-                    Node.Quantity.of(x[i] + correction, "1", Math.sqrt(Math.max(0, v[i] - reduced)))
+                    Node.Quantity.of(x[i] + steps.perLitre(i) + correction, "1", Math.sqrt(Math.max(0, v[i] - reduced)))
                             .withCautions(cautions));
             row.put("normalisedCorrection", new Node.Scalar(size));
             rows.add(new Node.Group(row));

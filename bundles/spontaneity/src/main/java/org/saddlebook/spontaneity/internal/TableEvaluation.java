@@ -21,6 +21,7 @@ import org.saddlebook.presentation.api.Rounding;
 final class TableEvaluation {
     private static final int STEPS = 400;
     private static final int CURVE = 80;
+    private static final List<String> OF_GIBBS = List.of("allowed-is-not-fast", "at-stated-composition");
 
     private final EquilibriumTable table;
     private final double level;
@@ -175,7 +176,7 @@ final class TableEvaluation {
         double theta = fit.theta();
         Map<String, Node> members = new LinkedHashMap<>();
         members.put("referenceTemperature", Node.Quantity.of(theta, "K"));
-        members.put("dG", quantity(fit.gibbs(theta), "J/mol", fit));
+        members.put("dG", quantity(fit.gibbs(theta), "J/mol", fit).withCautions(OF_GIBBS));
         members.put("dH", quantity(fit.enthalpy(theta), "J/mol", fit));
         members.put("dS", quantity(fit.entropy(theta), "J/(mol.K)", fit));
         if (fit.heatCapacityFitted()) {
@@ -200,7 +201,9 @@ final class TableEvaluation {
         for (double zero : zeros) {
             double slope = Math.abs(fit.entropy(zero).value());
             double u = fit.gibbs(zero).uncertainty() / slope;
-            items.add(slope > 0 && Double.isFinite(u) ? Node.Quantity.of(zero, "K", u) : Node.Quantity.of(zero, "K"));
+            Node.Quantity crossover =
+                    slope > 0 && Double.isFinite(u) ? Node.Quantity.of(zero, "K", u) : Node.Quantity.of(zero, "K");
+            items.add(crossover.withCautions(List.of("at-stated-composition")));
         }
         return items;
     }

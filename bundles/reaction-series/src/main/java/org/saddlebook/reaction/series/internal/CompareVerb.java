@@ -10,7 +10,9 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.osgi.framework.Bundle;
 import org.osgi.framework.BundleContext;
+import org.osgi.framework.FrameworkUtil;
 import org.osgi.framework.ServiceReference;
 import org.osgi.service.component.annotations.Activate;
 import org.osgi.service.component.annotations.Component;
@@ -299,8 +301,16 @@ public final class CompareVerb implements Verb {
         return new Findings(
                 "Comparison: " + String.join(", ", names),
                 Sha256.of(digest.toString().getBytes(StandardCharsets.UTF_8)),
-                List.of(new Contributor("org.saddlebook.reaction-series", "0.1.0", "")),
+                List.of(contributor()),
                 byId);
+    }
+
+    /** This bundle; outside a framework, as in tests, its class. */
+    private static Contributor contributor() {
+        Bundle bundle = FrameworkUtil.getBundle(CompareVerb.class);
+        return bundle == null
+                ? new Contributor(CompareVerb.class.getName(), "0", "")
+                : new Contributor(bundle.getSymbolicName(), bundle.getVersion().toString(), "");
     }
 
     private void write(OutputFolder folder, Findings findings, CampaignFormat format, Invocation invocation)

@@ -132,11 +132,11 @@ final class RatioFindings {
     private String errors() {
         if (scale.stated()) {
             return "as stated; χ² is " + Rounding.significant(fit.residualSumOfSquares(), 3) + " on "
-                    + fit.degreesOfFreedom() + " degrees of freedom";
+                    + Words.freedom(fit.degreesOfFreedom());
         }
         return "one relative error, estimated from the scatter: "
-                + Rounding.significant(100 * Math.sqrt(scale.variance()), 2) + " % on " + fit.degreesOfFreedom()
-                + " degrees of freedom";
+                + Rounding.significant(100 * Math.sqrt(scale.variance()), 2) + " % on "
+                + Words.freedom(fit.degreesOfFreedom());
     }
 
     private String name(String stated, boolean above) {

@@ -62,8 +62,8 @@ final class SeriesFindings {
                                                                 .variance()),
                                                 2)
                                         + " % on "
-                                        + Math.round(fit.get().scale().degreesOfFreedom())
-                                        + " degrees of freedom"));
+                                        + Words.freedom(
+                                                Math.round(fit.get().scale().degreesOfFreedom()))));
         body.put("reactions", findings.reactionTable());
         body.put("common", new Node.Items(findings.common()));
         body.put("ratios", new Node.Items(RateRatios.of(fit.get(), targetsKelvin, level)));

@@ -17,6 +17,10 @@ final class Words {
         return QuantityText.withInterval(quantity);
     }
 
+    static String freedom(long degrees) {
+        return degrees + (degrees == 1 ? " degree of freedom" : " degrees of freedom");
+    }
+
     static String probability(double p) {
         return "p " + (p < 0.0001 ? "below 0.0001" : "= " + Rounding.probability(p));
     }

@@ -17,6 +17,8 @@ final class EndLabels {
     /** Distance from the drawing area to the text; room for the leader. */
     static final double GAP = 22;
 
+    private static final double MOST_CLEARANCE = 240;
+
     private static final class Label {
         private final List<String> lines;
         private final double endX;
@@ -92,9 +94,18 @@ final class EndLabels {
             label.top = above ? label.endY - label.height() - 8 : label.endY + 8;
         }
         labels.sort(Comparator.comparingDouble((Label label) -> label.top));
+        // Names above their lines give way upward; those below are moved down by what follows.
+        double ceiling = Double.POSITIVE_INFINITY;
+        for (int i = labels.size() - 1; i >= 0; i--) {
+            Label label = labels.get(i);
+            if (label.top < label.endY) {
+                label.top = Math.min(label.top, ceiling - label.height() - 2);
+                ceiling = label.top;
+            }
+        }
         spread(area.getMinY() + 2, area.getMaxY() - 2);
         for (Label label : labels) {
-            double right = Math.min(label.endX, area.getMaxX()) - 14;
+            double right = Math.min(label.endX, area.getMaxX()) - 14 - clearance(label);
             double wide = 0;
             for (String line : label.lines) {
                 wide = Math.max(wide, Lettering.width(line, SIZE, false));
@@ -115,6 +126,14 @@ final class EndLabels {
                 y += LINE_HEIGHT;
             }
         }
+    }
+
+    /** How far a name goes to the left so that its line, which is steep, passes beside it and not through it. */
+    private static double clearance(Label label) {
+        double rise = (label.before - label.endY) / LineEnd.SOME_WAY;
+        boolean above = label.before >= label.endY;
+        double overlap = above ? label.top + label.height() + 6 - label.endY : label.endY + 6 - label.top;
+        return Math.abs(rise) < 0.02 ? 0 : Math.max(0, Math.min(MOST_CLEARANCE, overlap / Math.abs(rise)));
     }
 
     /** Down the page each label keeps clear of the one above; then, from the foot, of the one below. */

@@ -12,7 +12,8 @@ import org.saddlebook.api.findings.Layer;
  * @param before vertical coordinate of the line some way to the left, px: tells on which side of it there is room
  */
 record LineEnd(double x, double y, double before) {
-    private static final double SOME_WAY = 90;
+    /** How far to the left it is looked, px. */
+    static final double SOME_WAY = 90;
 
     static LineEnd of(Layer layer, DoubleUnaryOperator horizontal, DoubleUnaryOperator vertical, Rectangle2D area) {
         double[] x = layer.x();

@@ -17,6 +17,9 @@ import org.saddlebook.desk.api.Ink;
 public final class FieldFlow extends JPanel {
     private static final long serialVersionUID = 1L;
 
+    /** Letters are a little wider on a screen of high density than they were measured. */
+    private static final javax.swing.border.Border SLACK = BorderFactory.createEmptyBorder(0, 0, 0, 5);
+
     private final transient Ink ink;
 
     /** An empty flow. */
@@ -32,6 +35,7 @@ public final class FieldFlow extends JPanel {
         JLabel label = new JLabel(text);
         label.setFont(ink.font(1, false));
         label.setForeground(ink.ink());
+        label.setBorder(SLACK);
         label.getAccessibleContext().setAccessibleName(text);
         add(label);
         return label;
@@ -58,6 +62,7 @@ public final class FieldFlow extends JPanel {
             JLabel words = new JLabel(label);
             words.setFont(ink.font(1, false));
             words.setForeground(ink.ink());
+            words.setBorder(SLACK);
             words.setLabelFor(field);
             pair.add(words, java.awt.BorderLayout.WEST);
         }

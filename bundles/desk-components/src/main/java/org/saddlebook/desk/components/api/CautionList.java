@@ -59,6 +59,14 @@ public final class CautionList extends JPanel {
             getAccessibleContext().setAccessibleName("Caution " + (number > 0 ? number : ""));
         }
 
+        /** Setting a text moves its caret, which would scroll the page here; only who reads with the keyboard wants that. */
+        @Override
+        public void scrollRectToVisible(java.awt.Rectangle area) {
+            if (isFocusOwner()) {
+                super.scrollRectToVisible(area);
+            }
+        }
+
         @Override
         protected void paintComponent(Graphics graphics) {
             Graphics2D g = (Graphics2D) graphics.create();

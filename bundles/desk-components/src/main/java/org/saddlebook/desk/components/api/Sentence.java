@@ -49,6 +49,14 @@ public final class Sentence extends JTextArea {
         say(text);
     }
 
+    /** Setting a text moves its caret, which would scroll the page here; only who reads with the keyboard wants that. */
+    @Override
+    public void scrollRectToVisible(java.awt.Rectangle area) {
+        if (isFocusOwner()) {
+            super.scrollRectToVisible(area);
+        }
+    }
+
     /** Shows another text; hidden while it is empty. */
     public void say(String text) {
         if (!text.equals(getText())) {

@@ -92,9 +92,23 @@ final class DefaultPanel implements DeskPanel {
             return "Nothing found.";
         }
         return switch (section.get().outcome()) {
-            case DONE -> "No panel for this section is installed; it is shown as it was found.";
+            case DONE ->
+                note(section.get()).orElse("No panel for this section is installed; it is shown as it was found.");
             case REFUSED, FAILED -> reason(section.get());
         };
+    }
+
+    /** Sections say the most important thing as the first of their notes. */
+    private static Optional<String> note(Section section) {
+        boolean first = section.body() instanceof Node.Group group
+                && group.get("notes").orElse(null) instanceof Node.Items notes
+                && !notes.items().isEmpty()
+                && notes.items().get(0) instanceof Node.Text;
+        if (!first) {
+            return Optional.empty();
+        }
+        Node.Items notes = (Node.Items) ((Node.Group) section.body()).members().get("notes");
+        return Optional.of(((Node.Text) notes.items().get(0)).value());
     }
 
     private static String reason(Section section) {

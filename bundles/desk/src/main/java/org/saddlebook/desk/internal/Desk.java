@@ -361,6 +361,11 @@ final class Desk {
         current.ifPresent(shelf::show);
     }
 
+    /** Has the hairline read anew: what lies under it may have changed. */
+    void readHairline() {
+        hairlineReader.moved();
+    }
+
     void readings(double kelvin, List<Reading> readings) {
         view.readings(kelvin, readings);
     }

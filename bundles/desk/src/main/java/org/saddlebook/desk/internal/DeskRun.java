@@ -59,7 +59,9 @@ final class DeskRun {
     void run(List<Path> inputs) throws IOException {
         DeskSettings settings = DeskSettings.in(configFolder);
         Optional<Recovery> recovery = recovery();
-        EventWatch watch = new EventWatch(TimeUnit.SECONDS.toNanos(PATIENCE_SECONDS), this::fault, this::stalled);
+        Containment containment = new Containment(() -> Optional.ofNullable(desk.get()));
+        EventWatch watch =
+                new EventWatch(TimeUnit.SECONDS.toNanos(PATIENCE_SECONDS), containment::fault, containment::stalled);
         java.awt.Toolkit.getDefaultToolkit().getSystemEventQueue().push(watch);
         AtomicReference<PanelTracker> tracker = new AtomicReference<>();
         ServiceListener capabilities = event -> {
@@ -178,65 +180,6 @@ final class DeskRun {
 
     private void trouble(String sentence) {
         SwingUtilities.invokeLater(() -> desk.get().view().notice("An added bundle", sentence, List.of()));
-    }
-
-    /** On the event thread: something threw there. */
-    private void fault(Throwable fault, java.awt.AWTEvent event) {
-        Desk made = desk.get();
-        if (made != null) {
-            Optional<String> owner =
-                    EventWatch.packageIn(fault.getStackTrace(), made.shelf().packages());
-            if (owner.isPresent()) {
-                for (PanelHost host : made.shelf().ofPackage(owner.get())) {
-                    host.fail("answering " + event.getClass().getSimpleName(), fault);
-                }
-                return;
-            }
-        }
-        Faults.log(fault); // goes to the fault log
-        if (made != null && made.view() != null) {
-            made.view()
-                    .notice(
-                            "Something went wrong inside the desk",
-                            fault.getClass().getSimpleName()
-                                    + (fault.getMessage() == null ? "" : ": " + fault.getMessage())
-                                    + ". What you did last may not have worked; everything else goes on.",
-                            List.of());
-        }
-    }
-
-    /** On the watcher's thread: the event thread has been busy for long. */
-    private void stalled(StackTraceElement[] stack, long nanoseconds) {
-        Desk made = desk.get();
-        if (made == null) {
-            return;
-        }
-        Optional<String> owner = EventWatch.packageIn(stack, made.shelf().packages());
-        if (owner.isEmpty()) {
-            return;
-        }
-        List<PanelHost> hosts = made.shelf().ofPackage(owner.get());
-        for (PanelHost host : hosts) {
-            made.settings().setAside(host.contribution().id(), true);
-        }
-        try {
-            made.settings().save(); // should it never come back, the next start does without it
-        } catch (IOException e) {
-            Faults.log(e); // goes to the fault log; nothing else can be done from here
-        }
-        SwingUtilities.invokeLater(() -> cameBack(made, hosts, nanoseconds));
-    }
-
-    /** The event thread is free again: the culprit is folded, with the choice of another try. */
-    private static void cameBack(Desk made, List<PanelHost> hosts, long nanoseconds) {
-        for (PanelHost host : hosts) {
-            if (host.failure().isEmpty()) {
-                host.stop("The panel " + host.contribution().id() + " of "
-                        + host.contribution().bundle() + " kept the desk from answering for more than "
-                        + TimeUnit.NANOSECONDS.toSeconds(nanoseconds) + " s and was stopped.");
-            }
-        }
-        made.files().saveSettings();
     }
 
     private void end(DeskSettings settings, Optional<Recovery> recovery, PanelTracker tracker) throws IOException {

@@ -18,8 +18,8 @@ final class EventWatch extends EventQueue {
     private static final long LOOK_MILLISECONDS = 200;
 
     private final long patienceNanoseconds;
-    private final BiConsumer<Throwable, AWTEvent> fault;
-    private final BiConsumer<StackTraceElement[], Long> stall;
+    private volatile BiConsumer<Throwable, AWTEvent> fault;
+    private volatile BiConsumer<StackTraceElement[], Long> stall;
     private final AtomicReference<Slow> slowest = new AtomicReference<>(new Slow(0, "nothing"));
     private final Thread watcher = new Thread(this::watch, "desk event watch");
     private volatile Thread thread;
@@ -111,13 +111,17 @@ final class EventWatch extends EventQueue {
         return false;
     }
 
-    /** Stops watching; the queue before takes over. */
+    /**
+     * Stops watching and lets go of everybody. The queue itself stays, as a plain one: taking a queue away while events
+     * arrive can lose some.
+     */
     void close() {
         closed = true;
+        fault = (thrown, event) -> Faults.log(thrown);
+        stall = (stack, took) -> {};
         synchronized (this) {
             notifyAll();
         }
-        pop();
     }
 
     /** The first frame of a stack that lies in one of these packages. */

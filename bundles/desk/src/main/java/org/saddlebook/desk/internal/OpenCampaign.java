@@ -90,7 +90,12 @@ final class OpenCampaign {
         if (after.equals(before)) {
             return false;
         }
-        step(change.what(), state.withCampaign(after), entry(change, who, when));
+        DeskState next = state.withCampaign(after);
+        // What is wrong with a file stays wrong, whatever else changes.
+        step(
+                change.what(),
+                PanelShelf.unread(state) ? next.withProblems(state.problems()) : next,
+                entry(change, who, when));
         return true;
     }
 

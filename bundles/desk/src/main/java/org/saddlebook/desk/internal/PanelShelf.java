@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.concurrent.CopyOnWriteArrayList;
 import java.util.function.Supplier;
 import javax.swing.SwingUtilities;
 import org.saddlebook.api.findings.Section;
@@ -21,7 +22,9 @@ final class PanelShelf {
     private final Desk desk;
     private final Supplier<List<Contribution>> installed;
     private final Map<String, DefaultPanelProvider> defaults = new HashMap<>();
-    private final List<PanelHost> hosts = new ArrayList<>();
+    /** Changed on the event thread only; read by the event watch too. */
+    private final List<PanelHost> hosts = new CopyOnWriteArrayList<>();
+
     private Optional<OpenCampaign> shown = Optional.empty();
     private String openId = "barrier";
     private long turn;
@@ -94,6 +97,7 @@ final class PanelShelf {
             boolean away = !wanted.contains(host.contribution());
             if (away) {
                 host.close();
+                release(host, wanted);
             }
             return away;
         });
@@ -108,6 +112,17 @@ final class PanelShelf {
             desk.view().strataChanged();
         }
         makeNext(campaign, missing, mine);
+    }
+
+    /** What a bundle left behind is taken back when its last panel is gone. */
+    private static void release(PanelHost host, List<Contribution> wanted) {
+        ClassLoader loader = host.contribution().provider().getClass().getClassLoader();
+        for (Contribution contribution : wanted) {
+            if (contribution.provider().getClass().getClassLoader() == loader) {
+                return;
+            }
+        }
+        Release.leftBy(loader);
     }
 
     private void makeNext(OpenCampaign campaign, List<Contribution> missing, long mine) {
@@ -133,7 +148,11 @@ final class PanelShelf {
                             + " kept the desk from answering in an earlier run and is set aside.");
         } else {
             host = new PanelHost(contribution, context, () -> desk.view().strataChanged());
+            insert(host); // first: should it never come back, the event watch must find it
             host.start(campaign.state());
+            told(campaign, host);
+            desk.view().strataChanged();
+            return;
         }
         insert(host);
         told(campaign, host);
@@ -186,6 +205,7 @@ final class PanelShelf {
     }
 
     private void told(OpenCampaign campaign, PanelHost host) {
+        desk.readHairline();
         if (campaign.state().current()
                 && campaign.account()
                         .numbers(

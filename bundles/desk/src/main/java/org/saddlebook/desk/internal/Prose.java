@@ -43,6 +43,11 @@ final class Prose extends JComponent {
         return lines(metrics, width).size() * metrics.getHeight();
     }
 
+    /** Height of so many lines. */
+    int heightOf(int lines) {
+        return lines * getFontMetrics(getFont()).getHeight();
+    }
+
     @Override
     public Dimension getPreferredSize() {
         if (isPreferredSizeSet()) {

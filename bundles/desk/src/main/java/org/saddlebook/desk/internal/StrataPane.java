@@ -19,8 +19,14 @@ import org.saddlebook.desk.api.Ink;
 final class StrataPane extends JPanel implements Scrollable {
     private static final long serialVersionUID = 1L;
 
+    private static final int MOST_LINES = 3;
+
+    /** Height that an open body should have above the least one before sentences get more than a line. */
+    private static final int COMFORT = 110;
+
     private final transient Desk desk;
     private final transient List<Stratum> strata = new ArrayList<>();
+    private final transient StartMark mark = new StartMark();
     private int column = 200;
 
     StrataPane(Desk desk) {
@@ -122,27 +128,37 @@ final class StrataPane extends JPanel implements Scrollable {
     @Override
     public Dimension getPreferredSize() {
         int width = Math.max(getWidth(), 300);
+        return new Dimension(width, total(width, lines(width)));
+    }
+
+    /** How many lines of their sentences folded strata show: fewer where not all strata would be in sight. */
+    private int lines(int width) {
+        int room = getParent() == null ? Integer.MAX_VALUE : getParent().getHeight();
+        int lines = MOST_LINES;
+        while (lines > 1 && total(width, lines) + COMFORT > room) {
+            lines--;
+        }
+        return lines;
+    }
+
+    private int total(int width, int lines) {
         int height = 0;
         for (Stratum stratum : strata) {
             stratum.column(column);
-            height += stratum.wantedHeight(width);
+            height += stratum.wantedHeight(width, lines);
         }
-        return new Dimension(width, height);
+        return height;
     }
 
     @Override
     public void doLayout() {
         int width = getWidth();
-        int folded = 0;
-        for (Stratum stratum : strata) {
-            stratum.column(column);
-            folded += stratum.isOpen() ? 0 : stratum.wantedHeight(width);
-        }
+        int lines = lines(width);
+        int spare = getHeight() - total(width, lines);
         int y = 0;
         for (Stratum stratum : strata) {
-            int height = stratum.isOpen()
-                    ? Math.max(stratum.wantedHeight(width), getHeight() - folded)
-                    : stratum.wantedHeight(width);
+            int wanted = stratum.wantedHeight(width, lines);
+            int height = stratum.isOpen() ? wanted + Math.max(0, spare) : wanted;
             stratum.setBounds(0, y, width, height);
             y += height;
         }
@@ -158,6 +174,8 @@ final class StrataPane extends JPanel implements Scrollable {
     public void paint(Graphics graphics) {
         super.paint(graphics);
         hairline(graphics, desk.rail(), desk.ink(), getHeight());
+        mark.painted(!strata.isEmpty()
+                && desk.current().map(c -> c.state().current()).orElse(false));
     }
 
     /** Draws the hairline from top to bottom. */

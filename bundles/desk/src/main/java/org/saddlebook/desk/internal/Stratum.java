@@ -149,13 +149,17 @@ final class Stratum extends JPanel {
         column = width;
     }
 
-    /** The height it would have when folded, or the least one when open. */
-    int wantedHeight(int width) {
+    /** The height it would have when folded, with at most so many lines of its sentence, or the least one when open. */
+    int wantedHeight(int width, int lines) {
         if (open) {
             return headHeight(width) + BODY;
         }
-        int text = titleHeight() + sentence.heightAt(sentenceWidth(width)) + 2 * PAD;
-        int marks = content.map(slot -> slot.getPreferredSize().height).orElse(0);
+        int words = Math.min(sentence.heightAt(sentenceWidth(width)), sentence.heightOf(lines));
+        int text = titleHeight() + words + 2 * PAD - 2;
+        // Where room is short the marks make do with what the words need.
+        int marks = lines == 1
+                ? 0
+                : content.map(slot -> slot.getPreferredSize().height).orElse(0);
         return Math.min(Math.max(Math.max(text, marks), LOWEST), HIGHEST);
     }
 

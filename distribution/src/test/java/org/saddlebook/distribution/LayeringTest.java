@@ -129,12 +129,14 @@ class LayeringTest {
     }
 
     @Test
-    void onlyChartsAndItsLibraryTouchTheWindowToolkit() throws IOException {
+    void onlyFiguresAndTheDeskTouchTheWindowToolkit() throws IOException {
         try (DirectoryStream<Path> jars =
                 Files.newDirectoryStream(InstalledProduct.ASSEMBLED.resolve("bundles"), OURS + "*.jar")) {
             for (Path jar : jars) {
                 String name = jar.getFileName().toString();
-                if (name.startsWith("org.saddlebook.charts-") || name.startsWith("org.saddlebook.lib-jfreechart-")) {
+                if (name.startsWith("org.saddlebook.charts-")
+                        || name.startsWith("org.saddlebook.desk-")
+                        || name.startsWith("org.saddlebook.lib-")) {
                     continue;
                 }
                 try (JarFile file = new JarFile(jar.toFile())) {
@@ -152,5 +154,26 @@ class LayeringTest {
                 }
             }
         }
+    }
+
+    @Test
+    void noFeatureButTheDeskBringsABundleOfTheDesk() throws IOException {
+        int others = 0;
+        try (DirectoryStream<Path> features =
+                Files.newDirectoryStream(InstalledProduct.ASSEMBLED.resolve("features"), "*.json")) {
+            for (Path feature : features) {
+                String name = feature.getFileName().toString();
+                if (!name.startsWith("desk")) {
+                    others++;
+                    String text = Files.readString(feature);
+                    assertFalse(
+                            text.contains("org.saddlebook.desk")
+                                    || text.contains("flatlaf")
+                                    || text.contains("miglayout"),
+                            name);
+                }
+            }
+        }
+        assertTrue(others > 5, "features are missing");
     }
 }

@@ -155,7 +155,7 @@ class DeskLongTest {
         desk.command("go to campaign-8");
         desk.named("Campaign campaign-8,");
         desk.shows("Caution 1:");
-        desk.keys(KeyEvent.VK_CONTROL, KeyEvent.VK_PAGE_DOWN);
+        desk.keys(KeyEvent.VK_ALT, KeyEvent.VK_PAGE_DOWN);
         desk.named("Campaign campaign-9,");
         desk.shows("Caution 1:");
         desk.settle();

@@ -99,12 +99,17 @@ class DeskPicturesTest {
                         continue; // there are fewer strata than keys
                     }
                     cut.addAll(desk.onEventThread(() -> cut(desk)));
-                    String file = name + "-" + campaign + "-" + open.replace(", open", "").replace(' ', '-');
+                    String file = name + "-" + campaign + "-"
+                            + open.replace(", open", "").replace(' ', '-');
                     BufferedImage picture = picture(desk, scale);
-                    ImageIO.write(picture, "png", PICTURES.resolve(file + ".png").toFile());
+                    ImageIO.write(
+                            picture, "png", PICTURES.resolve(file + ".png").toFile());
                     String readme = System.getProperty("saddlebook.pictures");
                     if (readme != null && OF_THE_README.containsKey(file)) {
-                        ImageIO.write(picture, "png", Path.of(readme, OF_THE_README.get(file)).toFile());
+                        ImageIO.write(
+                                picture,
+                                "png",
+                                Path.of(readme, OF_THE_README.get(file)).toFile());
                     }
                 }
             }

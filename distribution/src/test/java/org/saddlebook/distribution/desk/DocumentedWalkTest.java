@@ -58,7 +58,7 @@ class DocumentedWalkTest {
                 walk(block.lines(), walks);
             }
         }
-        assertTrue(walks >= 2, "walks: " + walks);
+        assertTrue(walks >= 3, "walks: " + walks);
     }
 
     private void walk(List<String> lines, int number) throws Exception {
@@ -94,6 +94,8 @@ class DocumentedWalkTest {
                         case "enter" -> KeyEvent.VK_ENTER;
                         case "escape" -> KeyEvent.VK_ESCAPE;
                         case "tab" -> KeyEvent.VK_TAB;
+                        case "left" -> KeyEvent.VK_LEFT;
+                        case "right" -> KeyEvent.VK_RIGHT;
                         default -> KeyEvent.getExtendedKeyCodeForChar(key.charAt(0));
                     });
         }

@@ -306,7 +306,8 @@ public final class RunningDesk implements AutoCloseable {
 
     /** Types a text of plain characters into whatever has the focus. */
     public void type(String text) throws Exception {
-        for (char c : text.toCharArray()) {
+        for (int i = 0; i < text.length(); i++) {
+            char c = text.charAt(i);
             Component owner = await(
                     "a component with the focus",
                     () -> Optional.ofNullable(java.awt.KeyboardFocusManager.getCurrentKeyboardFocusManager()
@@ -390,6 +391,12 @@ public final class RunningDesk implements AutoCloseable {
             }
             framework.stop();
             framework.waitForStop(TimeUnit.SECONDS.toMillis(PATIENCE_SECONDS));
+            // Set by the register's store for a whole process; the next user of this one has a folder of his own,
+            // without
+            // which Java would refuse to load the database's native part again.
+            for (String property : List.of("org.sqlite.tmpdir", "org.sqlite.lib.path", "org.sqlite.lib.name")) {
+                System.clearProperty(property);
+            }
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
         } catch (Exception e) {

@@ -73,8 +73,10 @@ final class Commands {
         Optional<String> redo = desk.current().flatMap(OpenCampaign::redoable);
         keyed.add(step("Undo", undo, KeyEvent.VK_Z, MENU, desk::undo));
         keyed.add(step("Redo", redo, KeyEvent.VK_Z, MENU | InputEvent.SHIFT_DOWN_MASK, desk::redo));
-        keyed.add(TitleLine.keyed("Next campaign", KeyEvent.VK_PAGE_DOWN, MENU, () -> turn(desk, 1)));
-        keyed.add(TitleLine.keyed("Campaign before", KeyEvent.VK_PAGE_UP, MENU, () -> turn(desk, -1)));
+        keyed.add(
+                TitleLine.keyed("Next campaign", KeyEvent.VK_PAGE_DOWN, InputEvent.ALT_DOWN_MASK, () -> turn(desk, 1)));
+        keyed.add(TitleLine.keyed(
+                "Campaign before", KeyEvent.VK_PAGE_UP, InputEvent.ALT_DOWN_MASK, () -> turn(desk, -1)));
         keyed.add(TitleLine.keyed(
                         "Move the hairline warmer", KeyEvent.VK_RIGHT, InputEvent.ALT_DOWN_MASK, () -> desk.nudge(0.5))
                 .withWords("temperature"));

@@ -6,6 +6,7 @@ import java.awt.Window;
 import java.awt.event.AWTEventListener;
 import java.awt.event.AWTEventListenerProxy;
 import java.beans.PropertyChangeListener;
+import java.beans.PropertyChangeListenerProxy;
 import javax.swing.UIManager;
 
 /**
@@ -29,7 +30,9 @@ final class Release {
         }
         KeyboardFocusManager focus = KeyboardFocusManager.getCurrentKeyboardFocusManager();
         for (PropertyChangeListener listener : focus.getPropertyChangeListeners()) {
-            if (from(loader, listener)) {
+            if (listener instanceof PropertyChangeListenerProxy proxy && from(loader, proxy.getListener())) {
+                focus.removePropertyChangeListener(proxy.getPropertyName(), proxy.getListener());
+            } else if (from(loader, listener)) {
                 focus.removePropertyChangeListener(listener);
             }
         }

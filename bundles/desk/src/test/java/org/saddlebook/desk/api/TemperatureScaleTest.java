@@ -45,7 +45,10 @@ class TemperatureScaleTest {
                 TemperatureScale.Tick tick = ticks.get(i);
                 assertTrue(scale.holds(tick.kelvin()));
                 assertEquals(
-                        (double) Long.parseLong(tick.label().replace('\u2212', '-')), tick.kelvin() - zero, 1e-9, tick.label());
+                        (double) Long.parseLong(tick.label().replace('\u2212', '-')),
+                        tick.kelvin() - zero,
+                        1e-9,
+                        tick.label());
                 if (i > 0) {
                     assertTrue(scale.x(tick.kelvin()) - scale.x(ticks.get(i - 1).kelvin()) >= 45);
                 }

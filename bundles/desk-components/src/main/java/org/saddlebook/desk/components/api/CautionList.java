@@ -68,14 +68,6 @@ public final class CautionList extends JPanel {
         }
 
         @Override
-        public void scrollRectToVisible(java.awt.Rectangle place) {
-            // A text that is filled moves its caret; the page must not run after it.
-            if (hasFocus()) {
-                super.scrollRectToVisible(place);
-            }
-        }
-
-        @Override
         protected void paintComponent(Graphics graphics) {
             Graphics2D g = (Graphics2D) graphics.create();
             g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);

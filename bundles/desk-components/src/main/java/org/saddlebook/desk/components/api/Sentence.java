@@ -66,12 +66,4 @@ public final class Sentence extends JTextArea {
         setVisible(!text.isEmpty());
         getAccessibleContext().setAccessibleName(name.isEmpty() ? text : name);
     }
-
-    @Override
-    public void scrollRectToVisible(java.awt.Rectangle place) {
-        // A text that is filled moves its caret; the page must not run after it.
-        if (hasFocus()) {
-            super.scrollRectToVisible(place);
-        }
-    }
 }

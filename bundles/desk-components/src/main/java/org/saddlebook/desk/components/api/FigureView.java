@@ -20,6 +20,9 @@ import java.util.function.Function;
 import javax.accessibility.AccessibleContext;
 import javax.swing.JComponent;
 import javax.swing.JPanel;
+import javax.swing.JViewport;
+import javax.swing.SwingUtilities;
+import org.saddlebook.api.findings.Layer;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.charts.api.FigureDrawing;
 import org.saddlebook.charts.api.FigureDrawings;
@@ -40,6 +43,11 @@ public final class FigureView extends JComponent {
 
     /** Below this the rail is not laid out yet, or too small to read a figure on it. */
     private static final double LEAST_RAIL = 160;
+
+    /** Below this the drawing area of a figure is too low to be read, points. */
+    private static final int LEAST_HEIGHT = 240;
+
+    private static final int LEAST_WITH_SPINDLE = 340;
 
     /** Room that numbers of the vertical axis take. */
     private static final double LEAST_LEFT = 60;
@@ -90,6 +98,19 @@ public final class FigureView extends JComponent {
     public FigureView setHeight(int height) {
         setPreferredSize(new Dimension(600, height));
         return this;
+    }
+
+    /** As high as it was set, but not higher than the place around its page, so that it can be seen whole. */
+    @Override
+    public Dimension getPreferredSize() {
+        Dimension wanted = super.getPreferredSize();
+        java.awt.Container place = SwingUtilities.getAncestorOfClass(JViewport.class, this);
+        if (place == null || place.getHeight() <= 0 || figure.isEmpty()) {
+            return wanted;
+        }
+        boolean spindle = Curve.layer(figure.get(), Layer.Kind.SPINDLE, "").isPresent();
+        int least = Math.min(wanted.height, spindle ? LEAST_WITH_SPINDLE : LEAST_HEIGHT);
+        return new Dimension(wanted.width, Math.max(least, Math.min(wanted.height, place.getHeight())));
     }
 
     /** Lays temperatures out as on the desk's rail, so that the hairline crosses the figure at the right one. */

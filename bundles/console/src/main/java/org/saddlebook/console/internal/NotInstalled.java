@@ -13,7 +13,15 @@ final class NotInstalled {
             "model-arrhenius",
             "model-eyring",
             "model-modified-arrhenius",
+            "model-eyring-heat-capacity",
+            "model-parallel-channels",
+            "model-shifted-origin",
+            "model-falloff",
+            "tunnelling",
+            "data-checks",
             "spontaneity",
+            "window",
+            "reaction-series",
             "report",
             "register");
 

@@ -7,6 +7,7 @@ import java.util.Map;
 import org.saddlebook.api.campaign.Campaign;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
+import org.saddlebook.api.model.Conditions;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.api.task.Task;
 
@@ -39,6 +40,13 @@ final class DataChecksEvaluation {
         Subject subject = new Subject(campaign, stated);
         if (subject.rows().isEmpty()) {
             return Section.refused(SECTION, TITLE, "Every row of the rate table is excluded.");
+        }
+        if (campaign.rateTable().orElseThrow().varies(Conditions.THIRD_BODY)) {
+            return Section.refused(
+                    SECTION,
+                    TITLE,
+                    "The rows were measured at different third-body concentrations or pressures; k then follows more than the"
+                            + " temperature, and the rules would take that for mistakes.");
         }
         List<Node> findings = new ArrayList<>();
         List<Node> nothing = new ArrayList<>();

@@ -17,6 +17,7 @@ import org.saddlebook.api.campaign.RatePoint;
 import org.saddlebook.api.campaign.RateTable;
 import org.saddlebook.api.findings.Node;
 import org.saddlebook.api.findings.Section;
+import org.saddlebook.api.model.Conditions;
 import org.saddlebook.api.quantity.Unit;
 import org.saddlebook.api.task.Cancelled;
 import org.saddlebook.testkit.api.ImmediateTask;
@@ -91,6 +92,19 @@ class RulesTest {
     @Test
     void staysSilentOnACleanTable() {
         assertEquals(Map.of(), found(campaign(table(), "s-1")));
+    }
+
+    @Test
+    void doesNotTakeAFalloffForMistakes() throws Cancelled {
+        Campaign campaign = campaign(table(), "s-1");
+        RateTable rates = campaign.rateTable().orElseThrow();
+        List<RatePoint> points = new ArrayList<>();
+        for (RatePoint point : rates.points()) {
+            points.add(point.withConditions(Conditions.NONE.with(Conditions.PRESSURE, 100 * (points.size() + 1))));
+        }
+        Section section =
+                DataChecksEvaluation.section(campaign.withRateTable(rates.withPoints(points)), ImmediateTask.seeded(1));
+        assertEquals(Section.Outcome.REFUSED, section.outcome());
     }
 
     @Test

@@ -1,5 +1,6 @@
 package org.saddlebook.reader.sheet.internal;
 
+import com.github.miachm.sods.OdsOptionParameters;
 import com.github.miachm.sods.OfficeCurrency;
 import com.github.miachm.sods.OfficePercentage;
 import com.github.miachm.sods.Range;
@@ -18,7 +19,10 @@ final class OpenDocument implements Office {
     @Override
     public List<Grid> sheets(byte[] bytes, Task task) throws IOException, Cancelled {
         List<Grid> grids = new ArrayList<>();
-        for (Sheet sheet : new SpreadSheet(new ByteArrayInputStream(bytes)).getSheets()) {
+        // Looking for styles, the library would pass by the content of a document that has none.
+        OdsOptionParameters withoutStyles = new OdsOptionParameters();
+        withoutStyles.setLoadStyles(false);
+        for (Sheet sheet : new SpreadSheet(new ByteArrayInputStream(bytes), withoutStyles).getSheets()) {
             Cells cells = new Cells();
             Range range = sheet.getDataRange();
             Object[][] values = range.getNumRows() == 0 ? new Object[0][0] : range.getValues();

@@ -10,6 +10,8 @@ import static org.saddlebook.reader.sheet.internal.Workbooks.number;
 import static org.saddlebook.reader.sheet.internal.Workbooks.text;
 
 import com.github.miachm.sods.OfficePercentage;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -157,6 +159,15 @@ class SheetReaderTest extends DataReaderContract {
         InputException absent =
                 assertThrows(InputException.class, () -> read("a.xlsx", bytes, Map.of("sheet", "Elsewhere")));
         assertEquals("no-such-sheet", absent.problems().get(0).code());
+    }
+
+    @Test
+    void theDemoWorkbooksGiveTheSameTable() throws Exception {
+        Path demo = Path.of("..", "..", "demo-data", "spreadsheets");
+        Imported workbook = read("a.xlsx", Files.readAllBytes(demo.resolve("release.xlsx")), Map.of("sheet", "Rates"));
+        Imported document = read("a.ods", Files.readAllBytes(demo.resolve("release.ods")), Map.of());
+        assertEquals(10, workbook.rateTable().orElseThrow().points().size());
+        assertEquals(workbook.rateTable(), document.rateTable());
     }
 
     @Test

@@ -54,11 +54,13 @@ final class ScreenCondition implements ExecutionCondition {
     private static Optional<String> virtual(String display) {
         Path socket = Path.of("/tmp/.X11-unix/X" + display.substring(1));
         try {
-            Process server = new ProcessBuilder("Xvfb", display, "-screen", "0", "1366x768x24", "-nolisten", "tcp")
+            // It ends by itself with its last client. Ended earlier, it would take this process down with a fault of
+            // its own.
+            Process server = new ProcessBuilder(
+                            "Xvfb", display, "-screen", "0", "1366x768x24", "-nolisten", "tcp", "-terminate")
                     .redirectErrorStream(true)
                     .redirectOutput(ProcessBuilder.Redirect.DISCARD)
                     .start();
-            Runtime.getRuntime().addShutdownHook(new Thread(server::destroy, "end of the virtual screen"));
             long end = System.nanoTime() + TimeUnit.SECONDS.toNanos(PATIENCE_SECONDS);
             while (System.nanoTime() < end) {
                 boolean ended = server.waitFor(50, TimeUnit.MILLISECONDS);

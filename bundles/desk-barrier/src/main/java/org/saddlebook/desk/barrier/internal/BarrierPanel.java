@@ -21,6 +21,7 @@ import org.saddlebook.desk.api.Reading;
 import org.saddlebook.desk.api.TemperatureScale;
 import org.saddlebook.desk.components.api.Curve;
 import org.saddlebook.desk.components.api.DeskComponents;
+import org.saddlebook.desk.components.api.MarkPlaces;
 import org.saddlebook.desk.components.api.Nodes;
 import org.saddlebook.desk.components.api.RailStrip;
 import org.saddlebook.presentation.api.QuantityText;
@@ -204,9 +205,10 @@ final class BarrierPanel implements DeskPanel {
         for (Layer layer : figure.get().layers()) {
             double[] x = layer.x();
             double[] y = layer.y();
+            MarkPlaces places = new MarkPlaces();
             for (int i = 0; i < x.length; i++) {
                 double py = height - 8 - (y[i] - low) * unit;
-                boolean inside = scale.holds(x[i]) && py >= 4 && py <= height - 4;
+                boolean inside = scale.holds(x[i]) && py >= 4 && py <= height - 4 && places.take(scale.x(x[i]), py);
                 if (inside && layer.kind() == Layer.Kind.MEASURED) {
                     Marks.measured(g, ink, scale.x(x[i]), py);
                 } else if (inside && layer.kind() == Layer.Kind.EXCLUDED) {

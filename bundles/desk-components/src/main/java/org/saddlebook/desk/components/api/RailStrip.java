@@ -4,6 +4,7 @@ import java.awt.Dimension;
 import java.awt.Graphics;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
+import java.awt.image.BufferedImage;
 import javax.accessibility.AccessibleContext;
 import javax.accessibility.AccessibleRole;
 import javax.swing.JComponent;
@@ -32,6 +33,7 @@ public final class RailStrip extends JComponent {
 
     private final transient DeskContext context;
     private final transient Painter painter;
+    private transient BufferedImage drawn;
 
     /**
      * A strip.
@@ -56,6 +58,25 @@ public final class RailStrip extends JComponent {
         }
         Graphics2D g = (Graphics2D) graphics.create();
         try {
+            double scale = Math.max(1, g.getTransform().getScaleX());
+            int wide = (int) Math.ceil(getWidth() * scale);
+            int high = (int) Math.ceil(getHeight() * scale);
+            if (drawn == null || drawn.getWidth() != wide || drawn.getHeight() != high) {
+                drawn = draw(wide, high, scale);
+            }
+            g.drawImage(drawn, 0, 0, getWidth(), getHeight(), null);
+        } finally {
+            g.dispose();
+        }
+    }
+
+    /** The marks as a picture: the hairline crosses the strip at every move of the mouse, and the marks stay as they are. */
+    private BufferedImage draw(int wide, int high, double scale) {
+        BufferedImage picture = new BufferedImage(wide, high, BufferedImage.TYPE_INT_ARGB_PRE);
+        Graphics2D g = picture.createGraphics();
+        try {
+            g.scale(scale, scale);
+            g.setFont(getFont());
             g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
             g.setRenderingHint(RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
             g.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
@@ -63,6 +84,14 @@ public final class RailStrip extends JComponent {
         } finally {
             g.dispose();
         }
+        return picture;
+    }
+
+    /** Asked for by the panel when it shows something else: the marks are drawn anew. */
+    @Override
+    public void repaint() {
+        drawn = null;
+        super.repaint();
     }
 
     @Override

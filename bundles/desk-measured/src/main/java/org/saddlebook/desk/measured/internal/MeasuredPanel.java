@@ -20,6 +20,7 @@ import org.saddlebook.desk.api.Marks;
 import org.saddlebook.desk.api.TemperatureScale;
 import org.saddlebook.desk.components.api.DeskComponents;
 import org.saddlebook.desk.components.api.Exclusions;
+import org.saddlebook.desk.components.api.MarkPlaces;
 import org.saddlebook.desk.components.api.RailStrip;
 import org.saddlebook.presentation.api.UnitText;
 
@@ -157,8 +158,14 @@ final class MeasuredPanel implements DeskPanel {
     }
 
     private void marks(Graphics2D g, TemperatureScale scale, Ink ink, int width, int height) {
+        MarkPlaces used = new MarkPlaces();
+        MarkPlaces excluded = new MarkPlaces();
         for (RatePoint point : points()) {
             double x = scale.x(point.kelvin());
+            MarkPlaces places = point.excluded().isPresent() ? excluded : used;
+            if (!places.take(x, 0)) {
+                continue;
+            }
             if (point.excluded().isPresent()) {
                 Marks.excluded(g, ink, x, height / 2.0);
             } else {

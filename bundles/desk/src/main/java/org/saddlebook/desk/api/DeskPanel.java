@@ -20,7 +20,8 @@ public interface DeskPanel {
     /**
      * The marks shown while the stratum is folded, laid out to the right of title and sentence and as high as it prefers
      * (the desk gives 36 to 120 points). Positions of temperatures come from {@link DeskContext#scale}. Always the same
-     * component; not focusable as a whole, and without controls.
+     * component; not focusable as a whole, and without controls. A strip without marks is made invisible, so that the
+     * sentence has its room.
      */
     JComponent strip();
 

@@ -98,8 +98,12 @@ final class DefaultPanel implements DeskPanel {
         };
     }
 
-    /** Sections say the most important thing as the first of their notes. */
+    /** Sections say the most important thing in their summary or as the first of their notes. */
     private static Optional<String> note(Section section) {
+        if (section.body() instanceof Node.Group body
+                && body.get("summary").orElse(null) instanceof Node.Text summary) {
+            return Optional.of(summary.value());
+        }
         boolean first = section.body() instanceof Node.Group group
                 && group.get("notes").orElse(null) instanceof Node.Items notes
                 && !notes.items().isEmpty()
@@ -240,6 +244,7 @@ final class DefaultPanel implements DeskPanel {
             List<double[]> points = new ArrayList<>();
             found.ifPresent(s -> collect(s.body(), points, 0));
             marks = points;
+            setVisible(!points.isEmpty());
             repaint();
         }
 

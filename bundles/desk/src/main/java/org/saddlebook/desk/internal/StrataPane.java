@@ -22,7 +22,7 @@ final class StrataPane extends JPanel implements Scrollable {
     private static final int MOST_LINES = 3;
 
     /** Height that an open body should have above the least one before sentences get more than a line. */
-    private static final int COMFORT = 110;
+    private static final int COMFORT = 40;
 
     private final transient Desk desk;
     private final transient List<Stratum> strata = new ArrayList<>();

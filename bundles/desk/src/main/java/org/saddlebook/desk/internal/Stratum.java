@@ -143,6 +143,8 @@ final class Stratum extends JPanel {
         sentence.setText(host.sentence());
         title.getAccessibleContext().setAccessibleName(host.title() + (open ? ", open" : ", folded"));
         title.getAccessibleContext().setAccessibleDescription(host.sentence());
+        title.setToolTipText(open ? null : host.sentence());
+        revalidate();
     }
 
     void column(int width) {
@@ -175,7 +177,15 @@ final class Stratum extends JPanel {
         if (open) {
             return width - column - MARGIN - againWidth();
         }
-        return host.failure().isPresent() ? width - 2 * MARGIN - againWidth() : column - MARGIN - 4;
+        if (host.failure().isPresent()) {
+            return width - 2 * MARGIN - againWidth();
+        }
+        return marked() ? column - MARGIN - 4 : width - 2 * MARGIN;
+    }
+
+    /** Whether it has marks on the rail; without them the sentence has their room. */
+    private boolean marked() {
+        return content.isPresent() && content.get().getComponent(0).isVisible();
     }
 
     private int againWidth() {

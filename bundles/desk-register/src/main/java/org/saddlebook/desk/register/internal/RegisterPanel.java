@@ -40,6 +40,7 @@ final class RegisterPanel implements DeskPanel {
                 BARS * BAR + 10,
                 context,
                 this::bars);
+        strip.setVisible(false);
     }
 
     @Override
@@ -80,6 +81,7 @@ final class RegisterPanel implements DeskPanel {
         context.run("reading the register", progress -> access.list(context, progress), read -> {
             rows = Optional.of(read);
             page.ifPresent(open -> open.list(read));
+            strip.setVisible(!read.isEmpty());
             strip.repaint();
             context.refresh();
         });

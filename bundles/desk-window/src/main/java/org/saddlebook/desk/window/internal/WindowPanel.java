@@ -69,6 +69,7 @@ final class WindowPanel implements DeskPanel {
     @Override
     public void show(DeskState shown) {
         state = shown;
+        strip.setVisible(spindle(shown).isPresent());
         strip.repaint();
         page.ifPresent(open -> open.show(shown));
     }

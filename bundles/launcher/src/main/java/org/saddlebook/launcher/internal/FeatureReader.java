@@ -9,6 +9,11 @@ import java.util.List;
  * mandatory extensions) is refused rather than skipped: a feature must never be half there without a word.
  */
 final class FeatureReader {
+    /** Extension of kind text: the verbs that need the feature. */
+    private static final String VERBS = "saddlebook-verbs";
+
+    private final List<String> verbs = new ArrayList<>();
+
     private final List<Coordinates> bundles = new ArrayList<>();
     private Coordinates id;
     private String name = "";
@@ -26,7 +31,7 @@ final class FeatureReader {
                     "an id such as org.saddlebook:org.saddlebook.features.base:0.1.0",
                     "Add the id or restore the file from the installation archive.");
         }
-        return new Feature(file, reader.id, reader.name, reader.bundles);
+        return new Feature(file, reader.id, reader.name, reader.bundles, reader.verbs);
     }
 
     private void member(StrictJson json, String key) throws IOException, Refused {
@@ -83,6 +88,8 @@ final class FeatureReader {
         json.members("an extension", key -> {
             if (key.equals("kind")) {
                 mandatory[0] = json.text("the extension's kind").equals("mandatory");
+            } else if (extension.equals(VERBS) && key.equals("text")) {
+                verbs.addAll(json.texts("the verbs"));
             } else {
                 json.skip();
             }

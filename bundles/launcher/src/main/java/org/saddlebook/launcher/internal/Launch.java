@@ -81,9 +81,22 @@ final class Launch {
         }
     }
 
+    /** The verb that all commands share; empty when they do not, or have none. */
+    private static String verb(List<String[]> commands) {
+        String verb = null;
+        for (String[] command : commands) {
+            String first = command.length == 0 ? "" : command[0];
+            if (verb != null && !verb.equals(first)) {
+                return "";
+            }
+            verb = first;
+        }
+        return verb == null ? "" : verb;
+    }
+
     private int run(List<String[]> commands, Long shuffle)
             throws IOException, Refused, BundleException, InterruptedException {
-        Plan plan = Plan.of(home, folders.userBundles(), policy, shuffle);
+        Plan plan = Plan.of(home, folders.userBundles(), policy, verb(commands), shuffle);
         try (CacheSlot slot = CacheSlot.take(folders.cache().resolve("framework"), plan.key())) {
             Framework framework;
             try {

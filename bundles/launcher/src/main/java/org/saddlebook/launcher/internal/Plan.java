@@ -63,10 +63,11 @@ record Plan(
      *
      * @param home the product's folder
      * @param userBundles folder of the user's own bundles; need not exist
+     * @param verb first word of the command, empty for none; features that it does not need are left alone
      * @param shuffle seed of a random order of installation; null for the order of the feature files. Findings must not
      *     depend on it
      */
-    static Plan of(Path home, Path userBundles, Policy policy, Long shuffle) throws IOException, Refused {
+    static Plan of(Path home, Path userBundles, Policy policy, String verb, Long shuffle) throws IOException, Refused {
         Map<String, String> troubles = new LinkedHashMap<>();
         Map<String, Coordinates> byArtifact = new LinkedHashMap<>();
         Map<String, String> namedIn = new LinkedHashMap<>();
@@ -86,6 +87,9 @@ record Plan(
                 continue;
             }
             names.add(name);
+            if (!feature.neededBy(verb)) {
+                continue;
+            }
             for (Coordinates bundle : feature.bundles()) {
                 Coordinates other = byArtifact.putIfAbsent(bundle.artifact(), bundle);
                 if (other != null && !other.equals(bundle)) {

@@ -1,6 +1,7 @@
 package org.saddlebook.launcher.internal;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -28,6 +29,18 @@ class FeatureReaderTest {
                 }""");
         assertEquals("X", feature.name());
         assertEquals(List.of(new Coordinates("a", "one", "1"), new Coordinates("a", "two", "2")), feature.bundles());
+    }
+
+    @Test
+    void aFeatureCanBelongToSomeVerbsOnly() throws Refused {
+        Feature feature = read("""
+                { "id": "org.example:x:1.0.0",
+                  "extensions": { "saddlebook-verbs": { "kind": "optional", "type": "text", "text": ["desk", "help"] } } }""");
+        assertTrue(feature.neededBy("desk"));
+        assertTrue(feature.neededBy("")); // no verb: what there is gets listed
+        assertTrue(feature.neededBy("--version"));
+        assertFalse(feature.neededBy("evaluate"));
+        assertTrue(read("{ \"id\": \"org.example:x:1.0.0\" }").neededBy("evaluate"));
     }
 
     @ParameterizedTest

@@ -386,7 +386,7 @@ final class CoverageProgram {
     /** The table. */
     String markdown() {
         StringBuilder text = new StringBuilder(4000);
-        text.append("Coverage of intervals that say 95 %. ")
+        text.append("## Coverage of intervals\n\nCoverage of intervals that say 95 %. ")
                 .append(campaigns)
                 .append(" campaigns each, seed ")
                 .append(seed)

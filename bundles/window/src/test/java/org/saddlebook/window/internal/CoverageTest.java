@@ -53,7 +53,7 @@ class CoverageTest {
     @Tag("long")
     void endsAreMissedAtTheStatedRateWithinOnePerCent() throws IOException {
         Shares shares = simulate(LONG, 4000, 21);
-        StringBuilder page = new StringBuilder("# Ends of the operating window\n\n")
+        StringBuilder page = new StringBuilder("## Ends of the operating window\n\n")
                 .append(LONG)
                 .append(" simulated campaigns of five runs (scatter 5 %, scale estimated), ΔH and ΔS with stated")
                 .append(" uncertainties; cold end by time, hot end by ΔG. Share of campaigns in which the end at a")

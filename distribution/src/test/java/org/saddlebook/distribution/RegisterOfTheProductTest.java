@@ -68,14 +68,14 @@ class RegisterOfTheProductTest {
 
     /** A twentieth of the full run. */
     @Test
-    @DisabledOnOs(OS.WINDOWS) // no kill -9 there
+    @DisabledOnOs(value = OS.WINDOWS, disabledReason = "Windows has no kill -9")
     void killsAtRandomMomentsLoseNoAcknowledgedEntry() throws Exception {
         kill(10, System.nanoTime());
     }
 
     @Test
     @Tag("long")
-    @DisabledOnOs(OS.WINDOWS) // no kill -9 there
+    @DisabledOnOs(value = OS.WINDOWS, disabledReason = "Windows has no kill -9")
     void twoHundredKillsAtRandomMomentsLoseNoAcknowledgedEntry() throws Exception {
         kill(200, System.nanoTime());
     }

@@ -89,7 +89,7 @@ class ProcessesTest {
 
     @Test
     @Timeout(300)
-    @DisabledOnOs(OS.WINDOWS) // no kill -9 there
+    @DisabledOnOs(value = OS.WINDOWS, disabledReason = "Windows has no kill -9")
     void loseNoAcknowledgedEntryWhenKilledTenTimes() throws Exception {
         kill(10, System.nanoTime());
     }
@@ -97,7 +97,7 @@ class ProcessesTest {
     @Test
     @Tag("long")
     @Timeout(1800)
-    @DisabledOnOs(OS.WINDOWS)
+    @DisabledOnOs(value = OS.WINDOWS, disabledReason = "Windows has no kill -9")
     void loseNoAcknowledgedEntryWhenKilledTwoHundredTimes() throws Exception {
         kill(200, System.nanoTime());
     }

@@ -168,7 +168,7 @@ class SqliteStoreTest {
     }
 
     @Test
-    @DisabledOnOs(OS.WINDOWS)
+    @DisabledOnOs(value = OS.WINDOWS, disabledReason = "Windows has no setgid folders")
     void makesTheFileGroupWritableInAFolderThatAGroupShares() throws Exception {
         Path shared = Files.createDirectory(folder.resolve("shared"));
         Files.setAttribute(shared, "unix:mode", 02770);

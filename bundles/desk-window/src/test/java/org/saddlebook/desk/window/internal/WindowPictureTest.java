@@ -2,52 +2,31 @@ package org.saddlebook.desk.window.internal;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
-import java.awt.image.BufferedImage;
 import java.nio.file.Path;
 import java.util.List;
-import javax.swing.JComponent;
-import javax.swing.JScrollPane;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.saddlebook.charts.internal.ChartsRenderer;
 import org.saddlebook.desk.components.api.Saving;
 import org.saddlebook.desk.components.internal.ComponentsService;
-import org.saddlebook.desk.testkit.api.ExampleStates;
-import org.saddlebook.desk.testkit.api.Pictures;
-import org.saddlebook.desk.testkit.api.TestDesk;
+import org.saddlebook.desk.testkit.api.PanelPictures;
 
 /** Pictures in target/pictures, for looking at; nothing may be cut or nameless. */
 class WindowPictureTest {
     @TempDir
     Path folder;
 
-    private record Shown(BufferedImage strip, BufferedImage page, List<String> cut, List<String> nameless) {}
-
-    private Shown shown(boolean dark, int width, double scale) {
-        return Pictures.onDesk(dark, () -> {
-            TestDesk desk = new TestDesk(ExampleStates.ringClosure(), folder, dark);
-            WindowPanel panel =
-                    new WindowPanel(desk, new ComponentsService(new ChartsRenderer(), List.of(), Saving.system()));
-            desk.attach(panel);
-            JComponent strip = panel.strip();
-            Pictures.layOut(strip, width, strip.getPreferredSize().height);
-            JScrollPane body = (JScrollPane) panel.body();
-            JComponent page = (JComponent) body.getViewport().getView();
-            Pictures.layOut(page, width, 100);
-            Pictures.layOut(page, width, page.getPreferredSize().height);
-            Pictures.layOut(page, width, page.getPreferredSize().height);
-            return new Shown(
-                    Pictures.paint(strip, scale),
-                    Pictures.paint(page, scale),
-                    Pictures.cut(page),
-                    Pictures.nameless(page));
-        });
+    private PanelPictures shown(boolean dark, int width, double scale) {
+        return PanelPictures.of(
+                dark,
+                width,
+                scale,
+                folder,
+                desk -> new WindowPanel(desk, new ComponentsService(new ChartsRenderer(), List.of(), Saving.system())));
     }
 
-    private void check(String name, Shown shown) throws Exception {
-        Path target = Path.of("target", "pictures");
-        Pictures.write(shown.strip(), target.resolve(name + "-strip.png"));
-        Pictures.write(shown.page(), target.resolve(name + ".png"));
+    private static void check(String name, PanelPictures shown) throws Exception {
+        shown.write(name);
         assertEquals(List.of(), shown.cut(), name);
         assertEquals(List.of(), shown.nameless(), name);
     }
